@@ -1,0 +1,49 @@
+import { z } from 'zod';
+import { ERROR_CODES } from '../errors';
+
+export const idSchema = z.uuid();
+export const hexSchema = z.string().regex(/^#[0-9a-f]{6}$/, 'a colour is # and six small hexadecimal digits');
+/** A length that a thing can have: above nothing, and under 10 m. */
+export const sizeSchema = z.int().positive().max(1_600_000);
+/** A place or a signed distance. */
+export const offsetSchema = z.int().min(-1_600_000).max(1_600_000);
+export const turnsSchema = z.union([z.literal(0), z.literal(1), z.literal(2), z.literal(3)]);
+export const sideSchema = z.enum(['left', 'right']);
+export const dateSchema = z.iso.date();
+export const instantSchema = z.iso.datetime();
+export const revisionSchema = z.int().nonnegative();
+
+/**
+ * A line of text as people type it: trimmed, in Unicode's composed form, without control characters and
+ * without the marks that turn the reading direction (they can disguise a name).
+ */
+export const lineSchema = (max: number) =>
+  z
+    .string()
+    .transform((text) => text.normalize('NFC').replace(/[\p{Cc}\u200e\u200f\u202a-\u202e\u2066-\u2069]/gu, '').trim())
+    .pipe(z.string().min(1).max(max));
+
+/** Several lines of text; may be empty. */
+export const textSchema = (max: number) =>
+  z
+    .string()
+    .transform((text) => text.normalize('NFC').replace(/[\u200e\u200f\u202a-\u202e\u2066-\u2069]/gu, '').replace(/(?!\n)\p{Cc}/gu, ''))
+    .pipe(z.string().max(max));
+
+/** RFC 9457 problem details; `code` is what a client reads, `fields` names every field that did not fit. */
+export const problemSchema = z.object({
+  type: z.string(),
+  title: z.string(),
+  status: z.int(),
+  detail: z.string(),
+  instance: z.string().optional(),
+  code: z.enum(ERROR_CODES),
+  fields: z.array(z.object({ path: z.string(), message: z.string() })).optional(),
+  data: z.record(z.string(), z.unknown()).optional(),
+});
+export type Problem = z.infer<typeof problemSchema>;
+
+export const pageQuerySchema = z.strictObject({
+  cursor: z.string().max(200).optional(),
+  limit: z.coerce.number().int().min(1).max(200).default(100),
+});

@@ -1,0 +1,56 @@
+import { snapTo } from '../model/length';
+import type { Print } from '../model/print';
+import type { Rect, Size } from '../model/rect';
+import type { Placement } from '../model/spread';
+import { turnedSize } from './paper';
+
+/** The size of a placed print's whole paper: its own, or for a digital photo the one it is scaled to. */
+export function placedPaper(print: Pick<Print, 'paperWidth' | 'paperHeight'>, placement: Pick<Placement, 'scaledWidth'>): Size {
+  if (placement.scaledWidth === null) return { width: print.paperWidth, height: print.paperHeight };
+  return {
+    width: placement.scaledWidth,
+    height: Math.round((placement.scaledWidth * print.paperHeight) / print.paperWidth),
+  };
+}
+
+/**
+ * The window on the upright paper that a placement shows through a photo of size `photo` on the page.
+ * It never zooms: its size is the photo's, with width and height exchanged for an odd turn.
+ */
+export function windowOnPaper(placement: Pick<Placement, 'x' | 'y' | 'turn'>, photo: Size): Rect {
+  const size = turnedSize(photo, placement.turn);
+  return { x: placement.x, y: placement.y, width: size.width, height: size.height };
+}
+
+/**
+ * The window's place nearest to (x, y) that sits on the trimmer's finest mark and stays on the paper.
+ * Where the paper is smaller than the window in one direction, it is centred there on a mark, so that
+ * what is missing shows on both sides.
+ *
+ * @param window - window size on the paper (already exchanged for an odd turn), in Lengths.
+ */
+export function slideWindow(x: number, y: number, window: Size, paper: Size, finestMark: number): { x: number; y: number } {
+  return {
+    x: slideAxis(x, window.width, paper.width, finestMark),
+    y: slideAxis(y, window.height, paper.height, finestMark),
+  };
+}
+
+function slideAxis(at: number, window: number, paper: number, mark: number): number {
+  const room = paper - window;
+  if (room < 0) return snapTo(room / 2, mark);
+  const last = Math.floor(room / mark) * mark;
+  return Math.min(Math.max(snapTo(at, mark), 0), last);
+}
+
+/** The window centred on a rectangle of the paper (a keep zone), or on the paper itself. */
+export function centreWindow(window: Size, paper: Size, finestMark: number, on?: Rect | null): { x: number; y: number } {
+  const target = on ?? { x: 0, y: 0, width: paper.width, height: paper.height };
+  return slideWindow(
+    target.x + (target.width - window.width) / 2,
+    target.y + (target.height - window.height) / 2,
+    window,
+    paper,
+    finestMark,
+  );
+}
