@@ -68,7 +68,7 @@ function wholeFaults(doc: SpreadDocument): DocumentFault[] {
   const bytes = utf8Length(JSON.stringify(doc));
   if (bytes > MAX_DOCUMENT_BYTES) faults.push(fault('document-too-large', [], { bytes, max: MAX_DOCUMENT_BYTES }));
   const seen = new Set<string>();
-  for (const { id } of [...doc.mats, ...doc.panes]) {
+  for (const id of [...doc.mats, ...doc.panes].map((thing): string => thing.id)) {
     if (seen.has(id)) faults.push(fault('duplicate-id', doc.mats.some((mat) => mat.id === id) ? [id] : [], { id }));
     seen.add(id);
   }
