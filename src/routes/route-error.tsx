@@ -1,0 +1,25 @@
+import { useRouteError } from 'react-router-dom';
+import { Button } from '@/components/button';
+import { PlainPage } from '@/components/plain-page';
+import { ApiError } from '@/lib/api';
+import { NotFound } from './not-found';
+
+/** What a screen shows when it could not be drawn or loaded. */
+export function RouteError() {
+  const error = useRouteError();
+  if (error instanceof ApiError && error.code === 'not-found') return <NotFound />;
+  return (
+    <PlainPage title={error instanceof ApiError ? 'This could not be fetched' : 'Something slipped'}>
+      <p>
+        {error instanceof ApiError
+          ? error.detail
+          : 'This screen stopped because of a fault of ours. What was saved is safe; load the page again to go on.'}
+      </p>
+      <p className="mt-4">
+        <Button variant="paper" onClick={() => window.location.reload()}>
+          Load again
+        </Button>
+      </p>
+    </PlainPage>
+  );
+}
