@@ -53,3 +53,12 @@ export type Session = z.infer<typeof sessionSchema>;
 
 export const memberSchema = z.object({ userId: idSchema, name: z.string(), role: z.enum(ROLES) });
 export type Member = z.infer<typeof memberSchema>;
+
+export const memberListSchema = z.object({ members: z.array(memberSchema) });
+
+/** What anyone may know of the server. The demo's accounts exist, and are told, in demo mode only. */
+export const healthSchema = z.object({
+  status: z.literal('ok'),
+  mode: z.enum(['demo', 'production']),
+  demoAccounts: z.array(z.object({ role: z.enum(ROLES), email: z.string(), password: z.string() })).optional(),
+});

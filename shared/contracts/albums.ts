@@ -76,3 +76,7 @@ export const spreadDetailSchema = spreadSummarySchema.extend({
   may: z.object({ edit: z.boolean(), comment: z.boolean(), export: z.boolean() }),
 });
 export type SpreadDetail = z.infer<typeof spreadDetailSchema>;
+
+export const albumListSchema = z.object({ albums: z.array(albumSchema) });
+/** The shipped page formats first, then the studio's own. */
+export const formatListSchema = z.object({ formats: z.array(pageFormatSchema) });

@@ -92,6 +92,8 @@ export const pileSchema = z.object({
 });
 export type Pile = z.infer<typeof pileSchema>;
 
+export const pileListSchema = z.object({ piles: z.array(pileSchema) });
+
 export const createPileSchema = z.strictObject({ id: idSchema, name: lineSchema(80) });
 export const updatePileSchema = z.strictObject({
   name: lineSchema(80).optional(),
