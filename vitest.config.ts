@@ -14,6 +14,7 @@ export default defineConfig({
         test: {
           name: 'server',
           include: ['tests/server/**/*.test.ts'],
+          globalSetup: ['tests/support/test-database-server.ts'],
           testTimeout: 60_000,
           hookTimeout: 120_000,
         },
