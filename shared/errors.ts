@@ -6,6 +6,7 @@ export const ERROR_CODES = [
   'forbidden',
   'not-found',
   'already-exists',
+  'in-use',
   'stale-revision',
   'document-refused',
   'picture-refused',

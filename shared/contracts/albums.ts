@@ -77,6 +77,9 @@ export const spreadDetailSchema = spreadSummarySchema.extend({
 });
 export type SpreadDetail = z.infer<typeof spreadDetailSchema>;
 
+/** Spreads in the bin are listed on their own. */
+export const spreadQuerySchema = z.strictObject({ binned: z.stringbool().default(false) });
+
 export const albumListSchema = z.object({ albums: z.array(albumSchema) });
 /** The shipped page formats first, then the studio's own. */
 export const formatListSchema = z.object({ formats: z.array(pageFormatSchema) });

@@ -71,6 +71,13 @@ export const loggedEditSchema = z.object({
 });
 export type LoggedEdit = z.infer<typeof loggedEditSchema>;
 
+/** Which part of the log: edits after a revision, oldest first. */
+export const editQuerySchema = z.strictObject({
+  after: z.coerce.number().int().nonnegative().default(0),
+  limit: z.coerce.number().int().min(1).max(500).default(200),
+});
+export const editListSchema = z.object({ edits: z.array(loggedEditSchema), revision: revisionSchema });
+
 /** `data` of a 409 `stale-revision` on a spread. */
 export const staleSpreadSchema = z.object({
   revision: revisionSchema,

@@ -17,6 +17,7 @@ export const grantSchema = z.object({
   expiresAt: instantSchema.nullable(),
   withdrawnAt: instantSchema.nullable(),
 });
+export const grantListSchema = z.object({ grants: z.array(grantSchema) });
 /** The only time that the token is told. */
 export const createdGrantSchema = grantSchema.extend({ token: z.string() });
 /** Header in which a grant's token is sent. */

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import type { Print } from '../model/print';
-import { dateSchema, hexSchema, idSchema, lineSchema, revisionSchema, sizeSchema, turnsSchema } from './common';
+import { dateSchema, hexSchema, idSchema, lineSchema, pageQuerySchema, revisionSchema, sizeSchema, turnsSchema } from './common';
 
 export const MAX_UPLOAD_BYTES = 50 * 1024 * 1024;
 export const MAX_PIXELS = 100_000_000;
@@ -50,6 +50,8 @@ export const updatePrintSchema = z.strictObject({
   details: z.array(detailSchema).max(12).optional(),
   faces: z.array(faceSchema).max(60).optional(),
   horizon: horizonSchema.nullable().optional(),
+  /** True puts the print in the bin, false takes it out; refused while a spread uses it. */
+  binned: z.boolean().optional(),
 });
 export type UpdatePrint = z.infer<typeof updatePrintSchema>;
 
@@ -91,6 +93,12 @@ export const pileSchema = z.object({
   sharedWithContributors: z.boolean(),
 });
 export type Pile = z.infer<typeof pileSchema>;
+
+/** `pileId` and `binned` choose; prints in the bin are listed on their own. */
+export const printQuerySchema = pageQuerySchema.extend({ pileId: idSchema.optional(), binned: z.stringbool().default(false) });
+
+/** `data` of a 409 `stale-revision` on a print: how it stands now. */
+export const stalePrintSchema = z.object({ print: printSchema });
 
 export const pileListSchema = z.object({ piles: z.array(pileSchema) });
 
