@@ -3,12 +3,15 @@ import type { Rect } from '../model/rect';
 
 /**
  * One drawn spread: the only thing that the screen, the PNG and the PDF draw from. All lengths are in
- * 1/160 mm from the left page's top-left corner; items are in drawing order.
+ * 1/160 mm from the left page's top-left corner (from the only page's, where there is one); items are
+ * in drawing order.
  */
 export interface Scene {
   readonly width: number;
   readonly height: number;
   readonly pages: readonly ScenePage[];
+  /** The fold between two pages that touch, drawn over the pages and under all items; null where there is none. */
+  readonly fold: Shade | null;
   readonly items: readonly SceneItem[];
 }
 
@@ -16,6 +19,13 @@ export interface ScenePage {
   readonly side: Side;
   readonly rect: Rect;
   readonly color: Hex;
+}
+
+/** A colour laid over what is under it. */
+export interface Shade {
+  readonly rect: Rect;
+  readonly fill: Hex;
+  readonly opacity: number;
 }
 
 interface ItemBase {
@@ -28,6 +38,16 @@ interface ItemBase {
 export interface RectItem extends ItemBase {
   readonly kind: 'rect';
   readonly rect: Rect;
+  readonly fill: Hex;
+  /** 1 unless said. */
+  readonly opacity?: number;
+}
+
+/** A line along the inside of a rectangle's four edges; never thinner than one pixel. */
+export interface FrameItem extends ItemBase {
+  readonly kind: 'frame';
+  readonly rect: Rect;
+  readonly thickness: number;
   readonly fill: Hex;
   /** 1 unless said. */
   readonly opacity?: number;
@@ -63,10 +83,11 @@ export interface TextItem extends ItemBase {
   /** Em size. */
   readonly size: number;
   readonly fill: Hex;
+  /** Only characters that the font has a glyph for; spaces are single and never first or last. */
   readonly text: string;
   /** Left edge of each code point of `text`, and the common baseline. */
   readonly xs: readonly number[];
   readonly baseline: number;
 }
 
-export type SceneItem = RectItem | CircleItem | PhotoItem | TextItem;
+export type SceneItem = RectItem | FrameItem | CircleItem | PhotoItem | TextItem;
