@@ -1,0 +1,121 @@
+import { createHash } from 'node:crypto';
+import { createWriteStream } from 'node:fs';
+import { rm } from 'node:fs/promises';
+import { Transform } from 'node:stream';
+import { pipeline } from 'node:stream/promises';
+import type { Request, Response } from 'express';
+import multer, { MulterError, type StorageEngine } from 'multer';
+import pLimit from 'p-limit';
+import { z } from 'zod';
+import { idSchema } from '../../shared/contracts/common';
+import { MAX_UPLOAD_BYTES } from '../../shared/contracts/prints';
+import { AppError } from '../../shared/errors';
+import type { Incoming } from '../storage/incoming';
+
+export interface ReceivedUpload {
+  /** In this process's incoming folder; whoever uses it removes it. */
+  readonly path: string;
+  readonly fileName: string;
+  readonly bytes: number;
+  readonly sha256: string;
+  readonly id: string | undefined;
+  readonly pileId: string | null;
+}
+
+/** So many bodies are read at once; the rest wait unread, so that neither memory nor sockets' buffers grow. */
+const RECEIVING_AT_ONCE = 8;
+const MAX_WAITING = 400;
+/** A body that claims more than this is not even drained. */
+const MAX_DRAINED_BYTES = 4 * MAX_UPLOAD_BYTES;
+
+const fieldsSchema = z.strictObject({
+  id: idSchema.optional(),
+  pileId: z.union([idSchema, z.literal('').transform(() => null)]).optional(),
+});
+
+export type ReceiveUpload = (req: Request, res: Response) => Promise<ReceivedUpload>;
+
+/**
+ * Reads one multipart body with one file to disk, hashing it on the way.
+ *
+ * @throws AppError `too-large` · `invalid-input` · `picture-refused` (no file) · `unavailable` when too many wait.
+ */
+export function createReceiveUpload(incoming: Incoming): ReceiveUpload {
+  const limit = pLimit(RECEIVING_AT_ONCE);
+  const parse = multer({
+    storage: hashingStorage(incoming),
+    defParamCharset: 'utf8',
+    // One byte more than may be: a file of exactly the limit is let through, a longer one is seen to be longer.
+    limits: { fileSize: MAX_UPLOAD_BYTES + 1, files: 1, fields: 4, fieldSize: 200, fieldNameSize: 40, parts: 6, headerPairs: 40 },
+  }).single('file');
+
+  return async (req, res) => {
+    if (Number(req.headers['content-length'] ?? 0) > MAX_DRAINED_BYTES) {
+      res.set('Connection', 'close');
+      throw new AppError('too-large', { maxBytes: MAX_UPLOAD_BYTES });
+    }
+    if (limit.pendingCount >= MAX_WAITING) throw new AppError('unavailable', { reason: 'busy' });
+    await limit(() => new Promise<void>((resolve, reject) => parse(req, res, (error) => (error ? reject(explain(error)) : resolve()))));
+    return read(req);
+  };
+}
+
+async function read(req: Request): Promise<ReceivedUpload> {
+  const { file } = req;
+  if (!file) throw new AppError('picture-refused', { reason: 'no-file' });
+  const fields = fieldsSchema.safeParse({ ...(req.body as Record<string, unknown>) });
+  const isTooLarge = file.size > MAX_UPLOAD_BYTES;
+  if (isTooLarge || !fields.success) {
+    await rm(file.path, { force: true });
+    if (isTooLarge) throw new AppError('too-large', { maxBytes: MAX_UPLOAD_BYTES });
+    throw fields.error;
+  }
+  return {
+    path: file.path,
+    fileName: file.originalname,
+    bytes: file.size,
+    sha256: file.filename,
+    id: fields.data.id,
+    pileId: fields.data.pileId ?? null,
+  };
+}
+
+/** Disk storage that also hashes: `filename` is the SHA-256 in hex. A body that breaks off leaves nothing. */
+function hashingStorage(incoming: Incoming): StorageEngine {
+  return {
+    _handleFile(_req, file, done) {
+      const path = incoming.path();
+      const hash = createHash('sha256');
+      let size = 0;
+      const measure = new Transform({
+        transform(chunk: Buffer, _encoding, next) {
+          hash.update(chunk);
+          size += chunk.length;
+          next(null, chunk);
+        },
+      });
+      pipeline(file.stream, measure, createWriteStream(path, { flags: 'wx', mode: 0o600 })).then(
+        () => done(null, { path, size, filename: hash.digest('hex') }),
+        (error: unknown) => void rm(path, { force: true }).finally(() => done(error)),
+      );
+    },
+    _removeFile(_req, file, done) {
+      rm(file.path, { force: true }).then(() => done(null), done);
+    },
+  };
+}
+
+function explain(error: unknown): Error {
+  if (error instanceof MulterError) {
+    if (error.code === 'LIMIT_FILE_SIZE') return new AppError('too-large', { maxBytes: MAX_UPLOAD_BYTES });
+    return new AppError('invalid-input', { reason: error.code, field: error.field });
+  }
+  if (error instanceof Error && isDiskFull(error)) return new AppError('disk-full');
+  // What busboy says of a body that is no multipart form, or that breaks off.
+  if (error instanceof Error && /multipart|form|boundary|header|aborted|premature/i.test(error.message)) {
+    return new AppError('invalid-input', { reason: 'not-a-form' });
+  }
+  return error instanceof Error ? error : new Error(String(error));
+}
+
+const isDiskFull = (error: Error): boolean => 'code' in error && error.code === 'ENOSPC';
