@@ -1,0 +1,74 @@
+import type { MatId } from '../model/ids';
+import { inDrawingOrder } from '../model/patch';
+import type { Mat, PaneGroup, SpreadDocument } from '../model/spread';
+
+export const matOf = (doc: SpreadDocument, id: MatId): Mat | undefined => doc.mats.find((mat) => mat.id === id);
+
+export const groupOf = (doc: SpreadDocument, mat: Mat): PaneGroup | undefined => {
+  const { content } = mat;
+  return content.kind === 'pane' ? doc.panes.find((group) => group.id === content.groupId) : undefined;
+};
+
+/** The mats with these ids, in the document's order, or null where one of them does not exist or none is named. */
+export function matsOf(doc: SpreadDocument, ids: readonly MatId[]): Mat[] | null {
+  const wanted = new Set(ids);
+  const found = doc.mats.filter((mat) => wanted.has(mat.id));
+  return found.length === wanted.size && found.length > 0 ? found : null;
+}
+
+/** The document with each of the named mats replaced by what `change` makes of it. */
+export function changeMats(doc: SpreadDocument, ids: readonly MatId[], change: (mat: Mat) => Mat): SpreadDocument {
+  const wanted = new Set(ids);
+  return { ...doc, mats: doc.mats.map((mat) => (wanted.has(mat.id) ? change(mat) : mat)) };
+}
+
+export const withMats = (doc: SpreadDocument, mats: readonly Mat[]): SpreadDocument => ({
+  ...doc,
+  mats: [...mats].sort(inDrawingOrder),
+});
+
+export const withGroup = (doc: SpreadDocument, group: PaneGroup): SpreadDocument => ({
+  ...doc,
+  panes: [...doc.panes.filter((other) => other.id !== group.id), group].sort((a, b) => (a.id < b.id ? -1 : 1)),
+});
+
+/** As people read: by rows, then from left to right. */
+export const inReadingOrder = (a: Mat, b: Mat): number => a.y - b.y || a.x - b.x || (a.id < b.id ? -1 : 1);
+
+/**
+ * Drawing order for a new mat. One that is laid over goes on top of everything; any other goes under all
+ * that are laid over, and since those others never overlap, one z does for all of them.
+ */
+export function newZ(doc: SpreadDocument, laidOver: boolean): number {
+  if (laidOver) return Math.max(0, ...doc.mats.map((mat) => mat.z)) + 1;
+  return Math.min(0, ...doc.mats.filter((mat) => mat.laidOver).map((mat) => mat.z - 1));
+}
+
+interface Cells {
+  readonly x: number;
+  readonly y: number;
+  readonly w: number;
+  readonly h: number;
+}
+
+/** The smallest rectangle of cells round all of them. */
+export function cellBox(cells: readonly Cells[]): Cells {
+  const x = Math.min(...cells.map((c) => c.x));
+  const y = Math.min(...cells.map((c) => c.y));
+  return {
+    x,
+    y,
+    w: Math.max(...cells.map((c) => c.x + c.w)) - x,
+    h: Math.max(...cells.map((c) => c.y + c.h)) - y,
+  };
+}
+
+/** The cells mirrored within a box, left to right (`horizontal`) or top to bottom. */
+export function mirrored<T extends Cells>(cells: T, box: Cells, axis: 'horizontal' | 'vertical'): T {
+  return axis === 'horizontal'
+    ? { ...cells, x: 2 * box.x + box.w - cells.x - cells.w }
+    : { ...cells, y: 2 * box.y + box.h - cells.y - cells.h };
+}
+
+/** `value` kept between two limits; the lower one wins where they cross. */
+export const clamp = (value: number, least: number, most: number): number => Math.max(least, Math.min(value, most));
