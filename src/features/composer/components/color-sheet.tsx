@@ -1,0 +1,81 @@
+import { useState } from 'react';
+import { colorName } from '#shared/colour/name';
+import type { Hex } from '#shared/model/ids';
+import type { Print } from '#shared/model/print';
+import type { SpreadDocument } from '#shared/model/spread';
+
+interface ColorSheetProps {
+  readonly heading: string;
+  readonly value: Hex | null;
+  readonly groups: readonly { readonly name: string; readonly colors: readonly Hex[] }[];
+  readonly onChoose: (color: Hex) => void;
+}
+
+/** Any colour for a mat or a page: those at hand first, then a hex code or the system's picker. */
+export function ColorSheet({ heading, value, groups, onChoose }: ColorSheetProps) {
+  const [typed, setTyped] = useState(value ?? '');
+  const isHex = /^#[0-9a-f]{6}$/i.test(typed);
+  return (
+    <div className="color-sheet">
+      <h3>{heading}</h3>
+      {groups
+        .filter((group) => group.colors.length > 0)
+        .map((group) => (
+          <section key={group.name} aria-label={group.name}>
+            <h4>{group.name}</h4>
+            <ul>
+              {group.colors.map((color) => (
+                <li key={color}>
+                  <button
+                    type="button"
+                    className="swatch"
+                    style={{ background: color }}
+                    aria-label={colorName(color)}
+                    aria-pressed={color === value}
+                    title={colorName(color)}
+                    onClick={() => onChoose(color)}
+                  />
+                </li>
+              ))}
+            </ul>
+          </section>
+        ))}
+      <form
+        className="color-typed"
+        onSubmit={(event) => {
+          event.preventDefault();
+          if (isHex) onChoose(typed.toLowerCase());
+        }}
+      >
+        <input type="color" aria-label="Pick any colour" value={isHex ? typed.toLowerCase() : '#888888'} onChange={(event) => setTyped(event.target.value)} />
+        <input
+          type="text"
+          className="field-input num"
+          aria-label="Colour code"
+          aria-invalid={typed !== '' && !isHex}
+          value={typed}
+          maxLength={7}
+          spellCheck={false}
+          onChange={(event) => setTyped(event.target.value)}
+        />
+        <button type="submit" className="btn" disabled={!isHex} title={isHex ? undefined : 'A colour code is # and six digits, such as #1d4f5c'}>
+          Use
+        </button>
+      </form>
+      <p className="color-words">{isHex ? colorName(typed.toLowerCase()) : 'Type # and six digits, such as #1d4f5c.'}</p>
+    </div>
+  );
+}
+
+/** The colours at hand: the scheme's, those already on the spread, those of its prints. */
+export function colorGroups(doc: SpreadDocument, prints: ReadonlyMap<string, Print>): { name: string; colors: Hex[] }[] {
+  const unique = (colors: Hex[], max: number): Hex[] => [...new Set(colors)].slice(0, max);
+  const onSpread = [...doc.mats.flatMap((mat) => [mat.color, ...(mat.inner ? [mat.inner.color] : [])]), doc.pages.left?.color, doc.pages.right?.color];
+  const shown = new Set([...doc.mats.flatMap((mat) => (mat.content.kind === 'print' ? [mat.content.printId] : [])), ...doc.table]);
+  const fromPrints = [...shown].flatMap((id) => prints.get(id)?.palette ?? []).sort((a, b) => b.share - a.share);
+  return [
+    { name: 'Scheme', colors: doc.scheme ? unique(Object.values(doc.scheme.colors).map((color) => color.hex), 4) : [] },
+    { name: 'On this spread', colors: unique(onSpread.filter((color): color is Hex => color !== undefined), 12) },
+    { name: 'In the photos', colors: unique(fromPrints.map((swatch) => swatch.hex), 18) },
+  ];
+}

@@ -1,0 +1,100 @@
+import { DndContext } from '@dnd-kit/core';
+import { useEffect, useMemo, useState } from 'react';
+import type { Pile } from '#shared/contracts/prints';
+import type { PrintId } from '#shared/model/ids';
+import { pixelsPerInch } from '@/features/composer/canvas/page-scale';
+import { useComposer, useComposerStore } from '@/features/composer/hooks/composer-context';
+import { isPrintDrag } from '@/features/composer/hooks/drag-data';
+import { useComposeDrag } from '@/features/composer/hooks/use-compose-drag';
+import { useJudgement } from '@/features/composer/hooks/use-judgement';
+import { useViewport } from '@/features/composer/hooks/use-viewport';
+import { HeldPrint } from './held-print';
+import { NoteText } from './notes-margin';
+import { PileEdge } from './pile-edge';
+import { SchemeFan } from './scheme-fan';
+import { SpreadTable } from './spread-table';
+
+const COMPOSE_MIN_WIDTH = 1024;
+const WIDE = 1280;
+const MARGIN_WIDE = 192;
+const MARGIN_NARROW = 148;
+/** Top bar, beam and rulers above the pages; page actions and piles below. */
+const VERTICAL_SURROUND = 372;
+
+interface ComposeScreenProps {
+  readonly piles: readonly Pile[];
+  readonly mayEdit: boolean;
+  readonly sortHref: string;
+}
+
+/** Compose: pages, piles, schemes, notes. Under 1024 px the spread is shown read-only with its notes below. */
+export function ComposeScreen({ piles, mayEdit, sortHref }: ComposeScreenProps) {
+  const viewport = useViewport();
+  const doc = useComposer((state) => state.doc);
+  const prints = useComposer((state) => state.prints);
+  const unit = useComposer((state) => state.unit);
+  const judgement = useJudgement();
+  const [sources, setSources] = useState<readonly PrintId[] | null>(null);
+  const isSmall = viewport.width < COMPOSE_MIN_WIDTH;
+  const isEditable = mayEdit && !isSmall;
+  const margin = isSmall ? 0 : viewport.width < WIDE ? MARGIN_NARROW : MARGIN_WIDE;
+  const perInch = isSmall
+    ? Math.max(4, (viewport.width - 24) / ((2 * doc.format.width + doc.binding.gap) / 4064))
+    : pixelsPerInch(viewport, doc, { sides: 2 * margin, vertical: VERTICAL_SURROUND });
+  const { held, contextProps } = useComposeDrag(perInch);
+  useComposeKeys(isEditable);
+
+  const heldPrint = held && isPrintDrag(held.data) ? (prints.get(held.data.printId) ?? null) : null;
+  const marked = useMemo(() => new Set(sources ?? []), [sources]);
+  return (
+    <DndContext {...contextProps}>
+      <main className={`compose ${isSmall ? 'is-small' : ''}`}>
+        <SpreadTable judgement={isSmall ? { ...judgement, notes: [] } : judgement} held={held} perInch={perInch} margin={margin} isEditable={isEditable} sources={sources} />
+        {isSmall ? (
+          <section className="notes-below" aria-label="Notes">
+            <p>Composing needs a wider screen, from 1024 px. Here is the spread and what the notes say of it.</p>
+            <ol>
+              {judgement.notes.map((note) => (
+                <li key={note.key} className={`note is-${note.severity}`}>
+                  <NoteText note={note} unit={unit} />
+                </li>
+              ))}
+            </ol>
+          </section>
+        ) : (
+          <div className="table-edge">
+            <SchemeFan isEditable={isEditable} onSources={setSources} />
+            <PileEdge piles={piles} heldPrintId={held?.data.type === 'print' ? held.data.printId : null} isEditable={isEditable} sortHref={sortHref} marked={marked} />
+          </div>
+        )}
+      </main>
+      {isEditable && <HeldPrint print={heldPrint} perInch={perInch} />}
+    </DndContext>
+  );
+}
+
+/** Undo, redo, duplicate, delete and let go, from the keyboard, while no field has the focus. */
+function useComposeKeys(isEditable: boolean): void {
+  const store = useComposerStore();
+  useEffect(() => {
+    if (!isEditable) return undefined;
+    const handleKeyDown = (event: KeyboardEvent): void => {
+      const target = event.target as HTMLElement;
+      if (target.closest('input, textarea, select, [contenteditable], [role="dialog"]')) return;
+      const { undo, redo, run, select, selection } = store.getState();
+      const isCommand = event.ctrlKey || event.metaKey;
+      const key = event.key.toLowerCase();
+      if (isCommand && key === 'z') (event.shiftKey ? redo : undo)();
+      else if (isCommand && key === 'y') redo();
+      else if (isCommand && key === 'd' && selection.length === 1) run({ id: 'mats.duplicate', args: { matId: selection[0]! } });
+      else if ((key === 'delete' || key === 'backspace') && selection.length > 0) {
+        run({ id: 'mats.delete', args: { matIds: selection } });
+        select([]);
+      } else if (key === 'escape') select([]);
+      else return;
+      event.preventDefault();
+    };
+    window.addEventListener('keydown', handleKeyDown);
+    return () => window.removeEventListener('keydown', handleKeyDown);
+  }, [store, isEditable]);
+}

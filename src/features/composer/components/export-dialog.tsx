@@ -1,0 +1,90 @@
+import { useMutation, useQuery } from '@tanstack/react-query';
+import { useState } from 'react';
+import { EXPORT_FORMATS, EXPORT_SIZES, PRINT_PPI, SCREEN_EXPORT_WIDTH_PX, type CreateExport } from '#shared/contracts/exports';
+import { toInches } from '#shared/model/length';
+import type { SpreadDocument } from '#shared/model/spread';
+import { Button } from '@/components/button';
+import { Dialog } from '@/components/dialog';
+import { Notice } from '@/components/notice';
+import { ApiError } from '@/lib/api';
+import { newId } from '@/lib/ids';
+import { jobQuery, startExport } from '@/features/composer/api/spread-queries';
+import { useComposer, useComposerStore } from '@/features/composer/hooks/composer-context';
+
+type Size = CreateExport['size'];
+type Format = CreateExport['format'];
+
+const FORMAT_WORDS: Record<Format, string> = { png: 'PNG, exact', jpeg: 'JPEG, smaller file' };
+
+/** Pixel size of an export. */
+export function exportPixels(doc: SpreadDocument, size: Size): { width: number; height: number } {
+  const sides = (doc.pages.left ? 1 : 0) + (doc.pages.right ? 1 : 0);
+  const widthIn = toInches(doc.format.width * sides + (sides === 2 ? doc.binding.gap : 0));
+  const heightIn = toInches(doc.format.height);
+  const width = size === 'screen' ? SCREEN_EXPORT_WIDTH_PX : Math.round(widthIn * PRINT_PPI);
+  return { width, height: Math.round((width * heightIn) / widthIn) };
+}
+
+/** Takes the preview picture away: the server draws it from what is saved. */
+export function ExportDialog({ spreadId, onClose }: { spreadId: string; onClose: () => void }) {
+  const store = useComposerStore();
+  const doc = useComposer((state) => state.doc);
+  const [size, setSize] = useState<Size>('screen');
+  const [format, setFormat] = useState<Format>('png');
+  const start = useMutation({
+    mutationFn: async () => {
+      const revision = await store.getState().flush();
+      return startExport(spreadId, { id: newId(), size, format, revision });
+    },
+  });
+  const job = useQuery(jobQuery(start.data?.id ?? null)).data ?? start.data;
+  const isWorking = start.isPending || job?.state === 'waiting' || job?.state === 'running';
+  const choose = (change: () => void): void => {
+    change();
+    start.reset();
+  };
+  return (
+    <Dialog open onClose={onClose} title="Preview picture" description="The spread as it is planned, without grid, notes or marks.">
+      <div className="export-choice" role="group" aria-label="Size">
+        {EXPORT_SIZES.map((id) => {
+          const px = exportPixels(doc, id);
+          return (
+            <button key={id} type="button" className="opt" aria-pressed={size === id} onClick={() => choose(() => setSize(id))}>
+              {id === 'screen' ? 'To look at' : `To print, ${PRINT_PPI} ppi`}
+              <span className="num">
+                {px.width} × {px.height}
+              </span>
+            </button>
+          );
+        })}
+      </div>
+      <div className="export-choice" role="group" aria-label="Kind of file">
+        {EXPORT_FORMATS.map((id) => (
+          <button key={id} type="button" className="opt" aria-pressed={format === id} onClick={() => choose(() => setFormat(id))}>
+            {FORMAT_WORDS[id]}
+          </button>
+        ))}
+      </div>
+      <div className="export-act">
+        {job?.state === 'done' && job.resultUrl ? (
+          <a className="btn" data-variant="ink" href={job.resultUrl} download>
+            Download
+          </a>
+        ) : (
+          <Button variant="ink" working={isWorking} onClick={() => start.mutate()}>
+            {isWorking ? 'Drawing…' : 'Draw it'}
+          </Button>
+        )}
+        <p role="status">
+          {isWorking && `The server draws it: ${Math.round((job?.progress ?? 0) * 100)}%.`}
+          {job?.state === 'done' && 'Ready. It is kept for a day.'}
+        </p>
+      </div>
+      {(start.isError || job?.state === 'failed') && (
+        <Notice alert className="mt-4">
+          {job?.failure ?? (start.error instanceof ApiError ? start.error.detail : 'The picture could not be drawn. Your plan is safe; try again.')}
+        </Notice>
+      )}
+    </Dialog>
+  );
+}

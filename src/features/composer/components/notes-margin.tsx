@@ -1,0 +1,140 @@
+import { useLayoutEffect, useRef, useState } from 'react';
+import type { Note } from '#shared/checks/check';
+import type { Rect } from '#shared/model/rect';
+import { SEVERITY_WORDS, noteSentence, remedyLabel } from '#shared/words/en/notes';
+import type { Unit } from '#shared/words/measure';
+import { layOutNotes, leaderPath, type NotePlace } from '@/features/composer/canvas/note-layout';
+
+interface NotesMarginProps {
+  side: 'left' | 'right';
+  notes: readonly Note[];
+  unit: Unit;
+  width: number;
+  /** Left edge of the margin in px, from the same origin as the mats' rectangles. */
+  x: number;
+  bounds: { top: number; bottom: number };
+  rectOf: (matId: string) => Rect | undefined;
+  isEditable: boolean;
+  onRemedy: (note: Note) => void;
+  onMark: (matIds: readonly string[] | null) => void;
+}
+
+const ESTIMATED_HEIGHT = 96;
+
+/** One margin's notes in blue pencil, each beside its mat with a thin leader. */
+export function NotesMargin({ side, notes, unit, width, x, bounds, rectOf, isEditable, onRemedy, onMark }: NotesMarginProps) {
+  const [heights, setHeights] = useState<Readonly<Record<string, number>>>({});
+  const [hovered, setHovered] = useState<string | null>(null);
+  const [isUnfolded, setIsUnfolded] = useState(false);
+  const list = useRef<HTMLOListElement>(null);
+  useLayoutEffect(() => {
+    const measured: Record<string, number> = {};
+    for (const node of list.current?.children ?? []) measured[(node as HTMLElement).dataset.key ?? ''] = (node as HTMLElement).offsetHeight;
+    if (Object.entries(measured).some(([key, height]) => heights[key] !== height)) setHeights((old) => ({ ...old, ...measured }));
+  }, [notes, width, heights]);
+
+  const { placed, folded } = layOutNotes(notes, side, rectOf, (note) => heights[note.key] ?? ESTIMATED_HEIGHT, bounds);
+  const mark = (note: Note | null): void => {
+    setHovered(note?.key ?? null);
+    onMark(note?.matIds ?? null);
+  };
+  const lineStart = side === 'left' ? x + width : x - 4;
+  return (
+    <>
+      <svg className="leaders" aria-hidden="true">
+        {placed.map(({ note, ring, top }) => ring && <Leader key={note.key} note={note} ring={ring} from={{ x: lineStart, y: top + 9 }} isThick={hovered === note.key} />)}
+      </svg>
+      <ol ref={list} className="notes" aria-label={`Notes on the ${side} page`}>
+        {placed.map((place) => (
+          <NoteItem key={place.note.key} place={place} x={x} width={width} unit={unit} isEditable={isEditable} onRemedy={onRemedy} onHover={mark} />
+        ))}
+      </ol>
+      {folded.length > 0 && (
+        <div className="folded-notes" style={{ left: x, top: bounds.bottom + 4, width }}>
+          <button type="button" className="link-button" aria-expanded={isUnfolded} onClick={() => setIsUnfolded(!isUnfolded)}>
+            {folded.length} more
+          </button>
+          {isUnfolded && (
+            <ul className="folded-list">
+              {folded.map((note) => (
+                <li key={note.key}>
+                  <b>{SEVERITY_WORDS[note.severity]}.</b> {noteSentence(note, unit)}
+                </li>
+              ))}
+            </ul>
+          )}
+        </div>
+      )}
+    </>
+  );
+}
+
+function Leader({ note, ring, from, isThick }: { note: Note; ring: { x: number; y: number }; from: { x: number; y: number }; isThick: boolean }) {
+  const kind = note.severity === 'stop' ? 'is-stop' : '';
+  return (
+    <g className={`${kind} ${isThick ? 'is-thick' : ''}`}>
+      <path d={leaderPath(from, ring)} />
+      <circle cx={ring.x} cy={ring.y} r="3" />
+    </g>
+  );
+}
+
+interface NoteItemProps {
+  place: NotePlace;
+  x: number;
+  width: number;
+  unit: Unit;
+  isEditable: boolean;
+  onRemedy: (note: Note) => void;
+  onHover: (note: Note | null) => void;
+}
+
+function NoteItem({ place: { note, top }, x, width, unit, isEditable, onRemedy, onHover }: NoteItemProps) {
+  return (
+    <li
+      data-key={note.key}
+      className={`note is-${note.severity}`}
+      style={{ left: x, top, width }}
+      onPointerEnter={() => onHover(note)}
+      onPointerLeave={() => onHover(null)}
+      onFocus={() => onHover(note)}
+      onBlur={() => onHover(null)}
+    >
+      <NoteText note={note} unit={unit} />
+      {note.remedy && isEditable && (
+        <button type="button" className="remedy" onClick={() => onRemedy(note)}>
+          {remedyLabel(note.remedy, unit)}
+        </button>
+      )}
+    </li>
+  );
+}
+
+/** Mark, severity and sentence of one note. */
+export function NoteText({ note, unit }: { note: Note; unit: Unit }) {
+  return (
+    <>
+      <h3 className="note-severity">
+        <SeverityMark severity={note.severity} />
+        {SEVERITY_WORDS[note.severity]}
+      </h3>
+      <p>{noteSentence(note, unit)}</p>
+    </>
+  );
+}
+
+function SeverityMark({ severity }: { severity: Note['severity'] }) {
+  if (severity === 'stop') {
+    return (
+      <svg viewBox="0 0 13 13" width="13" height="13" aria-hidden="true">
+        <path className="mark-square" d="M.5.5h12v12H.5z" />
+        <path className="mark-bar" d="M3 6.500h7" />
+      </svg>
+    );
+  }
+  return (
+    <svg viewBox="0 0 13 13" width="13" height="13" aria-hidden="true" className="mark-line">
+      {severity === 'fix' ? <path d="M1 12 6.500 1.500 12 12" /> : <circle cx="6.500" cy="6.500" r="5" />}
+    </svg>
+  );
+}

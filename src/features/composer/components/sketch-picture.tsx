@@ -1,0 +1,25 @@
+import { memo } from 'react';
+import type { SketchMat } from '#shared/commands/calls';
+import { cellRect, gridOf, matRect } from '#shared/geometry/grid';
+import type { PageFormat } from '#shared/model/page-format';
+
+interface SketchPictureProps {
+  readonly format: PageFormat;
+  readonly mats: readonly SketchMat[];
+}
+
+/** A sketch as a small diagram: mats dark, the biggest darkest, panes lighter, on a bare page. */
+export const SketchPicture = memo(function SketchPicture({ format, mats }: SketchPictureProps) {
+  const grid = gridOf(format);
+  const whole = cellRect(format, { x: 0, y: 0, w: grid.columns, h: grid.rows });
+  return (
+    <svg viewBox={`0 0 ${format.width} ${format.height}`} aria-hidden="true">
+      {mats.length === 0 && <rect {...whole} fill="none" className="stroke-nonphoto" strokeWidth={format.gap} />}
+      {mats.map((mat, i) => {
+        const rect = matRect(format, { ...mat, trueSize: null });
+        const kind = mat.paneGroup !== undefined ? 'is-pane' : mat.focal ? 'is-focal' : '';
+        return <rect key={i} {...rect} className={`sketch-mat ${kind}`} />;
+      })}
+    </svg>
+  );
+});

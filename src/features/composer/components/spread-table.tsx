@@ -1,0 +1,205 @@
+import { memo, useCallback, useMemo, useState, type MouseEvent } from 'react';
+import type { Note } from '#shared/checks/check';
+import { BALANCE_LIMIT } from '#shared/checks/pages-unequal';
+import { matRect } from '#shared/geometry/grid';
+import type { MatId, PrintId, Side } from '#shared/model/ids';
+import { SIDES } from '#shared/model/ids';
+import type { Rect } from '#shared/model/rect';
+import type { Mat, SpreadDocument } from '#shared/model/spread';
+import type { Print } from '#shared/model/print';
+import { buildScene } from '#shared/scene/build-scene';
+import { formatSize, type Unit } from '#shared/words/measure';
+import { SceneDrawing } from '@/components/scene/scene-drawing';
+import { cellsAt, inReadingOrder, matLabels, pageLeft, toScreen } from '@/features/composer/canvas/page-scale';
+import { useComposer, useComposerStore } from '@/features/composer/hooks/composer-context';
+import { isPrintDrag } from '@/features/composer/hooks/drag-data';
+import type { Held } from '@/features/composer/hooks/use-compose-drag';
+import type { Judgement } from '@/features/composer/hooks/use-judgement';
+import { BalanceBeam } from './balance-beam';
+import { MatActions } from './mat-actions';
+import { MatControl } from './mat-control';
+import { NotesMargin } from './notes-margin';
+import { PageActions } from './page-actions';
+import { PageGrid } from './page-grid';
+import { PageRuler } from './page-ruler';
+import { SelectedMat } from './selected-mat';
+
+interface SpreadTableProps {
+  readonly judgement: Judgement;
+  readonly held: Held | null;
+  readonly perInch: number;
+  /** Width of a notes margin in px. */
+  readonly margin: number;
+  readonly isEditable: boolean;
+  /** Prints whose mats are outlined, because a scheme's colour comes from them. */
+  readonly sources: readonly PrintId[] | null;
+}
+
+const NOTE_GUTTER = 20;
+
+/** The two facing pages on the neutral table, with everything that hangs on them. */
+export function SpreadTable({ judgement, held, perInch, margin, isEditable, sources }: SpreadTableProps) {
+  const store = useComposerStore();
+  const doc = useComposer((state) => state.doc);
+  const prints = useComposer((state) => state.prints);
+  const unit = useComposer((state) => state.unit);
+  const trim = useComposer((state) => state.trim);
+  const selection = useComposer((state) => state.selection);
+  const [marked, setMarked] = useState<readonly string[] | null>(null);
+
+  const scene = useMemo(() => buildScene(doc, prints), [doc, prints]);
+  const scale = perInch / 4064;
+  const size = { width: scene.width * scale, height: scene.height * scale };
+  const labels = useMemo(() => matLabels(doc.mats), [doc.mats]);
+  const rects = useMemo(
+    () => new Map(doc.mats.map((mat) => [mat.id, toScreen(matRect(doc.format, mat), pageLeft(doc, mat.page), perInch)])),
+    [doc, perInch],
+  );
+  const rectOf = useCallback((id: string) => rects.get(id), [rects]);
+  const select = useCallback(
+    (matId: MatId, adds: boolean) => {
+      const { selection: old, select: set } = store.getState();
+      set(adds ? (old.includes(matId) ? old.filter((id) => id !== matId) : [...old, matId]) : [matId]);
+    },
+    [store],
+  );
+  const applyRemedy = useCallback((note: Note) => note.remedy && store.getState().run(note.remedy.call), [store]);
+  const selected = doc.mats.filter((mat) => selection.includes(mat.id));
+  const isHoldingPrint = held !== null && isPrintDrag(held.data);
+  const bounds = { top: 0, bottom: size.height - 18 };
+  const notesFor = (side: Side): Note[] => judgement.notes.filter((note) => note.page === side);
+
+  return (
+    <div className="spread-table" style={{ width: size.width + 2 * margin, paddingInline: margin }}>
+      <div className="table-head">
+        <BalanceBeam left={judgement.left} right={judgement.right} limit={BALANCE_LIMIT} />
+        {SIDES.map((side) => doc.pages[side] && <PageRuler key={side} format={doc.format} left={margin + pageLeft(doc, side) * scale} perInch={perInch} />)}
+      </div>
+      <div className="spread" style={size} onDoubleClick={(event) => isEditable && addMatAt(event, store.getState(), perInch)} onPointerDown={(event) => event.target === event.currentTarget && store.getState().select([])}>
+        <SceneDrawing scene={scene} pictureSize="medium" underlay={<Grids doc={doc} />} />
+        <i className="gutter" style={{ left: doc.format.width * scale }} aria-hidden="true" />
+        {inReadingOrder(doc.mats).map((mat) => (
+          <MatControl
+            key={mat.id}
+            matId={mat.id}
+            rect={rects.get(mat.id)!}
+            z={mat.z}
+            label={describeMat(mat, labels.get(mat.id)!, doc, prints, unit)}
+            printId={carriedPrint(mat, doc)}
+            isSelected={selection.includes(mat.id)}
+            isEditable={isEditable}
+            drop={held?.overMatId === mat.id ? (isCut(judgement, mat.id) ? 'cuts' : 'fits') : null}
+            isMarked={(marked?.includes(mat.id) ?? false) || (sources?.includes(carriedPrint(mat, doc) ?? '') ?? false)}
+            onSelect={select}
+          />
+        ))}
+        {isEditable && selected.length === 1 && !isHoldingPrint && (
+          <SelectedMat
+            doc={doc}
+            mat={selected[0]!}
+            matRect={rects.get(selected[0]!.id)!}
+            label={labels.get(selected[0]!.id)!}
+            photo={judgement.view.photosByMat.get(selected[0]!.id)}
+            print={prints.get(judgement.view.photosByMat.get(selected[0]!.id)?.printId ?? '')}
+            trim={trim}
+            unit={unit}
+            perInch={perInch}
+            isSliding={held?.data.type === 'window'}
+          />
+        )}
+        {isEditable && selected.length > 0 && !held && (
+          <div className="mat-actions-place" style={actionsPlace(selected.flatMap((mat) => rects.get(mat.id) ?? []), size)}>
+            <MatActions mats={selected} unit={unit} onDone={() => store.getState().select([])} />
+          </div>
+        )}
+        {held?.overMatId && isHoldingPrint && <DropTag judgement={judgement} matId={held.overMatId} rect={rects.get(held.overMatId)} unit={unit} />}
+        {SIDES.map((side) => (
+          <NotesMargin
+            key={side}
+            side={side}
+            notes={notesFor(side)}
+            unit={unit}
+            width={margin - 36}
+            x={side === 'left' ? 16 - margin : size.width + NOTE_GUTTER}
+            bounds={bounds}
+            rectOf={rectOf}
+            isEditable={isEditable}
+            onRemedy={applyRemedy}
+            onMark={setMarked}
+          />
+        ))}
+      </div>
+      {isEditable && (
+        <div className="table-foot">
+          {SIDES.map((side) => (
+            <PageActions key={side} side={side} />
+          ))}
+        </div>
+      )}
+    </div>
+  );
+}
+
+const Grids = memo(function Grids({ doc }: { doc: SpreadDocument }) {
+  return SIDES.map((side) => doc.pages[side] && <PageGrid key={side} format={doc.format} x={pageLeft(doc, side)} />);
+});
+
+/** The print that dragging a mat's picture picks up: its own, or its pane group's. */
+function carriedPrint(mat: Mat, doc: SpreadDocument): PrintId | null {
+  if (mat.content.kind === 'print') return mat.content.printId;
+  if (mat.content.kind !== 'pane') return null;
+  const { groupId } = mat.content;
+  return doc.panes.find((group) => group.id === groupId)?.content?.printId ?? null;
+}
+
+function describeMat(mat: Mat, label: string, doc: SpreadDocument, prints: ReadonlyMap<PrintId, Print>, unit: Unit): string {
+  const size = formatSize(matRect(doc.format, mat), unit);
+  const printId = carriedPrint(mat, doc);
+  const carried = printId
+    ? `${prints.get(printId)?.title ?? 'a print'}${mat.content.kind === 'pane' ? ', a pane' : ''}`
+    : { bare: 'bare', paper: 'patterned paper', lettering: 'title', journaling: 'journaling', embellishment: 'embellishment', keepsake: 'keepsake', print: '', pane: 'empty pane' }[mat.content.kind];
+  return `Mat ${label}, ${size}, ${carried}${mat.focal ? ', focal' : ''}`;
+}
+
+/** True where a stop note speaks of this mat. */
+const isCut = (judgement: Judgement, matId: MatId): boolean =>
+  judgement.notes.some((note) => note.severity === 'stop' && note.matIds.includes(matId));
+
+/** Just under the selection, or over it where it stands at the foot of the page. */
+function actionsPlace(rects: readonly Rect[], size: { width: number; height: number }): { left: number; top: number } {
+  const left = Math.min(...rects.map((r) => r.x));
+  const top = Math.min(...rects.map((r) => r.y));
+  const foot = Math.max(...rects.map((r) => r.y + r.height));
+  const below = foot + 10;
+  return { left: Math.max(0, Math.min(left, size.width - 420)), top: below + 34 <= size.height + 4 ? below : Math.max(4, top - 66) };
+}
+
+/** What dropping here would do to the print in the hand. */
+function DropTag({ judgement, matId, rect, unit }: { judgement: Judgement; matId: MatId; rect: Rect | undefined; unit: Unit }) {
+  const photo = judgement.view.photosByMat.get(matId);
+  if (!photo || !rect) return null;
+  const cuts = isCut(judgement, matId);
+  const hasKeepZone = Boolean(judgement.view.prints.get(photo.printId)?.keepZone);
+  const words = cuts ? 'Would cut the keep zone' : photo.placement.mode === 'whole' ? 'Whole' : hasKeepZone ? 'Keep zone fits' : 'Photo';
+  return (
+    <span className="tag drop-tag" data-tone={cuts ? 'stop' : 'pencil'} style={{ left: rect.x, top: rect.y - 20 }}>
+      {words} <span className="num">{formatSize(photo.rect, unit)}</span>
+    </span>
+  );
+}
+
+type StoreState = ReturnType<ReturnType<typeof useComposerStore>['getState']>;
+
+/** A double press on the bare page adds a mat of four steps there, where there is room. */
+function addMatAt(event: MouseEvent<HTMLDivElement>, state: StoreState, perInch: number): void {
+  if ((event.target as HTMLElement).closest('button')) return;
+  const box = event.currentTarget.getBoundingClientRect();
+  const { doc } = state;
+  const x = event.clientX - box.left;
+  const side: Side = x < (doc.format.width + doc.binding.gap / 2) * (perInch / 4064) ? 'left' : 'right';
+  if (!doc.pages[side]) return;
+  const cell = cellsAt(doc.format, x - pageLeft(doc, side) * (perInch / 4064), event.clientY - box.top, perInch);
+  for (const steps of [4, 3, 2]) {
+    if (state.run({ id: 'mats.add', args: { page: side, ...cell, w: steps, h: steps, color: doc.scheme?.colors.main.hex } })) return;
+  }
+}

@@ -1,0 +1,200 @@
+import {
+  closestCenter,
+  KeyboardSensor,
+  PointerSensor,
+  pointerWithin,
+  useSensor,
+  useSensors,
+  type Announcements,
+  type CollisionDetection,
+  type DragEndEvent,
+  type DragMoveEvent,
+  type DragOverEvent,
+  type DragStartEvent,
+} from '@dnd-kit/core';
+import { useMemo, useRef, useState } from 'react';
+import type { CommandCall } from '#shared/commands/calls';
+import { placedPhotos, type PlacedPhoto } from '#shared/geometry/placed-photos';
+import { UNITS_PER_INCH } from '#shared/model/length';
+import type { Mat } from '#shared/model/spread';
+import { compose as words } from '#shared/words/en/compose';
+import { matLabels, stepPx } from '@/features/composer/canvas/page-scale';
+import type { Gesture } from '@/features/composer/model/composer-store';
+import { useComposerStore } from './composer-context';
+import { isPrintDrag, type DragData, type DropData } from './drag-data';
+import { keyboardCoordinates } from './drag-keyboard';
+import { moveCall, resizeCall, slideCall } from './drag-steps';
+
+/** What is in the hand, for the overlay and for the marks on its target. */
+export interface Held {
+  readonly data: DragData;
+  readonly overMatId: string | null;
+}
+
+interface Start {
+  readonly gesture: Gesture;
+  readonly mat: Mat | undefined;
+  readonly photo: PlacedPhoto | undefined;
+}
+
+/** The pointer's topmost target; the nearest one when the hand is a keyboard. */
+const collisionDetection: CollisionDetection = (args) => {
+  if (!isPrintDrag(args.active.data.current as DragData | undefined)) return [];
+  if (!args.pointerCoordinates) return closestCenter(args);
+  const zOf = (hit: (typeof hits)[number]): number => {
+    const data = hit.data?.droppableContainer.data.current as DropData | undefined;
+    return data?.type === 'mat' ? data.z : -Infinity;
+  };
+  const hits = pointerWithin(args);
+  return hits.sort((a, b) => zOf(b) - zOf(a));
+};
+
+/**
+ * Everything that dragging in Compose does. A drag is one gesture: each move previews the document from
+ * where it began, the drop is one undo step, Escape puts everything back.
+ */
+export function useComposeDrag(perInch: number) {
+  const store = useComposerStore();
+  const start = useRef<Start | null>(null);
+  const [held, setHeld] = useState<Held | null>(null);
+  const perInchRef = useRef(perInch);
+  perInchRef.current = perInch;
+
+  const strides = useMemo(
+    () => () => {
+      const { doc, trim } = store.getState();
+      return {
+        stepPx: stepPx(doc.format, perInchRef.current),
+        markPx: (trim.finestMark * perInchRef.current) / UNITS_PER_INCH,
+      };
+    },
+    [store],
+  );
+  const sensors = useSensors(
+    useSensor(PointerSensor, { activationConstraint: { distance: 5 } }),
+    useSensor(KeyboardSensor, {
+      coordinateGetter: useMemo(() => keyboardCoordinates(strides), [strides]),
+      keyboardCodes: { start: ['Space'], cancel: ['Escape'], end: ['Space', 'Enter'] },
+    }),
+  );
+
+  const handleDragStart = ({ active }: DragStartEvent) => {
+    const data = active.data.current as DragData;
+    const state = store.getState();
+    const matId = 'matId' in data ? data.matId : undefined;
+    const mat = state.doc.mats.find((m) => m.id === matId);
+    const photo = placedPhotos(state.doc, (id) => state.prints.get(id)).find((p) => p.matId === matId);
+    start.current = { gesture: state.beginGesture(), mat, photo };
+    setHeld({ data, overMatId: null });
+  };
+
+  const handleDragMove = ({ active, delta }: DragMoveEvent) => {
+    const data = active.data.current as DragData;
+    const begun = start.current;
+    if (!begun || isPrintDrag(data)) return;
+    const call = callOf(data, begun, delta, perInchRef.current, store.getState().doc);
+    if (call) begun.gesture.preview(call);
+  };
+
+  const handleDragOver = ({ active, over }: DragOverEvent) => {
+    const data = active.data.current as DragData;
+    if (!isPrintDrag(data)) return;
+    const drop = over?.data.current as DropData | undefined;
+    const calls = dropCalls(data, drop);
+    start.current?.gesture.preview(calls);
+    setHeld({ data, overMatId: drop?.type === 'mat' ? drop.matId : null });
+  };
+
+  const handleDragEnd = ({ active, over, delta }: DragEndEvent) => {
+    const data = active.data.current as DragData;
+    const begun = start.current;
+    if (begun) {
+      const drop = over?.data.current as DropData | undefined;
+      if (isPrintDrag(data)) begun.gesture.preview(dropCalls(data, drop));
+      else {
+        const call = callOf(data, begun, delta, perInchRef.current, store.getState().doc);
+        if (call) begun.gesture.preview(call);
+      }
+      begun.gesture.commit();
+      if (isPrintDrag(data) && drop?.type === 'mat') store.getState().select([drop.matId]);
+    }
+    start.current = null;
+    setHeld(null);
+  };
+
+  const handleDragCancel = () => {
+    start.current?.gesture.cancel();
+    start.current = null;
+    setHeld(null);
+  };
+
+  const announcements = useMemo((): Announcements => {
+    const nameOf = (data: DragData): string => {
+      const { prints, doc } = store.getState();
+      if (isPrintDrag(data)) return prints.get(data.printId)?.title ?? words.aPrint;
+      return words.mat(matLabels(doc.mats).get(data.matId) ?? '');
+    };
+    const placeOf = (drop: DropData | undefined): string => {
+      if (!drop) return words.nothing;
+      return drop.type === 'table' ? words.theTable : words.mat(matLabels(store.getState().doc.mats).get(drop.matId) ?? '');
+    };
+    const matNow = (matId: string): string => {
+      const mat = store.getState().doc.mats.find((m) => m.id === matId);
+      return mat ? words.cells(mat) : '';
+    };
+    return {
+      onDragStart: ({ active }) => words.pickedUp(nameOf(active.data.current as DragData)),
+      onDragOver: ({ active, over }) => {
+        const data = active.data.current as DragData;
+        return isPrintDrag(data) ? words.over(placeOf(over?.data.current as DropData | undefined)) : undefined;
+      },
+      onDragMove: ({ active }) => {
+        const data = active.data.current as DragData;
+        return data.type === 'mat' || data.type === 'resize' ? matNow(data.matId) : undefined;
+      },
+      onDragEnd: ({ active, over }) => {
+        const data = active.data.current as DragData;
+        return isPrintDrag(data)
+          ? words.placed(nameOf(data), placeOf(over?.data.current as DropData | undefined))
+          : words.putDown(nameOf(data));
+      },
+      onDragCancel: ({ active }) => words.putBack(nameOf(active.data.current as DragData)),
+    };
+  }, [store]);
+
+  return {
+    held,
+    contextProps: {
+      sensors,
+      collisionDetection,
+      accessibility: { announcements, screenReaderInstructions: { draggable: words.dragHelp } },
+      onDragStart: handleDragStart,
+      onDragMove: handleDragMove,
+      onDragOver: handleDragOver,
+      onDragEnd: handleDragEnd,
+      onDragCancel: handleDragCancel,
+    },
+  };
+}
+
+function callOf(data: DragData, begun: Start, delta: { x: number; y: number }, perInch: number, doc: Parameters<typeof moveCall>[0]): CommandCall | null {
+  switch (data.type) {
+    case 'mat':
+      return begun.mat ? moveCall(doc, begun.mat, delta, perInch) : null;
+    case 'resize':
+      return begun.mat ? resizeCall(doc, begun.mat, data.edge, delta, perInch) : null;
+    case 'window':
+      return begun.photo ? slideCall(begun.photo, delta, perInch) : null;
+    default:
+      return null;
+  }
+}
+
+function dropCalls(data: Extract<DragData, { printId: string }>, drop: DropData | undefined): CommandCall[] {
+  if (!drop) return [];
+  if (data.type === 'print') {
+    return drop.type === 'mat' ? [{ id: 'prints.place', args: { printId: data.printId, matId: drop.matId } }] : [];
+  }
+  if (drop.type === 'table') return [{ id: 'prints.lift', args: { matIds: [data.matId] } }];
+  return drop.matId === data.matId ? [] : [{ id: 'prints.move', args: { fromMatId: data.matId, toMatId: drop.matId } }];
+}

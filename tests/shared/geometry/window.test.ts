@@ -1,0 +1,44 @@
+import fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+import { centreWindow, placedPaper, slideWindow, windowOnPaper } from '#shared/geometry/window';
+import { inches } from '#shared/model/length';
+
+const paper = { width: inches(6), height: inches(4) };
+const window = { width: inches(3, 5 / 8), height: inches(2, 5 / 8) };
+const mark = inches(1 / 16);
+
+describe('a window', () => {
+  it('never zooms: it has the photo’s size, exchanged for an odd turn', () => {
+    expect(windowOnPaper({ x: 5, y: 7, turn: 0 }, window)).toEqual({ x: 5, y: 7, ...window });
+    expect(windowOnPaper({ x: 5, y: 7, turn: 3 }, window)).toEqual({ x: 5, y: 7, width: window.height, height: window.width });
+  });
+
+  it('sits on the trimmer’s finest mark and stays on the paper', () => {
+    fc.assert(
+      fc.property(fc.integer({ min: -50_000, max: 50_000 }), fc.integer({ min: -50_000, max: 50_000 }), (x, y) => {
+        const at = slideWindow(x, y, window, paper, mark);
+        expect(at.x % mark).toBe(0);
+        expect(at.y % mark).toBe(0);
+        expect(at.x).toBeGreaterThanOrEqual(0);
+        expect(at.x + window.width).toBeLessThanOrEqual(paper.width);
+        expect(at.y + window.height).toBeLessThanOrEqual(paper.height);
+      }),
+    );
+  });
+
+  it('is centred where the paper is too small, so that what is missing shows on both sides', () => {
+    const at = slideWindow(0, 0, { width: inches(7), height: inches(3) }, paper, mark);
+    expect(at).toEqual({ x: -inches(1 / 2), y: 0 });
+  });
+
+  it('centres on a keep zone, as far as the paper goes', () => {
+    const zone = { x: inches(5), y: inches(1), width: inches(1), height: inches(1) };
+    expect(centreWindow(window, paper, mark, zone)).toEqual({ x: inches(2, 3 / 8), y: inches(3 / 16) });
+  });
+});
+
+describe('a digital photo', () => {
+  it('is scaled in proportion', () => {
+    expect(placedPaper({ paperWidth: inches(6), paperHeight: inches(4) }, { scaledWidth: inches(3) })).toEqual({ width: inches(3), height: inches(2) });
+  });
+});
