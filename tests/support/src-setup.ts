@@ -21,13 +21,6 @@ afterEach(() => {
   }
 });
 
-/** For a test that is about such a complaint: takes what was said so far, so that it does not fail the test. */
-export function takeComplaints(): string[] {
-  const taken = complaints;
-  complaints = [];
-  return taken;
-}
-
 // jsdom has no layout: what components ask of it gets the answer of an empty page.
 class SilentObserver {
   observe(): void {}

@@ -1,7 +1,7 @@
-import { spawn } from 'node:child_process';
 import { existsSync, renameSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
 import { findMariadbInstallDb } from '../find-program.mjs';
+import { runQuietly } from '../run-quietly';
 import { SetupFailure, tailOf } from '../setup-failure';
 import type { RunAs } from './run-as';
 
@@ -27,7 +27,7 @@ export async function initialise(folder: string, runAs: RunAs): Promise<void> {
     REDO_LOG_OPTION,
     ...(runAs.isRoot ? ['--user=root'] : []),
   ];
-  const { code, output } = await run(program, args, folder, runAs);
+  const { code, output } = await runQuietly(program, args, { cwd: folder, ...accountOf(runAs) });
   if (code !== 0) {
     throw new SetupFailure(
       'Making the database failed.',
@@ -43,18 +43,6 @@ export const missingProgram = (name: string): SetupFailure =>
     `MariaDB's ${name} is not on this machine.`,
     'Start with "npm start", which installs it, or set DATABASE_URL to the address of a MariaDB server that you run.',
   );
-
-function run(program: string, args: string[], cwd: string, runAs: RunAs): Promise<{ code: number; output: string }> {
-  return new Promise((resolve) => {
-    let output = '';
-    const child = spawn(program, args, { cwd, stdio: ['ignore', 'pipe', 'pipe'], ...accountOf(runAs) });
-    const collect = (chunk: Buffer): void => void (output += chunk.toString());
-    child.stdout.on('data', collect);
-    child.stderr.on('data', collect);
-    child.on('error', (error) => resolve({ code: 1, output: output + error.message }));
-    child.on('close', (code) => resolve({ code: code ?? 1, output }));
-  });
-}
 
 export const accountOf = ({ uid, gid }: RunAs): { uid?: number; gid?: number } =>
   uid === null || gid === null ? {} : { uid, gid };
