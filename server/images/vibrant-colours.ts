@@ -1,6 +1,8 @@
 import { Vibrant } from 'node-vibrant/node';
-import type { Swatch } from '../../shared/model/print';
+import { rgbToHex } from '../../shared/colour/convert';
 import type { SwatchCandidate } from '../../shared/colour/swatches';
+import type { Hex } from '../../shared/model/ids';
+import type { Swatch } from '../../shared/model/print';
 import type { RawPicture } from './raw-picture';
 
 const ROLES = {
@@ -15,15 +17,28 @@ const ROLES = {
 type ImageClass = Parameters<ReturnType<typeof Vibrant.from>['useImageClass']>[0];
 
 /**
- * node-vibrant's colours of a small picture, as candidates: where no pixel has a role's colour the library makes one up,
- * with population 0, and those are left out.
+ * node-vibrant's colours of a small picture, as candidates. Where no pixel has a role's colour the library makes one up,
+ * with population 0: those are left out. It answers the middles of boxes in a coarse cube, so each is moved to the
+ * nearest colour that a pixel truly has.
  */
 export async function vibrantColours(picture: RawPicture): Promise<SwatchCandidate[]> {
   const palette = await Vibrant.from(withAlpha(picture)).useImageClass(rawImageClass(picture)).quality(1).getPalette();
   return Object.entries(ROLES).flatMap(([name, role]) => {
     const swatch = palette[name];
-    return swatch && swatch.population > 0 ? [{ hex: swatch.hex.toLowerCase(), role }] : [];
+    return swatch && swatch.population > 0 ? [{ hex: nearestPixel(picture, swatch.rgb), role }] : [];
   });
+}
+
+function nearestPixel({ data }: RawPicture, [r, g, b]: readonly [number, number, number]): Hex {
+  let nearest = 0;
+  let least = Infinity;
+  for (let at = 0; at < data.length; at += 3) {
+    const distance = (data[at]! - r) ** 2 + (data[at + 1]! - g) ** 2 + (data[at + 2]! - b) ** 2;
+    if (distance >= least) continue;
+    least = distance;
+    nearest = at;
+  }
+  return rgbToHex(data[nearest]!, data[nearest + 1]!, data[nearest + 2]!);
 }
 
 /** The library's reader for pixels that sharp decoded, in place of its own decoder. The size is right already. */
