@@ -1,0 +1,155 @@
+import { cellRect, contentRect, matRect, revealOf } from '../geometry/grid';
+import { placedPhotos, type PlacedPhoto } from '../geometry/placed-photos';
+import { area, bottom, boundingBox, contains, inset, overlaps, right } from '../geometry/rects';
+import type { Hex, MatId, PrintId, Side } from '../model/ids';
+import { inches } from '../model/length';
+import type { Print } from '../model/print';
+import type { Rect } from '../model/rect';
+import type { Mat, Scheme, SchemeRole, SpreadDocument } from '../model/spread';
+import { MIN_REVEAL } from '../model/trim-settings';
+import { ciede2000 } from './ciede2000';
+import { contrastRatio } from './contrast';
+import { hexToLab } from './convert';
+import { RIM_DELTA_E, rimContrast, standsOut } from './rim';
+
+const ROLES: readonly SchemeRole[] = ['base', 'main', 'second', 'accent'];
+/** WCAG 2.2, 1.4.3: text against its ground. */
+const TEXT_CONTRAST = 4.5;
+/** No inner mat is put round a photo that would be left narrower than this. */
+const MIN_PHOTO = inches(1);
+
+/** How a colour suits a unit. */
+export interface Suitability {
+  /** All that the mats carry keeps its distance from the colour. */
+  readonly fits: boolean;
+  /** The least difference, CIEDE2000; 100 where nothing is carried. */
+  readonly distance: number;
+}
+
+/** Mats that take one colour together: a single mat, or all panes of a split print. */
+export interface CardUnit {
+  readonly mats: readonly Mat[];
+  readonly page: Side;
+  readonly box: Rect;
+  readonly area: number;
+  readonly isFocal: boolean;
+  readonly kind: Mat['content']['kind'];
+  /** How a colour suits it as card. */
+  readonly card: Readonly<Record<SchemeRole, Suitability>>;
+  /** How a colour would suit it as a thin inner mat. */
+  readonly inner: Readonly<Record<SchemeRole, Suitability>>;
+  /** A person's own inner mat is too close to what it surrounds. */
+  readonly ownInnerHides: boolean;
+  /** A thin inner mat would show all round and leave enough of each photo. */
+  readonly mayTakeInner: boolean;
+  /** Units that touch it on the same page, as positions in the list. */
+  readonly neighbours: readonly number[];
+}
+
+/** The inner mats that a person chose; one that the document's scheme put there is decided anew with each scheme. */
+export function ownInner(doc: Pick<SpreadDocument, 'scheme'>, mat: Pick<Mat, 'inner'>): Mat['inner'] {
+  if (!mat.inner || !doc.scheme || mat.inner.reveal !== MIN_REVEAL) return mat.inner;
+  const { color } = mat.inner;
+  return ROLES.some((role) => doc.scheme!.colors[role].hex === color) ? null : mat.inner;
+}
+
+/** All mats of the spread as units, in drawing order of their first mat, measured against the scheme's colours. */
+export function cardUnits(doc: SpreadDocument, prints: ReadonlyMap<PrintId, Print>, scheme: Scheme): CardUnit[] {
+  const photos = new Map(placedPhotos(doc, (id) => prints.get(id)).map((photo) => [photo.matId, photo]));
+  const groups = new Map<string, Mat[]>();
+  for (const mat of doc.mats) {
+    const key = mat.content.kind === 'pane' ? mat.content.groupId : mat.id;
+    const group = groups.get(key);
+    if (group) group.push(mat);
+    else groups.set(key, [mat]);
+  }
+  const lists = [...groups.values()];
+  return lists.map((mats, i) => {
+    const own = ownInner(doc, mats[0]!);
+    const carried = suitabilities(mats, photos, prints, scheme);
+    return {
+      mats: mats.map((mat) => ({ ...mat, inner: ownInner(doc, mat) })),
+      page: mats[0]!.page,
+      box: boundingBox(mats.map((mat) => matRect(doc.format, mat))),
+      area: mats.reduce((sum, mat) => sum + area(matRect(doc.format, mat)), 0),
+      isFocal: mats.some((mat) => mat.focal),
+      kind: mats[0]!.content.kind,
+      // With an inner mat of its own the card does not meet what it carries.
+      card: own ? against(own.color, scheme) : carried,
+      inner: carried,
+      ownInnerHides: own !== null && !fitsAll(mats, photos, prints, own.color),
+      mayTakeInner: !own && mats.every((mat) => canTakeInner(doc, mat, photos.get(mat.id))),
+      neighbours: lists.flatMap((others, k) => (k !== i && touch(doc, mats, others) ? [k] : [])),
+    };
+  });
+}
+
+type RoleSuitability = Record<SchemeRole, Suitability>;
+
+function suitabilities(
+  mats: readonly Mat[],
+  photos: ReadonlyMap<MatId, PlacedPhoto>,
+  prints: ReadonlyMap<PrintId, Print>,
+  scheme: Scheme,
+): RoleSuitability {
+  return eachRole(scheme, (hex) => {
+    const parts = mats.map((mat) => suitability(mat, photos.get(mat.id), prints, hex));
+    return { fits: parts.every(({ fits }) => fits), distance: Math.min(...parts.map(({ distance }) => distance)) };
+  });
+}
+
+const fitsAll = (mats: readonly Mat[], photos: ReadonlyMap<MatId, PlacedPhoto>, prints: ReadonlyMap<PrintId, Print>, hex: Hex): boolean =>
+  mats.every((mat) => suitability(mat, photos.get(mat.id), prints, hex).fits);
+
+const eachRole = (scheme: Scheme, measure: (hex: Hex) => Suitability): RoleSuitability =>
+  Object.fromEntries(ROLES.map((role) => [role, measure(scheme.colors[role].hex)])) as RoleSuitability;
+
+const against = (color: Hex, scheme: Scheme): RoleSuitability => eachRole(scheme, (hex) => apart(color, hex));
+
+function apart(color: Hex, hex: Hex): Suitability {
+  const distance = ciede2000(hexToLab(color), hexToLab(hex));
+  return { fits: distance >= RIM_DELTA_E, distance };
+}
+
+const NOTHING_CARRIED: Suitability = { fits: true, distance: 100 };
+
+function suitability(mat: Mat, photo: PlacedPhoto | undefined, prints: ReadonlyMap<PrintId, Print>, hex: Hex): Suitability {
+  const print = photo && prints.get(photo.printId);
+  if (photo && print) {
+    const contrast = rimContrast(print, photo.window, hex);
+    return { fits: standsOut(contrast), distance: contrast.medianDeltaE };
+  }
+  const { content } = mat;
+  switch (content.kind) {
+    case 'lettering':
+    case 'journaling':
+      return { fits: contrastRatio(content.color, hex) >= TEXT_CONTRAST, distance: ciede2000(hexToLab(content.color), hexToLab(hex)) };
+    case 'paper':
+      return apart(content.ground, hex);
+    case 'embellishment':
+      return apart(content.color, hex);
+    default:
+      return NOTHING_CARRIED;
+  }
+}
+
+function canTakeInner(doc: SpreadDocument, mat: Mat, photo: PlacedPhoto | undefined): boolean {
+  if (!photo) return false;
+  const inner = inset(matRect(doc.format, mat), revealOf(mat, doc.reveal));
+  if (photo.placement.mode === 'whole') return contains(inset(inner, MIN_REVEAL), photo.rect);
+  const left = inset(contentRect(doc.format, doc.reveal, { ...mat, inner: null }), MIN_REVEAL);
+  return left.width >= MIN_PHOTO && left.height >= MIN_PHOTO;
+}
+
+/** True where some mat of one list shares an edge with, or lies on, some mat of the other. */
+function touch(doc: SpreadDocument, some: readonly Mat[], others: readonly Mat[]): boolean {
+  if (some[0]!.page !== others[0]!.page) return false;
+  return some.some((a) => others.some((b) => shareEdge(cellRect(doc.format, a), cellRect(doc.format, b))));
+}
+
+function shareEdge(a: Rect, b: Rect): boolean {
+  if (overlaps(a, b)) return true;
+  const meetsX = a.x === right(b) || b.x === right(a);
+  const meetsY = a.y === bottom(b) || b.y === bottom(a);
+  return (meetsX && a.y < bottom(b) && b.y < bottom(a)) || (meetsY && a.x < right(b) && b.x < right(a));
+}
