@@ -17,15 +17,16 @@ const LEAST_ACCENTS = 3;
 // The weights of one unit's choice against the others'; a misfit outweighs all the rest.
 const MISFIT = 1000;
 const SAME_AS_NEIGHBOUR = 1;
-const FOCAL_NOT_MAIN = 0.6;
+const FOCAL_NOT_MAIN = 2;
 const SHARE_WEIGHT = 0.5;
 /** Worth of each CIEDE2000 of distance from what is carried, up to 40. */
 const DISTANCE_WORTH = 0.015;
-const MOST_ROUNDS = 40;
+const LEAST_GAIN = 1e-9;
+const MOST_FLIPS = 400;
 
 /**
  * The role of every unit, in order. First the accents, on small mats spread over both pages; then main
- * and second, by repeated single changes from all-main until none improves the whole. A unit that fits
+ * and second, by single changes from all-main, the best first, until none improves the whole. A unit that fits
  * neither takes the accent where that fits, text also the base; one that fits none, and for which no inner
  * mat helps, takes whatever lies farthest from it.
  */
@@ -90,25 +91,28 @@ function distanceBetween(a: CardUnit, b: CardUnit): number {
 }
 const ACROSS_THE_GUTTER = 40_000;
 
-/** Flips single open units between main and second while that lowers the cost. Changes `roles`. */
+/** Flips the open unit that gains most between main and second, until none gains. Changes `roles`. */
 function settle(units: readonly CardUnit[], roles: CardRole[], open: readonly number[]): void {
   const total = units.reduce((sum, unit, i) => (roles[i] === 'accent' ? sum : sum + unit.area), 0);
   let main = units.reduce((sum, unit, i) => (roles[i] === 'main' ? sum + unit.area : sum), 0);
   const offShare = (area: number): number => SHARE_WEIGHT * units.length * Math.abs(area / Math.max(1, total) - MAIN_SHARE);
-  for (let round = 0; round < MOST_ROUNDS; round++) {
-    let hasChanged = false;
+  const flipped = (i: number): CardRole => (roles[i] === 'main' ? 'second' : 'main');
+  const mainAfter = (i: number): number => main + (roles[i] === 'main' ? -1 : 1) * units[i]!.area;
+  const gainOf = (i: number): number =>
+    ownCost(units, roles, i, roles[i]!) + offShare(main) - ownCost(units, roles, i, flipped(i)) - offShare(mainAfter(i));
+  for (let round = 0; round < MOST_FLIPS; round++) {
+    let best = -1;
+    let most = LEAST_GAIN;
     for (const i of open) {
-      const now = roles[i]!;
-      const other: CardRole = now === 'main' ? 'second' : 'main';
-      const mainAfter = main + (other === 'main' ? 1 : -1) * units[i]!.area;
-      const gain = ownCost(units, roles, i, now) + offShare(main) - ownCost(units, roles, i, other) - offShare(mainAfter);
-      if (gain > 1e-9) {
-        roles[i] = other;
-        main = mainAfter;
-        hasChanged = true;
+      const gain = gainOf(i);
+      if (gain > most) {
+        most = gain;
+        best = i;
       }
     }
-    if (!hasChanged) return;
+    if (best < 0) return;
+    main = mainAfter(best);
+    roles[best] = flipped(best);
   }
 }
 
