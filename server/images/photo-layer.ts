@@ -1,7 +1,7 @@
-import sharp from 'sharp';
+import sharp, { type Sharp } from 'sharp';
 import { inverseTurn, turnedSize } from '../../shared/geometry/paper';
 import type { Rect, Size } from '../../shared/model/rect';
-import { pictureCover, type PictureCover } from '../../shared/scene/picture-cover';
+import { PHOTO_PAPER, pictureCover, type PictureCover } from '../../shared/scene/picture-cover';
 import { toPixels } from '../../shared/scene/pixels';
 import type { PhotoItem } from '../../shared/scene/scene';
 import type { Layer } from './canvas';
@@ -9,8 +9,8 @@ import type { Layer } from './canvas';
 /** A picture file's bytes, or its path. */
 export type PictureData = Buffer | string;
 
-/** From this reduction on, a JPEG is cheaper to read reduced as a whole than to cut first. */
-const REDUCE_FIRST = 0.5;
+/** Pictures much larger than needed are first read at twice the final size, which JPEG readers do fast. */
+const MUCH_LARGER = 4;
 
 /**
  * The part of a photo that its picture covers, in pixels, upright as on the page. The white paper
@@ -37,42 +37,81 @@ export async function drawPhoto(
 
 async function cutPicture(data: PictureData, photo: PhotoItem, cover: PictureCover, size: Size): Promise<Layer> {
   const { autoOrient: file } = await sharp(data).metadata();
-  const source = scaleRect(cover.source, file.width / photo.imageWidth, file.height / photo.imageHeight);
-  const scaleX = size.width / source.width;
-  const scaleY = size.height / source.height;
-  const isReduced = Math.max(scaleX, scaleY) <= REDUCE_FIRST;
-  const region = isReduced ? { x: 0, y: 0, width: file.width, height: file.height } : wholePixels(source, file);
-  const width = Math.max(size.width, Math.round(region.width * scaleX));
-  const height = Math.max(size.height, Math.round(region.height * scaleY));
-  const left = clamp(Math.round((source.x - region.x) * scaleX), width - size.width);
-  const top = clamp(Math.round((source.y - region.y) * scaleY), height - size.height);
+  const onFile = scaleRect(cover.source, file.width / photo.imageWidth, file.height / photo.imageHeight);
   const picture = sharp(data, { sequentialRead: true }).autoOrient();
-  if (!isReduced) picture.extract({ left: region.x, top: region.y, width: region.width, height: region.height });
+  if (onFile.width < size.width * MUCH_LARGER || onFile.height < size.height * MUCH_LARGER) return cut(picture, file, onFile, size);
+  const width = Math.ceil((file.width * size.width * 2) / onFile.width);
+  const height = Math.ceil((file.height * size.height * 2) / onFile.height);
   const { data: pixels, info } = await picture
     .resize(width, height, { fit: 'fill' })
-    .extract({ left, top, width: size.width, height: size.height })
-    .flatten({ background: '#ffffff' })
+    .flatten({ background: PHOTO_PAPER })
     .toColourspace('srgb')
     .raw()
     .toBuffer({ resolveWithObject: true });
-  return { data: pixels, width: info.width, height: info.height, channels: 3 };
+  const reduced = sharp(pixels, { raw: { width, height, channels: info.channels } });
+  return cut(reduced, info, scaleRect(onFile, width / file.width, height / file.height), size);
+}
+
+/** Cuts a fractional rectangle out of a picture and brings it to `size`. */
+async function cut(picture: Sharp, image: Size, source: Rect, size: Size): Promise<Layer> {
+  const across = cutAxis(source.x, source.width, size.width, image.width);
+  const down = cutAxis(source.y, source.height, size.height, image.height);
+  const { data, info } = await picture
+    .extract({ left: across.from, top: down.from, width: across.length, height: down.length })
+    .resize(across.resized, down.resized, { fit: 'fill', kernel: KERNEL })
+    .extract({ left: across.skip, top: down.skip, ...size })
+    .flatten({ background: PHOTO_PAPER })
+    .toColourspace('srgb')
+    .raw()
+    .toBuffer({ resolveWithObject: true });
+  return { data, width: info.width, height: info.height, channels: 3 };
+}
+
+interface AxisCut {
+  /** Whole pixels to take from the picture. */
+  readonly from: number;
+  readonly length: number;
+  /** Their length in pixels of the result, and how many of those lie before the piece wanted. */
+  readonly resized: number;
+  readonly skip: number;
+}
+
+/** Of sharp's kernels the one whose results come nearest to a browser's scaling; it neither rings nor blurs much. */
+const KERNEL = 'mitchell';
+
+/** How many more pixels than needed may be taken at either end to meet the result's pixels better. */
+const SLACK_PX = 12;
+
+/**
+ * A cut takes whole pixels of the picture and gives whole pixels of the result, but the piece wanted
+ * may begin and end between pixels of both. A few more pixels are taken at either end, so many that
+ * the piece falls as near to the result's pixel lines as can be.
+ */
+export function cutAxis(start: number, wanted: number, result: number, image: number): AxisCut {
+  const scale = result / wanted;
+  const first = clamp(Math.floor(start + 1e-6), image - 1);
+  const last = Math.max(first + 1, Math.min(image, Math.ceil(start + wanted - 1e-6)));
+  const from = nearest(first, Math.max(0, first - SLACK_PX), (at) => (start - at) * scale);
+  const end = nearest(last, Math.min(image, last + SLACK_PX), (at) => (at - from) * scale);
+  const resized = Math.max(result, Math.round((end - from) * scale));
+  return { from, length: end - from, resized, skip: clamp(Math.round((start - from) * scale), resized - result) };
+}
+
+/** Of the whole numbers from `near` to `far`, the one whose measure is nearest to a whole number; the first of equals. */
+function nearest(near: number, far: number, measure: (at: number) => number): number {
+  const step = far < near ? -1 : 1;
+  let best = near;
+  let bestMiss = Infinity;
+  for (let at = near; step > 0 ? at <= far : at >= far; at += step) {
+    const miss = Math.abs(measure(at) - Math.round(measure(at)));
+    if (miss < bestMiss - 1e-6) [best, bestMiss] = [at, miss];
+  }
+  return best;
 }
 
 const scaleRect = (r: Rect, x: number, y: number): Rect => ({ x: r.x * x, y: r.y * y, width: r.width * x, height: r.height * y });
 
 const clamp = (value: number, max: number): number => Math.min(Math.max(value, 0), max);
-
-/** The whole pixels that a fractional rectangle touches, on the image. */
-function wholePixels(r: Rect, image: Size): Rect {
-  const x = clamp(Math.floor(r.x + 1e-6), image.width - 1);
-  const y = clamp(Math.floor(r.y + 1e-6), image.height - 1);
-  return {
-    x,
-    y,
-    width: Math.max(1, Math.min(image.width, Math.ceil(r.x + r.width - 1e-6)) - x),
-    height: Math.max(1, Math.min(image.height, Math.ceil(r.y + r.height - 1e-6)) - y),
-  };
-}
 
 async function turnLayer(layer: Layer, degrees: number): Promise<Layer> {
   const { width, height, channels } = layer;

@@ -1,6 +1,7 @@
 import sharp from 'sharp';
 import { boundingBox, intersection } from '../../shared/geometry/rects';
 import type { Rect } from '../../shared/model/rect';
+import { baselineOnPixels } from '../../shared/scene/pixels';
 import type { CircleItem, TextItem } from '../../shared/scene/scene';
 import { FACES } from '../../shared/scene/text';
 import type { Layer } from './canvas';
@@ -29,7 +30,7 @@ export async function drawVectors(
   );
   if (!area) return null;
   const viewBox = [area.x, area.y, area.width, area.height].map((px) => px / scale).join(' ');
-  const svg = `<svg xmlns="http://www.w3.org/2000/svg" width="${area.width}" height="${area.height}" viewBox="${viewBox}">${items.map(markup).join('')}</svg>`;
+  const svg = `<svg xmlns="http://www.w3.org/2000/svg" width="${area.width}" height="${area.height}" viewBox="${viewBox}">${items.map((item) => markup(item, scale)).join('')}</svg>`;
   const { data, info } = await sharp(Buffer.from(svg)).ensureAlpha().raw().toBuffer({ resolveWithObject: true });
   return { layer: { data, width: info.width, height: info.height, channels: 4 }, x: area.x, y: area.y };
 }
@@ -42,12 +43,13 @@ function boundsOf(item: VectorItem): Rect {
   return { x: left - item.size, y: item.baseline - 1.4 * item.size, width: right - left + 3 * item.size, height: 2.2 * item.size };
 }
 
-function markup(item: VectorItem): string {
+function markup(item: VectorItem, scale: number): string {
   if (item.kind === 'circle') return `<circle cx="${item.cx}" cy="${item.cy}" r="${item.r}" fill="${item.fill}"/>`;
   const em = item.size / FACES[item.font].metrics.unitsPerEm;
+  const y = baselineOnPixels(item.baseline, scale);
   const glyphs = [...item.text].map((character, i) => {
     const path = glyphPath(item.font, character);
-    return path && `<path transform="matrix(${em} 0 0 ${-em} ${item.xs[i]} ${item.baseline})" d="${path}"/>`;
+    return path && `<path transform="matrix(${em} 0 0 ${-em} ${item.xs[i]} ${y})" d="${path}"/>`;
   });
   return `<g fill="${item.fill}">${glyphs.join('')}</g>`;
 }

@@ -24,6 +24,9 @@ export function lineToPixels(rect: Rect, scale: number): Rect {
   return { ...px, width: Math.max(1, px.width), height: Math.max(1, px.height) };
 }
 
+/** A line of text stands on a whole pixel line, where browsers would put it anyway; its glyphs keep their places along it. */
+export const baselineOnPixels = (baseline: number, scale: number): number => Math.round(baseline * scale) / scale;
+
 /** Thickness of a frame in whole pixels, at least one. */
 export const thicknessToPixels = (thickness: number, scale: number): number => Math.max(1, Math.round(thickness * scale));
 

@@ -1,6 +1,7 @@
 import { memo } from 'react';
 import type { PictureSize } from '#shared/contracts/prints';
 import { drawAlike } from '#shared/scene/mat-groups';
+import { baselineOnPixels } from '#shared/scene/pixels';
 import type { FontId, SceneItem, TextItem } from '#shared/scene/scene';
 import { framePath, onPixels } from './on-pixels';
 import { PhotoDrawing } from './photo-drawing';
@@ -49,7 +50,7 @@ function ItemDrawing({ item, scale, pictureSize, isMini }: ItemDrawingProps) {
     case 'photo':
       return <PhotoDrawing photo={item} scale={scale} pictureSize={pictureSize} />;
     case 'text':
-      return <TextDrawing item={item} />;
+      return <TextDrawing item={item} scale={scale} />;
   }
 }
 
@@ -62,9 +63,21 @@ const FONTS: Readonly<Record<FontId, { readonly fontFamily: string; readonly fon
 /** Every glyph stands where the scene says; the browser neither kerns nor joins letters by itself. */
 const PLAIN_GLYPHS = { fontKerning: 'none', fontVariantLigatures: 'none', fontWeight: 400, letterSpacing: 'normal', wordSpacing: 'normal' } as const;
 
-function TextDrawing({ item }: { readonly item: TextItem }) {
+/** Browsers clamp font sizes (Chromium to 10000 px, from memory), which 2 in letters in 1/160 mm would pass. */
+const TEXT_UNIT = 20;
+
+function TextDrawing({ item, scale }: { readonly item: TextItem; readonly scale: number | null }) {
+  const baseline = scale === null ? item.baseline : baselineOnPixels(item.baseline, scale);
   return (
-    <text x={item.xs.join(' ')} y={item.baseline} fill={item.fill} fontSize={item.size} textRendering="geometricPrecision" style={{ ...PLAIN_GLYPHS, ...FONTS[item.font] }}>
+    <text
+      transform={`scale(${TEXT_UNIT})`}
+      x={item.xs.map((x) => x / TEXT_UNIT).join(' ')}
+      y={baseline / TEXT_UNIT}
+      fontSize={item.size / TEXT_UNIT}
+      fill={item.fill}
+      textRendering="geometricPrecision"
+      style={{ ...PLAIN_GLYPHS, ...FONTS[item.font] }}
+    >
       {item.text}
     </text>
   );
