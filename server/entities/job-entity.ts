@@ -32,7 +32,7 @@ export class JobEntity {
   kind!: string;
 
   @Column({ type: 'json' })
-  payload!: unknown;
+  payload!: object;
 
   @Column({ type: 'enum', enum: JOB_STATES })
   state!: Job['state'];
@@ -49,7 +49,7 @@ export class JobEntity {
   lockedUntil!: Date | null;
 
   @Column({ type: 'json', nullable: true })
-  result!: unknown;
+  result!: object | null;
 
   /** Code and data of the error; the words come from `shared/words`. */
   @Column({ type: 'json', nullable: true })

@@ -11,7 +11,7 @@ export interface JobContext {
  * Does one job. What it returns is stored as the job's result. An AppError fails the job for good and its sentence
  * is shown; any other error is tried again, up to `MAX_ATTEMPTS`. A handler must bear being run twice.
  */
-export type JobHandler = (job: JobEntity, context: JobContext) => Promise<unknown>;
+export type JobHandler = (job: JobEntity, context: JobContext) => Promise<object | null>;
 
 /** By the job's kind. */
 export type JobHandlers = Readonly<Record<string, JobHandler>>;

@@ -1,0 +1,77 @@
+import { randomUUID } from 'node:crypto';
+import type { DataSource } from 'typeorm';
+import type { SignUp } from '../../shared/contracts/accounts';
+import { AppError } from '../../shared/errors';
+import { TRIM_SETTINGS_INCH } from '../../shared/model/trim-settings';
+import { MembershipEntity } from '../entities/membership-entity';
+import { StudioEntity } from '../entities/studio-entity';
+import { UserEntity } from '../entities/user-entity';
+import { isDuplicateKey } from './database-errors';
+import { hashPassword, verifyPassword } from './passwords';
+
+interface Deps {
+  readonly dataSource: DataSource;
+  readonly now: () => Date;
+  readonly studioQuotaBytes: number;
+}
+
+export class AccountService {
+  constructor(private readonly deps: Deps) {}
+
+  /**
+   * Makes the account, a studio and the ownership of it, or none of them.
+   *
+   * @throws AppError('already-exists') for an address that has an account.
+   */
+  async signUp({ email, password, name, studioName }: SignUp): Promise<UserEntity> {
+    const { dataSource, now, studioQuotaBytes } = this.deps;
+    const createdAt = now();
+    const user = dataSource.manager.create(UserEntity, {
+      id: randomUUID(),
+      email,
+      name,
+      passwordHash: await hashPassword(password),
+      createdAt,
+    });
+    const studio = {
+      id: randomUUID(),
+      name: studioName,
+      unit: 'in' as const,
+      tolerance: TRIM_SETTINGS_INCH.tolerance,
+      finestMark: TRIM_SETTINGS_INCH.finestMark,
+      hidden: false,
+      bytesUsed: 0,
+      bytesQuota: studioQuotaBytes,
+      createdAt,
+    };
+    try {
+      await dataSource.transaction(async (manager) => {
+        await manager.insert(UserEntity, user);
+        await manager.insert(StudioEntity, studio);
+        await manager.insert(MembershipEntity, { studioId: studio.id, userId: user.id, role: 'owner', createdAt });
+      });
+    } catch (error) {
+      if (isDuplicateKey(error)) throw new AppError('already-exists', { what: 'account' });
+      throw error;
+    }
+    return user;
+  }
+
+  /** The account that both belong to, or null; takes the same time either way. */
+  async verify(email: string, password: string): Promise<UserEntity | null> {
+    const user = await this.deps.dataSource.manager.findOneBy(UserEntity, { email });
+    const matches = await verifyPassword(user?.passwordHash ?? null, password);
+    return matches ? user : null;
+  }
+
+  find(id: string): Promise<UserEntity | null> {
+    return this.deps.dataSource.manager.findOneBy(UserEntity, { id });
+  }
+
+  /** @throws AppError('unauthenticated') when the account is gone. */
+  async get(id: string): Promise<UserEntity> {
+    const user = await this.find(id);
+    if (!user) throw new AppError('unauthenticated');
+    return user;
+  }
+}

@@ -1,0 +1,44 @@
+import type { DataSource } from 'typeorm';
+import { gridOf } from '../../shared/geometry/grid';
+import { AppError } from '../../shared/errors';
+import { PAGE_FORMATS, type PageFormat } from '../../shared/model/page-format';
+import { PageFormatEntity } from '../entities/page-format-entity';
+import { isDuplicateKey } from './database-errors';
+import { invalidField } from './invalid-field';
+
+export class FormatService {
+  constructor(
+    private readonly dataSource: DataSource,
+    private readonly now: () => Date,
+  ) {}
+
+  /** The shipped formats, then the studio's own, oldest first. */
+  async list(studioId: string): Promise<PageFormat[]> {
+    const own = await this.dataSource.manager.find(PageFormatEntity, { where: { studioId }, order: { createdAt: 'ASC', id: 'ASC' } });
+    return [...PAGE_FORMATS, ...own.map(({ format }) => format)];
+  }
+
+  async find(studioId: string, id: string): Promise<PageFormat | null> {
+    return (await this.list(studioId)).find((format) => format.id === id) ?? null;
+  }
+
+  /**
+   * @throws AppError `invalid-input` for a format whose grid holds no step, `already-exists` for an id that is taken
+   *   by another format.
+   */
+  async create(studioId: string, format: PageFormat): Promise<PageFormat> {
+    const grid = gridOf(format);
+    if (grid.columns < 1 || grid.rows < 1) throw invalidField('step', 'not one whole step fits between the margins');
+    if (format.gap >= format.step) throw invalidField('gap', 'the gap must be smaller than a step');
+    const taken = new AppError('already-exists', { what: 'page format', id: format.id });
+    if (PAGE_FORMATS.some(({ id }) => id === format.id)) throw taken;
+    try {
+      await this.dataSource.manager.insert(PageFormatEntity, { studioId, id: format.id, format, createdAt: this.now() });
+    } catch (error) {
+      if (!isDuplicateKey(error)) throw error;
+      const existing = await this.find(studioId, format.id);
+      if (JSON.stringify(existing) !== JSON.stringify(format)) throw taken;
+    }
+    return format;
+  }
+}

@@ -1,0 +1,51 @@
+import { In, type DataSource } from 'typeorm';
+import type { SpreadDocument } from '../../shared/model/spread';
+import { namedPrints } from '../../shared/model/print-use';
+import { AlbumEntity } from '../entities/album-entity';
+import { PrintEntity } from '../entities/print-entity';
+import type { SpreadEntity } from '../entities/spread-entity';
+import { SpreadPrintEntity } from '../entities/spread-print-entity';
+import { StudioEntity } from '../entities/studio-entity';
+import { readDocument } from './spread-service';
+
+/** What a spread stands in: all that Compose needs beside the document. */
+export interface SpreadSetting {
+  readonly album: AlbumEntity;
+  readonly studio: StudioEntity;
+  readonly prints: readonly PrintEntity[];
+  /** Copies of the named prints that other live spreads of the studio use. */
+  readonly usedElsewhere: Readonly<Record<string, number>>;
+}
+
+export async function loadSpreadSetting(dataSource: DataSource, spread: SpreadEntity): Promise<SpreadSetting> {
+  const [album, studio, prints] = await Promise.all([
+    dataSource.manager.findOneByOrFail(AlbumEntity, { id: spread.albumId }),
+    dataSource.manager.findOneByOrFail(StudioEntity, { id: spread.studioId }),
+    loadNamedPrints(dataSource, spread.studioId, [readDocument(spread)]),
+  ]);
+  return { album, studio, prints, usedElsewhere: await countElsewhere(dataSource, spread, prints) };
+}
+
+/** Every print of the studio that one of the documents names, oldest first. */
+export async function loadNamedPrints(dataSource: DataSource, studioId: string, docs: readonly SpreadDocument[]): Promise<PrintEntity[]> {
+  const ids = new Set(docs.flatMap((doc) => [...namedPrints(doc)]));
+  if (ids.size === 0) return [];
+  return dataSource.manager.find(PrintEntity, { where: { studioId, id: In([...ids]) }, order: { createdAt: 'ASC', id: 'ASC' } });
+}
+
+/** Spreads in the bin use nothing. */
+async function countElsewhere(dataSource: DataSource, spread: SpreadEntity, prints: readonly PrintEntity[]): Promise<Record<string, number>> {
+  if (prints.length === 0) return {};
+  const rows = await dataSource.manager
+    .createQueryBuilder(SpreadPrintEntity, 'use')
+    .innerJoin('use.spread', 'spread')
+    .select('use.printId', 'printId')
+    .addSelect('SUM(use.copies)', 'copies')
+    .where('use.printId IN (:...ids)', { ids: prints.map(({ id }) => id) })
+    .andWhere('use.spreadId <> :spreadId', { spreadId: spread.id })
+    .andWhere('spread.binnedAt IS NULL')
+    .groupBy('use.printId')
+    .having('SUM(use.copies) > 0')
+    .getRawMany<{ printId: string; copies: string }>();
+  return Object.fromEntries(rows.map(({ printId, copies }) => [printId, Number(copies)]));
+}
