@@ -1,0 +1,27 @@
+/** Every check's id, in the order in which notes of one severity and one place stand. */
+export const CHECK_IDS = [
+  'window-off-paper',
+  'never-cut',
+  'keep-zone-cut',
+  'seam-through-keep-zone',
+  'more-placements-than-copies',
+  'print-smaller-than-photo',
+  'whole-overhangs',
+  'photo-sinks',
+  'bare-mat',
+  'pages-unequal',
+  'no-focal',
+  'focals-same-place',
+  'focals-same-size',
+  'focal-not-dominant',
+  'nothing-shared',
+  'motif-copied',
+  'whole-lopsided',
+  'shaving',
+  'mat-like-page',
+  'under-binding',
+  'low-resolution',
+  'no-title',
+  'no-journaling',
+] as const;
+export type CheckId = (typeof CHECK_IDS)[number];

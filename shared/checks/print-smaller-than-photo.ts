@@ -1,0 +1,36 @@
+import { contains } from '../geometry/rects';
+import { turnedSize } from '../geometry/paper';
+import { defineCheck, type Finding } from './check';
+import { mountWhole } from './keep-zone-remedies';
+import { paperOf } from './keep-zones';
+import { offPaper } from './off-paper';
+import { piecesOf } from './pieces';
+import { mustBeFilled, slideOntoPaper } from './window-off-paper';
+
+/** A window that reaches past its print where the mat may show instead: the print is mounted whole, or its window slid back. */
+export const printSmallerThanPhoto = defineCheck({
+  id: 'print-smaller-than-photo',
+  severity: 'fix',
+  basis: { kind: 'common-practice' },
+  needsFilledPages: false,
+  thresholds: {},
+  find: (view) =>
+    piecesOf(view).flatMap((piece): Finding[] => {
+      const { placement, print, window } = piece;
+      if (placement.mode === 'whole' || mustBeFilled(view, piece)) return [];
+      const paper = paperOf(print, placement);
+      if (contains(paper, window)) return [];
+      const onPage = turnedSize(paper, placement.turn);
+      const photo = turnedSize(window, placement.turn);
+      const isWide = (offPaper(window, paper).axis === 'wide') === (placement.turn % 2 === 0);
+      const [shown, wanted] = isWide ? [onPage.width, photo.width] : [onPage.height, photo.height];
+      return [
+        {
+          messageId: 'print-smaller',
+          data: { title: print.title, print: shown, photo: wanted, axis: isWide ? 'wide' : 'high' },
+          matIds: piece.matIds,
+          remedies: () => [...slideOntoPaper(view, piece), ...mountWhole(view, piece)],
+        },
+      ];
+    }),
+});
