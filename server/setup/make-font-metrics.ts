@@ -28,8 +28,8 @@ function advanceRuns(fonts: readonly Font[]): Record<number, number[]> {
   const advances = new Map<number, number>();
   for (const font of fonts) {
     for (const codePoint of font.characterSet) {
-      // Control characters have glyphs in some files, but never reach a line of text.
-      if (codePoint < 0x20 || advances.has(codePoint)) continue;
+      // Control characters and the noncharacter that ends a table are no text.
+      if (codePoint < 0x20 || codePoint === 0xffff || advances.has(codePoint)) continue;
       advances.set(codePoint, font.glyphForCodePoint(codePoint).advanceWidth);
     }
   }

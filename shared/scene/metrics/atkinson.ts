@@ -144,9 +144,6 @@ export const ATKINSON: FontMetrics = {
   ],
   "8725": [
    598
-  ],
-  "65535": [
-   527
   ]
  },
  "kerning": {

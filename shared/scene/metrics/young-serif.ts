@@ -192,9 +192,6 @@ export const YOUNG_SERIF: FontMetrics = {
   ],
   "8725": [
    600
-  ],
-  "65535": [
-   500
   ]
  },
  "kerning": {
