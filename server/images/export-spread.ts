@@ -26,15 +26,22 @@ const JPEG_OPTIONS = { quality: 92, chromaSubsampling: '4:4:4' } as const;
 /** Measured: higher levels take several times as long for a few per cent of a photograph's bytes. */
 const PNG_OPTIONS = { compressionLevel: 4 } as const;
 
+/** Reading the photos is about this part of the work; the rest is writing the file. */
+const READING_SHARE = 0.8;
+
 /** Draws a spread into one file in sRGB with its density recorded, such that it prints at true size. */
-export async function exportSpread(task: ExportTask): Promise<ExportResult> {
+export async function exportSpread(task: ExportTask, onProgress: (share: number) => void = () => undefined): Promise<ExportResult> {
   const { scene, widthPx, format, picturePaths, outputPath } = task;
   const ppi = widthPx / toInches(scene.width);
+  const photos = scene.items.filter(({ kind }) => kind === 'photo').length;
+  let read = 0;
   const drawing = await drawScene(scene, {
     widthPx,
     loadPicture: async (id) => {
       const data = picturePaths[id];
       if (data === undefined) throw new Error(`No file for print ${id}`);
+      onProgress((READING_SHARE * read) / photos);
+      read += 1;
       return { data };
     },
   });

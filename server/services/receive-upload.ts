@@ -8,6 +8,7 @@ import multer, { MulterError, type StorageEngine } from 'multer';
 import pLimit from 'p-limit';
 import { z } from 'zod';
 import { idSchema } from '../../shared/contracts/common';
+import { fieldFaults } from '../../shared/contracts/field-faults';
 import { MAX_UPLOAD_BYTES } from '../../shared/contracts/prints';
 import { AppError } from '../../shared/errors';
 import type { Incoming } from '../storage/incoming';
@@ -28,7 +29,7 @@ const MAX_WAITING = 400;
 /** A body that claims more than this is not even drained. */
 const MAX_DRAINED_BYTES = 4 * MAX_UPLOAD_BYTES;
 
-const fieldsSchema = z.strictObject({
+export const uploadFieldsSchema = z.strictObject({
   id: idSchema.optional(),
   pileId: z.union([idSchema, z.literal('').transform(() => null)]).optional(),
 });
@@ -63,21 +64,26 @@ export function createReceiveUpload(incoming: Incoming): ReceiveUpload {
 async function read(req: Request): Promise<ReceivedUpload> {
   const { file } = req;
   if (!file) throw new AppError('picture-refused', { reason: 'no-file' });
-  const fields = fieldsSchema.safeParse({ ...(req.body as Record<string, unknown>) });
-  const isTooLarge = file.size > MAX_UPLOAD_BYTES;
-  if (isTooLarge || !fields.success) {
+  try {
+    if (file.size > MAX_UPLOAD_BYTES) throw new AppError('too-large', { maxBytes: MAX_UPLOAD_BYTES });
+    return { ...described(file), ...parseFields(req.body) };
+  } catch (error) {
     await rm(file.path, { force: true });
-    if (isTooLarge) throw new AppError('too-large', { maxBytes: MAX_UPLOAD_BYTES });
-    throw fields.error;
+    throw error;
   }
-  return {
-    path: file.path,
-    fileName: file.originalname,
-    bytes: file.size,
-    sha256: file.filename,
-    id: fields.data.id,
-    pileId: fields.data.pileId ?? null,
-  };
+}
+
+const described = (file: Express.Multer.File) => ({
+  path: file.path,
+  fileName: file.originalname,
+  bytes: file.size,
+  sha256: file.filename,
+});
+
+function parseFields(body: unknown): Pick<ReceivedUpload, 'id' | 'pileId'> {
+  const fields = uploadFieldsSchema.safeParse({ ...(body as Record<string, unknown>) });
+  if (!fields.success) throw new AppError('invalid-input', { where: 'body', fields: fieldFaults(fields.error.issues) });
+  return { id: fields.data.id, pileId: fields.data.pileId ?? null };
 }
 
 /** Disk storage that also hashes: `filename` is the SHA-256 in hex. A body that breaks off leaves nothing. */
@@ -108,12 +114,13 @@ function hashingStorage(incoming: Incoming): StorageEngine {
 function explain(error: unknown): Error {
   if (error instanceof MulterError) {
     if (error.code === 'LIMIT_FILE_SIZE') return new AppError('too-large', { maxBytes: MAX_UPLOAD_BYTES });
-    return new AppError('invalid-input', { reason: error.code, field: error.field });
+    const message = error.code === 'LIMIT_UNEXPECTED_FILE' ? 'there is no such file part; the picture is `file`' : 'more than this form holds';
+    return new AppError('invalid-input', { where: 'body', fields: [{ path: error.field ?? 'file', message }] });
   }
   if (error instanceof Error && isDiskFull(error)) return new AppError('disk-full');
   // What busboy says of a body that is no multipart form, or that breaks off.
   if (error instanceof Error && /multipart|form|boundary|header|aborted|premature/i.test(error.message)) {
-    return new AppError('invalid-input', { reason: 'not-a-form' });
+    return new AppError('invalid-input', { where: 'body', fields: [{ path: 'file', message: 'the form broke off or is no multipart form' }] });
   }
   return error instanceof Error ? error : new Error(String(error));
 }

@@ -19,6 +19,8 @@ import { WorkerEndedError } from '../images/worker-process';
 import { requireFreeDisk } from '../storage/free-disk';
 import type { Incoming } from '../storage/incoming';
 import { originalKey, pictureKey, type Storage } from '../storage/storage';
+import { isDangling } from './database-errors';
+import { invalidField } from './invalid-field';
 import type { ReceivedUpload } from './receive-upload';
 import { lockStudio, removeUnlessKnown, SIZES } from './stored-pictures';
 
@@ -34,8 +36,10 @@ export interface UploadDeps {
 export interface Uploader {
   readonly studioId: StudioId;
   readonly userId: UserId | null;
+  /** Throws unless this person may add to the pile that the upload names. */
+  readonly mayAdd: () => Promise<void>;
   /** Whether this person may be shown a print that the studio already has. */
-  readonly maySee: (print: PrintEntity) => Promise<boolean>;
+  readonly maySee: (print: PrintEntity) => boolean;
 }
 
 export interface Uploaded {
@@ -50,10 +54,11 @@ export class UploadService {
    * Takes a received file in as a print, and removes the received file whatever happens.
    *
    * @throws AppError `picture-refused` · `quota-exceeded` · `disk-full` · `already-exists` (the id is another thing's) ·
-   *   `not-found` (no such pile) · `unavailable`.
+   *   `unavailable`, and what `mayAdd` throws.
    */
   async take(upload: ReceivedUpload, uploader: Uploader): Promise<Uploaded> {
     try {
+      await uploader.mayAdd();
       const before = await this.findBefore(upload, uploader);
       if (before) return before;
       await this.requireRoom(upload, uploader.studioId);
@@ -61,6 +66,9 @@ export class UploadService {
         const result = await this.read(upload.path, outputFolder);
         return this.store(upload, uploader, result);
       });
+    } catch (error) {
+      if (isDangling(error)) throw invalidField('pileId', 'there is no such pile in this studio any more');
+      throw error;
     } finally {
       await rm(upload.path, { force: true });
     }
@@ -80,10 +88,8 @@ export class UploadService {
       where: { studioId, file: { sha256: upload.sha256 }, binnedAt: IsNull() },
       order: { createdAt: 'ASC', id: 'ASC' },
     });
-    for (const print of sameFile) {
-      if (await uploader.maySee(print)) return { print, known: true };
-    }
-    return null;
+    const print = sameFile.find(uploader.maySee);
+    return print ? { print, known: true } : null;
   }
 
   /** Checked again when storing; here only so that no work is done in vain. */

@@ -77,7 +77,7 @@ async function received(bytes: Buffer, values: Partial<ReceivedUpload> = {}): Pr
   return { path, fileName: 'holiday.jpg', bytes: bytes.length, sha256, id: undefined, pileId: null, ...values };
 }
 
-const uploader = (values: Partial<Uploader> = {}): Uploader => ({ studioId, userId: null, maySee: async () => true, ...values });
+const uploader = (values: Partial<Uploader> = {}): Uploader => ({ studioId, userId: null, mayAdd: async () => undefined, maySee: () => true, ...values });
 
 /** Every file under the data folder, in any place. */
 async function allFiles(): Promise<string[]> {
@@ -140,7 +140,7 @@ describe('an upload', () => {
   it('of a file that the person may not see as a print shares the file and makes a print of their own', async () => {
     const bytes = await jpeg(4);
     const first = await service().take(await received(bytes), uploader());
-    const second = await service().take(await received(bytes), uploader({ maySee: async () => false }));
+    const second = await service().take(await received(bytes), uploader({ maySee: () => false }));
     expect(second.known).toBe(false);
     expect(second.print.id).not.toBe(first.print.id);
     expect(await rows()).toEqual({ files: 1, prints: 2, bytesUsed: bytes.length });
