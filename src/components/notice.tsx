@@ -13,7 +13,7 @@ interface NoticeProps {
 /** One plain sentence on paper with a coloured left edge: what was wrong, what is safe, what to do. */
 export function Notice({ tone = 'stop', children, className = '', alert = false }: NoticeProps) {
   return (
-    <div className={`error-line ${tone === 'note' ? 'is-note' : ''} ${className}`} role={alert ? 'alert' : undefined}>
+    <div className={`errline ${className}`} data-tone={tone} role={alert ? 'alert' : undefined}>
       {tone === 'stop' && <StopMark />}
       <div className="min-w-0 flex-1">{children}</div>
     </div>
@@ -22,5 +22,5 @@ export function Notice({ tone = 'stop', children, className = '', alert = false 
 
 /** Says that there is nothing here yet, and the one thing to do about it. */
 export function EmptyLine({ children, className = '' }: { readonly children: ReactNode; readonly className?: string }) {
-  return <div className={`empty-line ${className}`}>{children}</div>;
+  return <div className={`emptyline ${className}`}>{children}</div>;
 }

@@ -14,7 +14,7 @@ interface PrintPictureProps {
   readonly print: PicturedPrint;
   readonly pictureSize?: PictureSize;
   /** Pixels per inch; left out, the table's `--u` counts. */
-  readonly perInch?: number;
+  readonly pxPerInch?: number;
   /** `gone`: only its dashed place on the table. `hand`: lifted. */
   readonly state?: 'rest' | 'gone' | 'hand';
   /** Lie a little askew, as prints on a table do; always by the same angle. */
@@ -31,7 +31,7 @@ interface PrintPictureProps {
 export const PrintPicture = memo(function PrintPicture({
   print,
   pictureSize = 'small',
-  perInch,
+  pxPerInch,
   state = 'rest',
   isTilted = false,
   decorative = false,
@@ -44,7 +44,7 @@ export const PrintPicture = memo(function PrintPicture({
   const style = {
     '--pw': paper.width,
     '--ph': paper.height,
-    ...(perInch !== undefined && { '--u': `${perInch}px` }),
+    ...(pxPerInch !== undefined && { '--u': `${pxPerInch}px` }),
     ...(isTilted && { rotate: `${printAngle(print.id)}deg` }),
   } as CSSProperties;
   return (

@@ -10,7 +10,7 @@ interface TagProps {
 
 export function Tag({ tone = 'plain', children, className = '', title }: TagProps) {
   return (
-    <span className={`tag ${tone === 'plain' ? '' : `is-${tone}`} ${className}`} title={title}>
+    <span className={`tag ${className}`} data-tone={tone} title={title}>
       {children}
     </span>
   );

@@ -1,6 +1,5 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
-import { z } from 'zod';
-import { sessionSchema, type Session, type SignIn, type SignUp } from '#shared/contracts/accounts';
+import { healthSchema, sessionSchema, type Session, type SignIn, type SignUp } from '#shared/contracts/accounts';
 import { api, ApiError } from '@/lib/api';
 import { SESSION_KEY } from '@/lib/query-client';
 
@@ -16,11 +15,6 @@ export const sessionQuery = queryOptions({
     }
   },
   staleTime: 60_000,
-});
-
-const healthSchema = z.object({
-  mode: z.enum(['demo', 'production']),
-  demoAccounts: z.array(z.object({ email: z.string(), role: z.string(), password: z.string() })).optional(),
 });
 
 /** What the sign-in page may know of the server: in demo mode, the accounts to try. */
