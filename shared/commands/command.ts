@@ -23,6 +23,7 @@ export const REASONS = [
   'no-free-place',
   'no-print-there',
   'not-for-prints',
+  'content-does-not-fit',
   'has-an-up',
   'not-digital',
   'is-whole',

@@ -1,10 +1,11 @@
 import { gridOf } from '../geometry/grid';
 import { cellsOverlap } from '../model/document-faults';
 import { SIDES, type Hex, type Side } from '../model/ids';
-import type { Mat, SpreadDocument } from '../model/spread';
+import type { Content, Mat, SpreadDocument } from '../model/spread';
 import { refuse, type CommandRun } from './command';
 import { matOf, matsOf, newZ, withMats } from './edit-mats';
 import { dropPrint } from './pictures';
+import { storedContent } from './stored-content';
 
 /** Warm grey card, where the spread gives no hint. */
 const PLAIN_CARD: Hex = '#8b857a';
@@ -20,6 +21,8 @@ function usualColor(doc: SpreadDocument): Hex {
 export const addMat: CommandRun<'mats.add'> = (doc, args, context) => {
   const { page, laidOver = false, content = { kind: 'bare' } } = args;
   if (content.kind === 'pane') return refuse('not-for-prints');
+  const stored: Content | null = content.kind === 'print' ? { kind: 'bare' } : storedContent(content);
+  if (!stored) return refuse('content-does-not-fit');
   const mat: Mat = {
     id: context.newId(),
     page,
@@ -34,7 +37,7 @@ export const addMat: CommandRun<'mats.add'> = (doc, args, context) => {
     trueSize: null,
     laidOver,
     focal: false,
-    content: content.kind === 'print' ? { kind: 'bare' } : content,
+    content: stored,
   };
   const next = withMats(doc, [...doc.mats, mat]);
   if (content.kind !== 'print') return next;

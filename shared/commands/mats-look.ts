@@ -2,6 +2,7 @@ import { contentRect, innerMatRect } from '../geometry/grid';
 import type { Mat, SpreadDocument } from '../model/spread';
 import { refuse, type CommandRun, type Outcome } from './command';
 import { changeMats, groupOf, matOf, matsOf, newZ, withMats } from './edit-mats';
+import { storedContent } from './stored-content';
 
 function changeNamed(doc: SpreadDocument, matIds: readonly string[], change: (mat: Mat) => Mat): Outcome {
   return matsOf(doc, matIds) ? changeMats(doc, matIds, change) : refuse('no-such-mat');
@@ -49,8 +50,11 @@ export const setLaidOver: CommandRun<'mats.setLaidOver'> = (doc, { matIds, laidO
 };
 
 /** What the mat carried goes back to the table; a pane leaves its group. */
-export const setContent: CommandRun<'mats.setContent'> = (doc, { matId, content }) =>
-  content.kind === 'print' || content.kind === 'pane' ? refuse('not-for-prints') : changeNamed(doc, [matId], (mat) => ({ ...mat, content }));
+export const setContent: CommandRun<'mats.setContent'> = (doc, { matId, content }) => {
+  if (content.kind === 'print' || content.kind === 'pane') return refuse('not-for-prints');
+  const stored = storedContent(content);
+  return stored ? changeNamed(doc, [matId], (mat) => ({ ...mat, content: stored })) : refuse('content-does-not-fit');
+};
 
 /** One press colours the whole spread. An inner mat that a mat has no room for is left out. */
 export const applyScheme: CommandRun<'scheme.apply'> = (doc, { scheme, pageColor, matColors, inners = {} }) => {

@@ -39,8 +39,11 @@ export const COMMAND_LABELS: Readonly<Record<CommandId, string>> = {
   'table.remove': 'Put prints away',
 };
 
-/** The label of a logged command; one that this version does not know (an older or newer client's) is plainly an edit. */
-export const commandLabel = (id: string): string => (id in COMMAND_LABELS ? COMMAND_LABELS[id as CommandId] : 'Edit');
+/** Steps that are no command of their own. */
+const OTHER_LABELS: Readonly<Record<string, string>> = { undo: 'Undo', redo: 'Redo', 'conflict.mine': 'Keep mine', 'conflict.theirs': 'Take theirs' };
+
+/** The label of a logged step; one that this version does not know (an older or newer client's) is plainly an edit. */
+export const commandLabel = (id: string): string => (id in COMMAND_LABELS ? COMMAND_LABELS[id as CommandId] : (OTHER_LABELS[id] ?? 'Edit'));
 
 const SENTENCES: Readonly<Record<Reason, string>> = {
   'nothing-to-do': 'Nothing would change.',
@@ -53,6 +56,7 @@ const SENTENCES: Readonly<Record<Reason, string>> = {
   'no-free-place': 'No page has room for another mat of this size: make room, or use a smaller one.',
   'no-print-there': 'No print lies on that mat: place one first.',
   'not-for-prints': 'That works for mats with a print or none: place prints and make panes with their own actions.',
+  'content-does-not-fit': 'That is empty or too long for one mat: write something shorter, or use two mats.',
   'has-an-up': 'This print has an up, so it stays upright: mark it "no up" if it may be turned.',
   'not-digital': 'A printed photo keeps its size: only a digital photo can be scaled.',
   'is-whole': 'This print is mounted whole: choose "trimmed" first.',
