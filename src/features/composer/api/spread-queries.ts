@@ -1,7 +1,7 @@
 import { queryOptions } from '@tanstack/react-query';
 import { spreadDetailSchema } from '#shared/contracts/albums';
 import { jobSchema, type CreateExport, type Job } from '#shared/contracts/exports';
-import { postEditsResponseSchema, type PostEdits, type PostEditsResponse } from '#shared/contracts/edits';
+import { editListSchema, postEditsResponseSchema, type LoggedEdit, type PostEdits, type PostEditsResponse } from '#shared/contracts/edits';
 import { api, type RequestOptions } from '@/lib/api';
 
 /** All that Compose needs of one spread. Never refetched by itself: while open, the editor's store is the truth. */
@@ -28,3 +28,12 @@ export const jobQuery = (jobId: string | null) =>
     enabled: jobId !== null,
     refetchInterval: ({ state }) => (state.data?.state === 'done' || state.data?.state === 'failed' ? false : 400),
   });
+
+const LOG_PAGE = 500;
+
+/** The whole log after a revision, in order. */
+export async function getEdits(spreadId: string, afterRevision: number): Promise<readonly LoggedEdit[]> {
+  const { edits } = await api.get(`/spreads/${spreadId}/edits?after=${afterRevision}&limit=${LOG_PAGE}`, editListSchema);
+  const last = edits.at(-1);
+  return last && edits.length === LOG_PAGE ? [...edits, ...(await getEdits(spreadId, last.revision))] : edits;
+}

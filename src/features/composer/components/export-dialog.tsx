@@ -14,6 +14,7 @@ import { useComposer, useComposerStore } from '@/features/composer/hooks/compose
 type Size = CreateExport['size'];
 type Format = CreateExport['format'];
 
+const NOT_SAVED = 'Your latest changes could not be saved, and the server draws only what is saved. Try again when the bar says Saved.';
 const FORMAT_WORDS: Record<Format, string> = { png: 'PNG, exact', jpeg: 'JPEG, smaller file' };
 
 /** Pixel size of an export. */
@@ -33,8 +34,9 @@ export function ExportDialog({ spreadId, onClose }: { spreadId: string; onClose:
   const [format, setFormat] = useState<Format>('png');
   const start = useMutation({
     mutationFn: async () => {
-      const revision = await store.getState().flush();
-      return startExport(spreadId, { id: newId(), size, format, revision });
+      const { flush, savedRevision } = store.getState();
+      if (!(await flush())) throw new ApiError({ code: 'unavailable', status: 0, detail: NOT_SAVED });
+      return startExport(spreadId, { id: newId(), size, format, revision: savedRevision() });
     },
   });
   const job = useQuery(jobQuery(start.data?.id ?? null)).data ?? start.data;

@@ -1,5 +1,7 @@
 import { memo } from 'react';
 import type { SketchMat } from '#shared/commands/calls';
+import { describeSketch } from '#shared/sketches/features';
+import type { Sketch } from '#shared/sketches/sketch';
 import { cellRect, gridOf, matRect } from '#shared/geometry/grid';
 import type { PageFormat } from '#shared/model/page-format';
 
@@ -21,5 +23,23 @@ export const SketchPicture = memo(function SketchPicture({ format, mats }: Sketc
         return <rect key={i} {...rect} className={`sketch-mat ${kind}`} />;
       })}
     </svg>
+  );
+});
+
+interface SketchCardProps {
+  readonly sketch: Sketch;
+  readonly format: PageFormat;
+  readonly isChosen: boolean;
+  readonly onChoose: () => void;
+}
+
+/** A sketch to press: its diagram, its plain description, its name. */
+export const SketchCard = memo(function SketchCard({ sketch, format, isChosen, onChoose }: SketchCardProps) {
+  return (
+    <button type="button" className="sketch" aria-pressed={isChosen} onClick={onChoose}>
+      <SketchPicture format={format} mats={sketch.mats} />
+      <b>{sketch.name}</b>
+      <span>{describeSketch(sketch, format)}</span>
+    </button>
   );
 });

@@ -77,7 +77,6 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
       </div>
       <div className="spread" style={size} onDoubleClick={(event) => isEditable && addMatAt(event, store.getState(), perInch)} onPointerDown={(event) => event.target === event.currentTarget && store.getState().select([])}>
         <SceneDrawing scene={scene} pictureSize="medium" underlay={<Grids doc={doc} />} />
-        <i className="gutter" style={{ left: doc.format.width * scale }} aria-hidden="true" />
         {inReadingOrder(doc.mats).map((mat) => (
           <MatControl
             key={mat.id}

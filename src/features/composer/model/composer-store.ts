@@ -61,6 +61,8 @@ export interface ComposerState {
   readonly putPrints: (prints: readonly Print[]) => void;
   /** Saves now. @returns whether everything is saved. */
   readonly flush: () => Promise<boolean>;
+  /** The server's revision that holds everything saved so far. */
+  readonly savedRevision: () => number;
   readonly describeConflict: () => ConflictView | null;
   readonly resolveConflict: (choice: 'mine' | 'theirs') => void;
   /** @returns whether the draft was taken over; false where the server could not be asked. */
@@ -239,6 +241,7 @@ export function createComposerStore(detail: SpreadDetail, deps: ComposerDeps): C
     select: (matIds) => set({ selection: matIds.filter((id) => get().doc.mats.some((mat) => mat.id === id)) }),
     putPrints: (prints) => set({ prints: new Map([...get().prints, ...prints.map((print) => [print.id, print] as const)]) }),
     flush: autosave.flush,
+    savedRevision: () => autosave.getBase().revision,
     describeConflict: view,
     resolveConflict: resolve,
     applyDraft,
