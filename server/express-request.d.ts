@@ -12,3 +12,10 @@ declare global {
     }
   }
 }
+
+declare module 'express-session' {
+  interface SessionData {
+    /** What passport keeps: the account's id. */
+    passport?: { user?: string };
+  }
+}

@@ -20,11 +20,11 @@ export interface MultipartBody {
   readonly files: readonly string[];
 }
 
-type DeepReadonly<T> = T extends (infer U)[]
-  ? readonly DeepReadonly<U>[]
-  : T extends object
-    ? { readonly [K in keyof T]: DeepReadonly<T[K]> }
-    : T;
+type DeepReadonly<T> = T extends string | number | boolean | null | undefined
+  ? T
+  : T extends readonly (infer U)[]
+    ? readonly DeepReadonly<U>[]
+    : { readonly [K in keyof T]: DeepReadonly<T[K]> };
 
 type Output<T> = T extends z.ZodType ? z.output<T> : undefined;
 type AnswerBody<A> = A extends { readonly schema: infer S extends z.ZodType } ? DeepReadonly<z.output<S>> : void;

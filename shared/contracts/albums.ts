@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import type { SpreadDocument } from '../model/spread';
 import { idSchema, instantSchema, lineSchema, revisionSchema } from './common';
 import { bindingSchema, documentSchema, pageFormatSchema } from './document';
 import { printSchema } from './prints';
@@ -52,7 +53,7 @@ export const spreadSummarySchema = z.object({
   revision: revisionSchema,
   updatedAt: instantSchema,
   binned: z.boolean(),
-  document: documentSchema,
+  document: documentSchema as z.ZodType<SpreadDocument>,
 });
 export type SpreadSummary = z.infer<typeof spreadSummarySchema>;
 

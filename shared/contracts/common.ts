@@ -1,7 +1,8 @@
 import { z } from 'zod';
 import { ERROR_CODES } from '../errors';
 
-export const idSchema = z.uuid();
+/** A UUID; small digits, so that two spellings are one id. */
+export const idSchema = z.uuid().toLowerCase();
 export const hexSchema = z.string().regex(/^#[0-9a-f]{6}$/, 'a colour is # and six small hexadecimal digits');
 /** A length that a thing can have: above nothing, and under 10 m. */
 export const sizeSchema = z.int().positive().max(1_600_000);

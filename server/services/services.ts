@@ -1,0 +1,70 @@
+import type { DataSource } from 'typeorm';
+import type { Config } from '../config';
+import type { ExportPool, IntakePool } from '../images/pools';
+import type { Incoming } from '../storage/incoming';
+import type { Storage } from '../storage/storage';
+import { AccountService } from './account-service';
+import { AlbumService } from './album-service';
+import { CutSizeService } from './cut-size-service';
+import { EditService } from './edit-service';
+import { ExportService } from './export-service';
+import { FormatService } from './format-service';
+import { GrantService } from './grant-service';
+import { JobService } from './job-service';
+import { PileService } from './pile-service';
+import { PrintService } from './print-service';
+import { createReceiveUpload, type ReceiveUpload } from './receive-upload';
+import { SpreadService } from './spread-service';
+import { StudioService } from './studio-service';
+import { UploadService } from './upload-service';
+
+/** One service per noun, each made once. */
+export interface Services {
+  readonly accounts: AccountService;
+  readonly studios: StudioService;
+  readonly grants: GrantService;
+  readonly formats: FormatService;
+  readonly albums: AlbumService;
+  readonly spreads: SpreadService;
+  readonly edits: EditService;
+  readonly prints: PrintService;
+  readonly piles: PileService;
+  readonly cutSizes: CutSizeService;
+  readonly jobs: JobService;
+  readonly uploads: UploadService;
+  /** Reads the body of an upload to disk. */
+  readonly receive: ReceiveUpload;
+  readonly exports: ExportService;
+}
+
+export interface ServiceDeps {
+  readonly config: Config;
+  readonly dataSource: DataSource;
+  readonly storage: Storage;
+  readonly incoming: Incoming;
+  readonly intakePool: IntakePool;
+  readonly exportPool: ExportPool;
+  readonly now: () => Date;
+}
+
+export function createServices({ config, dataSource, storage, incoming, intakePool, exportPool, now }: ServiceDeps): Services {
+  const { freeDiskBytes, studioQuotaBytes } = config.limits;
+  const jobs = new JobService(dataSource, now);
+  const formats = new FormatService(dataSource, now);
+  return {
+    accounts: new AccountService({ dataSource, now, studioQuotaBytes }),
+    studios: new StudioService(dataSource),
+    grants: new GrantService(dataSource, now),
+    formats,
+    albums: new AlbumService(dataSource, formats, now),
+    spreads: new SpreadService(dataSource, now),
+    edits: new EditService(dataSource, now),
+    prints: new PrintService({ dataSource, storage, now }),
+    piles: new PileService(dataSource, now),
+    cutSizes: new CutSizeService(dataSource, now),
+    jobs,
+    uploads: new UploadService({ dataSource, storage, incoming, pool: intakePool, freeDiskBytes, now }),
+    receive: createReceiveUpload(incoming),
+    exports: new ExportService({ dataSource, storage, incoming, pool: exportPool, jobs, freeDiskBytes, now }),
+  };
+}
