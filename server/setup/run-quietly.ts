@@ -13,11 +13,25 @@ export function runQuietly(
 ): Promise<QuietRun> {
   return new Promise((resolve) => {
     let output = '';
-    const child = spawn(program, args, { ...options, stdio: ['ignore', 'pipe', 'pipe'] });
+    // A group of its own, so that a stop of this process ends the program's own children too.
+    const env = { ...process.env, NO_COLOR: '1' };
+    const child = spawn(program, args, { ...options, env, stdio: ['ignore', 'pipe', 'pipe'], detached: true });
+    const endGroup = (): void => {
+      try {
+        if (child.pid !== undefined) process.kill(-child.pid, 'SIGKILL');
+      } catch {
+        // It has ended by itself.
+      }
+    };
+    process.once('exit', endGroup);
+    const settle = (run: QuietRun): void => {
+      process.off('exit', endGroup);
+      resolve(run);
+    };
     const collect = (chunk: Buffer): void => void (output += chunk.toString());
     child.stdout.on('data', collect);
     child.stderr.on('data', collect);
-    child.on('error', (error) => resolve({ code: 1, output: output + error.message }));
-    child.on('close', (code) => resolve({ code: code ?? 1, output }));
+    child.on('error', (error) => settle({ code: 1, output: output + error.message }));
+    child.on('close', (code) => settle({ code: code ?? 1, output }));
   });
 }
