@@ -52,6 +52,8 @@ const changed = (change: (item: SceneItem) => SceneItem): Scene => ({ ...SCENE, 
 describe('a spread on the screen and as a picture', () => {
   it('look the same at 1200 px', async () => {
     expect(await looksAlike(SCENE)).toBe(true);
+    // No photo is still blank paper, or struck out.
+    await expect.poll(() => screen.page.locator('[data-state]').count()).toBe(0);
     expect(screen.faults).toEqual([]);
   });
 

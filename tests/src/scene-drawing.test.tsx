@@ -66,6 +66,13 @@ describe('SceneDrawing', () => {
     expect(matGroup(container, A)!.querySelectorAll('rect[fill="#ffffff"]')).toHaveLength(0);
   });
 
+  it('shows blank paper until the picture is there', () => {
+    const { container } = render(<SceneDrawing scene={sceneOf(A)} pictureSize="medium" />);
+    expect(matGroup(container, A)!.querySelectorAll('[data-state="photo-loading"]')).toHaveLength(1);
+    fireEvent.load(matGroup(container, A)!.querySelector('image')!);
+    expect(matGroup(container, A)!.querySelectorAll('[data-state="photo-loading"]')).toHaveLength(0);
+  });
+
   it('strikes the paper out where a picture cannot be had, and asks again for another size', () => {
     const { container, rerender } = render(<SceneDrawing scene={sceneOf(A)} pictureSize="medium" />);
     fireEvent.error(matGroup(container, A)!.querySelector('image')!);

@@ -8,6 +8,9 @@ import { PHOTO_PAPER, pictureCover, type PictureCover } from '#shared/scene/pict
 import type { PhotoItem } from '#shared/scene/scene';
 import { onPixels } from './on-pixels';
 
+/** Blank paper, off white. */
+const BLANK = 'var(--color-paper-2, #f4f2ea)';
+
 interface PhotoDrawingProps {
   readonly photo: PhotoItem;
   readonly scale: number | null;
@@ -18,13 +21,19 @@ interface PhotoDrawingProps {
 export function PhotoDrawing({ photo, scale, pictureSize }: PhotoDrawingProps) {
   const href = pictureUrl(photo.printId, pictureSize);
   const [missing, setMissing] = useState<string | null>(null);
+  const [loaded, setLoaded] = useState<string | null>(null);
   const paper = onPixels(photo.rect, scale);
   if (missing === href) return <MissingPhoto rect={paper} />;
   const cover = pictureCover(photo);
+  // Until its picture is there, a photo is blank paper: a mat that carries one never looks bare.
+  const isBlank = cover !== null && loaded !== href;
   return (
     <>
       {!cover?.isWhole && <rect {...paper} fill={PHOTO_PAPER} shapeRendering="crispEdges" />}
-      {cover && <Picture photo={photo} cover={cover} scale={scale} href={href} onError={() => setMissing(href)} />}
+      {isBlank && <rect {...onPixels(cover.rect, scale)} fill={BLANK} data-state="photo-loading" shapeRendering="crispEdges" />}
+      {cover && (
+        <Picture photo={photo} cover={cover} scale={scale} href={href} onLoad={() => setLoaded(href)} onError={() => setMissing(href)} />
+      )}
     </>
   );
 }
@@ -34,10 +43,11 @@ interface PictureProps {
   readonly cover: PictureCover;
   readonly scale: number | null;
   readonly href: string;
+  readonly onLoad: () => void;
   readonly onError: () => void;
 }
 
-function Picture({ photo, cover, scale, href, onError }: PictureProps) {
+function Picture({ photo, cover, scale, href, onLoad, onError }: PictureProps) {
   const rect = onPixels(cover.rect, scale);
   const box = turnedSize(rect, inverseTurn(photo.turns));
   const { x, y, width, height } = cover.source;
@@ -45,7 +55,7 @@ function Picture({ photo, cover, scale, href, onError }: PictureProps) {
   return (
     <g transform={turnInto(rect, photo.turns)}>
       <svg width={box.width} height={box.height} viewBox={`${x} ${y} ${width} ${height}`} preserveAspectRatio="none">
-        <image href={href} width={photo.imageWidth} height={photo.imageHeight} preserveAspectRatio="none" onError={onError} />
+        <image href={href} width={photo.imageWidth} height={photo.imageHeight} preserveAspectRatio="none" onLoad={onLoad} onError={onError} />
       </svg>
     </g>
   );
@@ -70,8 +80,8 @@ function MissingPhoto({ rect }: { readonly rect: Rect }) {
   const { x, y, width, height } = rect;
   return (
     <g data-state="photo-missing">
-      <rect {...rect} fill="var(--paper-2, #f4f2ea)" />
-      <path d={`M${x} ${y + height}l${width} ${-height}`} stroke="var(--ink-3, #565b66)" strokeWidth={1} vectorEffect="non-scaling-stroke" />
+      <rect {...rect} fill={BLANK} />
+      <path d={`M${x} ${y + height}l${width} ${-height}`} stroke="var(--color-ink-3, #565b66)" strokeWidth={1} vectorEffect="non-scaling-stroke" />
     </g>
   );
 }
