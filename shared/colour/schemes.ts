@@ -147,19 +147,30 @@ const isColored = ({ oklch: [, chroma] }: PhotoColor): boolean => chroma >= NEUT
 
 /** Hues this near count as one family, so that light and dark of one colour speak together. */
 const SAME_FAMILY = 28;
+/** A colour that runs through so many prints ties the spread together; one print's own colour counts less. */
+const TYING_PRINTS = 4;
 /** A colour whose tone must be moved far to become card is not the colour any more. */
-const TONE_SHIFT_COST = 1.6;
+const TONE_SHIFT_COST = 2;
+/** Yellows turn to mud when they are darkened to a main card's tone; sea, leaf and brick do not. Our own judgement. */
+const MUDDY = { hue: [55, 120], factor: 0.4 } as const;
 
-/** How well a photo colour serves for large mats of a tone: its family is seen a lot, it is coloured, near that tone, and not skin. */
+/**
+ * How well a photo colour serves for large mats of a tone: its family is seen a lot
+ * and in several prints, it is coloured, near that tone, and neither skin nor mud.
+ */
 function cardScore(colors: readonly PhotoColor[], tone: readonly [number, number]): (color: PhotoColor) => number {
   return (color) => {
     const [l, c, h] = color.oklch;
     if (!isColored(color) || color.weight < MIN_CARD_SHARE) return 0;
     const family = colors.filter((other) => isColored(other) && hueDistance(other.oklch[2], h) < SAME_FAMILY);
     const seen = family.reduce((sum, { weight }) => sum + weight, color.weight);
+    const sources = new Set([...family, color].flatMap(({ printIds }) => printIds)).size;
+    const ties = (1 + Math.min(sources, TYING_PRINTS)) / (1 + TYING_PRINTS);
     const shift = Math.abs(l - hold(l, tone));
+    const isMuddy = tone === MAIN_TONE && within(h, MUDDY.hue);
     const isSkin = within(h, SKIN.hue) && within(c, SKIN.chroma) && within(l, SKIN.lightness);
-    return seen * (0.35 + Math.min(c, 0.12) / 0.12) * Math.max(0.25, 1 - shift * TONE_SHIFT_COST) * (isSkin ? SKIN_FACTOR : 1);
+    const suits = Math.max(0.25, 1 - shift * TONE_SHIFT_COST) * (isSkin ? SKIN_FACTOR : 1) * (isMuddy ? MUDDY.factor : 1);
+    return seen * ties * (0.35 + Math.min(c, 0.12) / 0.12) * suits;
   };
 }
 
