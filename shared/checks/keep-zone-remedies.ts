@@ -58,34 +58,48 @@ export const cardOf = ({ doc }: SpreadView, mat: Mat): Rect => innerMatRect(doc.
 
 function largerMat(view: SpreadView, piece: Piece, needed: Rect): Remedy[] {
   const mat = piece.groupId === null ? view.matById.get(piece.matIds[0]!) : undefined;
-  return mat ? growMat(view, mat, missingOnPage(piece, needed, view.trim.finestMark)) : [];
+  return mat ? missingOnPage(piece, needed, view.trim.finestMark).flatMap((missing) => growMat(view, mat, missing)) : [];
 }
 
-/** By how much the window is too small to hold what it should from a place on the mark, as it lies on the page; never negative. */
-function missingOnPage({ window, placement }: Piece, needed: Rect, mark: Length): Size {
-  const missing = (at: number, length: number, start: number, needs: number, origin: number): number =>
-    slideBy(at, length, start, needs, origin, mark) === null ? needs + mark - 1 - length : 0;
-  return turnedSize(
-    {
-      width: missing(window.x, window.width, needed.x, needed.width, placement.x),
-      height: missing(window.y, window.height, needed.y, needed.height, placement.y),
-    },
-    placement.turn,
+/**
+ * By how much the photo is too small on the page, never negative; two answers, since a window whose photo
+ * grows is centred anew where it was centred on the keep zone, and keeps its centre where somebody slid it.
+ */
+function missingOnPage({ window, placement }: Piece, needed: Rect, mark: Length): readonly Size[] {
+  const onMark = (at: number, length: number, start: number, needs: number, origin: number): number => {
+    if (slideBy(at, length, start, needs, origin, mark) !== null) return 0;
+    const shift = at - origin;
+    const corner = Math.floor((start - shift) / mark) * mark + shift;
+    return Math.max(0, start + needs - corner - length);
+  };
+  // The centre is kept only to the nearest mark.
+  const aroundCentre = (at: number, length: number, start: number, needs: number): number =>
+    Math.max(0, 2 * (Math.max(at - start, start + needs - at - length) + mark / 2));
+  return [onMark, aroundCentre].map((missing) =>
+    turnedSize(
+      {
+        width: missing(window.x, window.width, needed.x, needed.width, placement.x),
+        height: missing(window.y, window.height, needed.y, needed.height, placement.y),
+      },
+      placement.turn,
+    ),
   );
 }
 
 function lessReveal(view: SpreadView, piece: Piece, needed: Rect): Remedy[] {
-  const { doc } = view;
   const mat = view.matById.get(piece.matIds[0]!);
   if (!mat) return [];
-  const reveal = revealOf(mat, doc.reveal);
-  const missing = missingOnPage(piece, needed, view.trim.finestMark);
-  // A reveal gives way on both sides of the photo.
-  const thinner = Math.floor((reveal - Math.max(missing.width, missing.height) / 2) / view.trim.finestMark) * view.trim.finestMark;
-  const least = Math.max(MIN_REVEAL, thinner);
+  const reveal = revealOf(mat, view.doc.reveal);
+  const mark = view.trim.finestMark;
+  // A reveal gives way on both sides of the photo; it is measured on the mark as well.
+  const enough = missingOnPage(piece, needed, mark).map(({ width, height }) => Math.floor((reveal - Math.max(width, height) / 2) / mark) * mark);
+  const thinner = [...new Set(enough.filter((least) => least >= MIN_REVEAL && least < reveal))];
+  const matIds = groupOf(view, piece, mat);
   const none: Remedy = { messageId: 'no-reveal', data: {}, call: { id: 'mats.setReveal', args: { matIds: piece.matIds, reveal: 0 } } };
-  const less: Remedy = { messageId: 'thinner-reveal', data: { reveal: least }, call: { id: 'mats.setReveal', args: { matIds: groupOf(view, piece, mat), reveal: least } } };
-  return [...(reveal > 0 ? [none] : []), ...(reveal > least ? [less] : [])];
+  return [
+    ...(reveal > 0 && Math.max(...enough) >= 0 ? [none] : []),
+    ...thinner.map((least): Remedy => ({ messageId: 'thinner-reveal', data: { reveal: least }, call: { id: 'mats.setReveal', args: { matIds, reveal: least } } })),
+  ];
 }
 
 /** Mats that should keep one reveal: the panes of a split print, the strip or pinwheel that a mat belongs to, or itself. */

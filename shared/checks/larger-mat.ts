@@ -18,24 +18,27 @@ export function growMat(view: SpreadView, mat: Mat, missing: Size): Remedy[] {
   return place ? [{ messageId: 'larger-mat', data: {}, call: { id: 'mats.resize', args: { matId: mat.id, ...place, w, h } } }] : [];
 }
 
-/** Free cells of that size which include the mat's own: the most even growth first, then upward and leftward. */
+/** Free cells of that size which include the mat's own: the most even growth first, then leftward and upward. */
 function roomFor(view: SpreadView, mat: Mat, w: number, h: number): { x: number; y: number } | null {
   const grid = gridOf(view.doc.format);
   if (w > grid.columns || h > grid.rows) return null;
-  const others = view.doc.mats.filter((other) => other.page === mat.page && other.id !== mat.id && !other.laidOver);
-  const isFree = (x: number, y: number): boolean =>
-    x >= 0 &&
-    y >= 0 &&
-    x + w <= grid.columns &&
-    y + h <= grid.rows &&
-    (mat.laidOver || others.every((other) => x >= other.x + other.w || other.x >= x + w || y >= other.y + other.h || other.y >= y + h));
-  const corners: { x: number; y: number; uneven: number }[] = [];
-  for (let dx = 0; dx <= w - mat.w; dx += 1) {
-    for (let dy = 0; dy <= h - mat.h; dy += 1) {
-      const uneven = Math.abs(w - mat.w - 2 * dx) + Math.abs(h - mat.h - 2 * dy);
-      corners.push({ x: mat.x - dx, y: mat.y - dy, uneven });
+  const spareX = w - mat.w;
+  const spareY = h - mat.h;
+  const reach = { x: mat.x - spareX, y: mat.y - spareY, w: w + spareX, h: h + spareY };
+  const inTheWay = mat.laidOver ? [] : view.doc.mats.filter((other) => other.page === mat.page && other.id !== mat.id && !other.laidOver && shareCells(other, reach));
+  let best: { x: number; y: number } | null = null;
+  let least = Infinity;
+  for (let x = Math.max(0, reach.x); x <= Math.min(mat.x, grid.columns - w); x += 1) {
+    for (let y = Math.max(0, reach.y); y <= Math.min(mat.y, grid.rows - h); y += 1) {
+      const uneven = Math.abs(spareX - 2 * (mat.x - x)) + Math.abs(spareY - 2 * (mat.y - y));
+      if (uneven >= least || inTheWay.some((other) => shareCells(other, { x, y, w, h }))) continue;
+      best = { x, y };
+      least = uneven;
     }
   }
-  const found = corners.sort((a, b) => a.uneven - b.uneven).find(({ x, y }) => isFree(x, y));
-  return found ? { x: found.x, y: found.y } : null;
+  return best;
 }
+
+type Cells = Pick<Mat, 'x' | 'y' | 'w' | 'h'>;
+
+const shareCells = (a: Cells, b: Cells): boolean => a.x < b.x + b.w && b.x < a.x + a.w && a.y < b.y + b.h && b.y < a.y + a.h;

@@ -20,9 +20,8 @@ const SEVERITY_ORDER: Readonly<Record<Severity, number>> = { stop: 0, fix: 1, co
  * to right; a note about no mat before all others). At most one note per cause: a finding falls out where a
  * check that it yields to speaks of one of the same mats. Each remedy has been tried and makes no new stop.
  */
-export function runChecks(view: SpreadView, settings: CheckSettings = {}): Note[] {
-  const checks = CHECK_IDS.filter((id) => !settings.muted?.has(id)).map((id): SetCheck => [CHECKS[id], settings.thresholds?.[id]]);
-  const stopChecks = checks.filter(([check]) => check.severity === 'stop');
+export function runChecks(view: SpreadView, settings: CheckSettings = NO_SETTINGS): Note[] {
+  const { checks, stopChecks } = checksFor(settings);
   const found = new Map<CheckId, readonly Finding[]>();
   for (const [check, set] of checks) {
     const isSilent = check.needsFilledPages && !areFilled(view);
@@ -38,6 +37,25 @@ export function runChecks(view: SpreadView, settings: CheckSettings = {}): Note[
     })
     .sort((a, b) => compareNotes(a, b))
     .map(({ note }) => note);
+}
+
+const NO_SETTINGS: CheckSettings = {};
+
+interface SetChecks {
+  readonly checks: readonly SetCheck[];
+  readonly stopChecks: readonly SetCheck[];
+}
+const known = new WeakMap<CheckSettings, SetChecks>();
+
+/** A muted stop still counts when a remedy is tried: nobody wants a cure that spoils something. */
+function checksFor(settings: CheckSettings): SetChecks {
+  let set = known.get(settings);
+  if (!set) {
+    const all = CHECK_IDS.map((id): SetCheck => [CHECKS[id], settings.thresholds?.[id]]);
+    set = { checks: all.filter(([check]) => !settings.muted?.has(check.id)), stopChecks: all.filter(([check]) => check.severity === 'stop') };
+    known.set(settings, set);
+  }
+  return set;
 }
 
 function noteOf(view: SpreadView, stopChecks: readonly SetCheck[], check: Check, finding: Finding): Note {
