@@ -52,8 +52,27 @@ describe('every command', () => {
           doc = next;
         }
       }),
-      { numRuns: 1500 },
+      { numRuns: 800 },
     );
+  }, 60_000);
+
+  it('leaves no fault behind a split and the merge that takes it back', () => {
+    let merges = 0;
+    fc.assert(
+      fc.property(spreads, fc.nat(13), fc.integer({ min: 1, max: 3 }), fc.integer({ min: 1, max: 3 }), (doc, at, columns, rows) => {
+        const mat = doc.mats[at];
+        if (!mat || mat.laidOver) return;
+        const context = newContext();
+        const pieces = applyPatch(doc, runCommand(doc, { id: 'mats.split', args: { matId: mat.id, columns, rows } }, context));
+        const ids = pieces.mats.filter(({ id }) => id === mat.id || !doc.mats.some((old) => old.id === id)).map(({ id }) => id);
+        const merged = applyPatch(pieces, runCommand(pieces, { id: 'mats.merge', args: { matIds: ids } }, context));
+        expect(findDocumentFaults(merged)).toEqual([]);
+        expect(merged.mats.map(({ page, x, y, w, h }) => [page, x, y, w, h]).sort()).toEqual(doc.mats.map(({ page, x, y, w, h }) => [page, x, y, w, h]).sort());
+        merges += ids.length > 1 ? 1 : 0;
+      }),
+      { numRuns: 400 },
+    );
+    expect(merges).toBeGreaterThan(10);
   });
 
   it('gives a reason exactly where it does nothing', () => {
@@ -92,7 +111,7 @@ describe('every command', () => {
           if (shown.height <= paper.height) expect(placement.y >= 0 && placement.y + shown.height <= paper.height).toBe(true);
         }
       }),
-      { numRuns: 800 },
+      { numRuns: 500 },
     );
   });
 
