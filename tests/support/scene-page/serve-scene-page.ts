@@ -7,6 +7,7 @@ import { fileURLToPath } from 'node:url';
 import react from '@vitejs/plugin-react';
 import sharp from 'sharp';
 import { build } from 'vite';
+import { WEBP_OPTIONS } from '#server/images/intake';
 import { PICTURE_SIZES, type PictureSize } from '#shared/contracts/prints';
 
 const TYPES: Readonly<Record<string, string>> = { '.html': 'text/html', '.js': 'text/javascript', '.css': 'text/css', '.woff2': 'font/woff2' };
@@ -54,8 +55,8 @@ async function answer(path: string, folder: string, pictures: ReadonlyMap<string
     const side = PICTURE_SIZES[size as PictureSize];
     const file = pictures.get(printId);
     if (!file) throw new RangeError(`no picture of print ${printId}`);
-    const data = await sharp(file).autoOrient().resize(side, side, { fit: 'inside', withoutEnlargement: true }).jpeg({ quality: 86 }).toBuffer();
-    return { type: 'image/jpeg', data };
+    const data = await sharp(file).autoOrient().resize(side, side, { fit: 'inside', withoutEnlargement: true }).webp(WEBP_OPTIONS).toBuffer();
+    return { type: 'image/webp', data };
   }
   const name = path === '/' ? 'index.html' : path.slice(1);
   return { type: TYPES[extname(name)] ?? 'application/octet-stream', data: await readFile(join(folder, name)) };
