@@ -19,6 +19,9 @@ const signIn = (url: string, account: { email: string; password: string }): Prom
     body: JSON.stringify({ email: account.email, password: account.password }),
   });
 
+/** Without the demo, which takes its time to load. */
+const BARE = { PAIRLEAF_MODE: 'production' };
+
 describe('npm start', () => {
   const apps: AppProcess[] = [];
   const folders: string[] = [];
@@ -49,8 +52,8 @@ describe('npm start', () => {
     await expect(fetch(app.url)).rejects.toThrow();
   });
 
-  it('keeps everything when app and database are killed', async () => {
-    const first = await start();
+  it('keeps everything when app and database are killed at once', async () => {
+    const first = await start({ env: BARE });
     const person = { email: 'lore@mill.example', password: 'a-long-enough-password' };
     const signUp = await fetch(`${first.url}/api/accounts`, {
       method: 'POST',
@@ -59,15 +62,14 @@ describe('npm start', () => {
     });
     expect(signUp.ok).toBe(true);
     await first.kill();
-    const second = await start({ dataDir: first.dataDir });
+    const second = await start({ dataDir: first.dataDir }); // a demo now, but the demo is for empty databases only
     expect((await signIn(second.url, person)).status).toBe(200);
-    // The demo is loaded into an empty database only.
     expect(second.output()).not.toContain('Loading the demo');
   });
 
   it('refuses a second start over the same data, and leaves the first one alone', async () => {
-    const first = await start();
-    await expect(startApp({ dataDir: first.dataDir })).rejects.toThrow(/already running/);
+    const first = await start({ env: BARE });
+    await expect(startApp({ dataDir: first.dataDir, env: BARE })).rejects.toThrow(/already running/);
     expect((await fetch(`${first.url}/api/health`)).status).toBe(200);
   });
 
@@ -89,7 +91,7 @@ describe('npm start', () => {
   });
 
   it('has no demo accounts in production', async () => {
-    const app = await start({ env: { PAIRLEAF_MODE: 'production' } });
+    const app = await start({ env: BARE });
     expect((await signIn(app.url, owner)).status).toBe(401);
     expect(app.output()).not.toContain(owner.password);
   });
@@ -105,13 +107,14 @@ describe('npm start', () => {
 
   it('ends cleanly when it is stopped while starting', async () => {
     const folder = await emptyFolder();
+    const env = { ...process.env, ...BARE, PORT: String(await findFreePort()), DATA_DIR: folder };
     const child = spawn(process.execPath, ['--import', 'tsx', 'server/setup/start.ts'], {
-      env: { ...process.env, PORT: String(await findFreePort()), DATA_DIR: folder },
+      env,
       stdio: ['ignore', 'pipe', 'inherit'],
     });
     await once(child.stdout, 'data'); // its first step
     child.kill('SIGTERM');
     expect(await once(child, 'exit')).toEqual([0, null]);
-    await start({ dataDir: folder });
+    await start({ dataDir: folder, env: BARE });
   });
 });

@@ -1,7 +1,7 @@
 import type { ChildProcess } from 'node:child_process';
 import { spawn } from 'node:child_process';
 import { once } from 'node:events';
-import { mkdtemp, rm } from 'node:fs/promises';
+import { mkdtemp, readFile, rm } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
@@ -69,7 +69,11 @@ export async function startApp({ dataDir, env = {} }: AppOptions = {}): Promise<
     pid: child.pid ?? 0,
     output: () => output,
     interrupt: () => end('SIGINT'),
-    kill: async () => void (await end('SIGKILL')),
+    kill: async () => {
+      const { databasePid } = JSON.parse(await readFile(join(folder, 'in-use.json'), 'utf8')) as { databasePid: number };
+      process.kill(databasePid, 'SIGKILL');
+      await end('SIGKILL');
+    },
     remove: async () => {
       await end('SIGTERM');
       await rm(folder, { recursive: true, force: true });
