@@ -1,5 +1,5 @@
 import { useSuspenseQuery } from '@tanstack/react-query';
-import { useState, type CSSProperties } from 'react';
+import { useState } from 'react';
 import { Link, useNavigate } from 'react-router-dom';
 import type { Studio } from '#shared/contracts/accounts';
 import { Button } from '@/components/button';
@@ -14,7 +14,7 @@ export function AlbumShelf({ studio }: { readonly studio: Studio }) {
   const mayEdit = useMay()('album:edit', { studioId: studio.id });
   const navigate = useNavigate();
   const [isMaking, setIsMaking] = useState(false);
-  const tallest = Math.max(1, ...albums.map(({ format }) => format.height));
+  const widest = Math.max(1, ...albums.map(({ format }) => format.width));
   return (
     <>
       <div className="flex min-h-[76px] flex-wrap items-center gap-x-5 gap-y-1 pt-3 pb-3 sm:pt-4">
@@ -47,7 +47,7 @@ export function AlbumShelf({ studio }: { readonly studio: Studio }) {
               <div
                 className="album-cover"
                 aria-hidden="true"
-                style={{ '--cover-height': format.height / tallest, aspectRatio: `${format.width} / ${format.height}` } as CSSProperties}
+                style={{ width: `${(format.width / widest) * 100}%`, aspectRatio: `${format.width} / ${format.height}` }}
               >
                 <span>{title}</span>
               </div>

@@ -39,7 +39,7 @@ export function KeepZoneEditor({ zone, paper, unit, pxPerLength, step, mayEdit, 
 
   const pointOf = (event: PointerEvent): { x: number; y: number } => {
     const box = event.currentTarget.closest('[data-paper]')!.getBoundingClientRect();
-    return { x: (event.clientX - box.left) / pxPerLength, y: (event.clientY - box.top) / pxPerLength };
+    return { x: Math.round((event.clientX - box.left) / pxPerLength), y: Math.round((event.clientY - box.top) / pxPerLength) };
   };
   const begin = (event: PointerEvent, handle: Handle | null): void => {
     if (!mayEdit || event.button !== 0) return;

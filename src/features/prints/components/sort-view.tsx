@@ -1,6 +1,6 @@
 import { DndContext, DragOverlay } from '@dnd-kit/core';
 import { useSuspenseQuery } from '@tanstack/react-query';
-import { useCallback, useMemo, useState } from 'react';
+import { useCallback, useEffect, useMemo, useRef, useState } from 'react';
 import { Button } from '@/components/button';
 import { useAnnounce } from '@/components/live-region';
 import { NameDialog } from '@/components/name-dialog';
@@ -72,6 +72,12 @@ export function SortView({ studioId, sizing, mayEdit, mayDelete, onTable, setOnT
   const takeFiles = useCallback((files: readonly File[]) => void (mayEdit && files.length > 0 && add(files, null)), [mayEdit, add]);
   const isDropping = useFileDrop(takeFiles);
 
+  // Where the panel stands under the table, an opened print would be out of sight.
+  const panel = useRef<HTMLDivElement>(null);
+  useEffect(() => {
+    if (openId !== null && window.matchMedia('(width < 64rem)').matches) panel.current?.scrollIntoView();
+  }, [openId]);
+
   const opened = prints.find(({ id }) => id === openId) ?? null;
   const held = prints.find(({ id }) => id === heldId) ?? null;
   const shown = groups.filter(({ id, prints: lying }) => id !== null || lying.length > 0);
@@ -134,7 +140,7 @@ export function SortView({ studioId, sizing, mayEdit, mayDelete, onTable, setOnT
           </p>
         )}
       </div>
-      <div className="sort-panel">
+      <div ref={panel} className="sort-panel">
         {opened === null ? (
           <EmptyLine>{prints.length === 0 ? 'A print shows here large, with its size and marks.' : 'Press a print to see it large, and to set its size, keep zone and marks.'}</EmptyLine>
         ) : (
@@ -159,7 +165,7 @@ function ChooseAll({ group, onTable, setOnTable }: { readonly group: { readonly 
   return (
     <button type="button" className="link-button text-12 text-ink-2" onClick={() => setOnTable?.(ids, !areAllOn)}>
       {areAllOn ? 'Put all away' : 'Choose all'}
-      <span className="visually-hidden"> of {group.name}</span>
+      {' '}<span className="visually-hidden">of {group.name}</span>
     </button>
   );
 }

@@ -13,7 +13,7 @@ interface DemoAccountsProps {
 export function DemoAccounts({ accounts, onChoose }: DemoAccountsProps) {
   if (accounts.length === 0) return null;
   return (
-    <section className="mt-4 border-t border-rule pt-3" aria-label="Demo accounts">
+    <section className="mt-3 border-t border-rule pt-2" aria-label="Demo accounts">
       <h2 className="text-13 font-sans! text-ink-2">This is a demo. Come in as</h2>
       <ul className="-ml-[9px] flex flex-wrap gap-x-1">
         {accounts.map((account) => (

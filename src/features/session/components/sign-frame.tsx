@@ -29,7 +29,7 @@ export function SignFrame({ title, children }: { readonly title: ReactNode; read
         <SamplePage />
         <div className="sample-page sample-grid">
           <div className="sample-form">
-            <h1 className="mb-[22px] text-28">{title}</h1>
+            <h1 className="mb-[18px] text-28">{title}</h1>
             {children}
           </div>
         </div>

@@ -72,7 +72,7 @@ export function SignInForm() {
           }}
         />
       )}
-      <p className="mt-auto pt-4 text-12 text-ink-2">
+      <p className="mt-auto pt-2 text-12 text-ink-2">
         New here?{' '}
         <Link to="/sign-up" className="underline">
           Start a studio
