@@ -66,7 +66,7 @@ export async function openApp(config: Config, options: OpenOptions = {}): Promis
   const runner = startJobRunner({ dataSource, handlers, log, now });
   services.jobs.whenEnqueued(runner.wake);
   const prune = (): void => {
-    Promise.all([sessionStore.prune(), pruneLimits(deps)]).catch((error: unknown) => log.warn({ err: error }, 'could not prune'));
+    Promise.all([sessionStore.prune(), pruneLimits(deps), services.exports.dropExpired()]).catch((error: unknown) => log.warn({ err: error }, 'could not prune'));
   };
   const pruning = setInterval(prune, PRUNE_EVERY_MS);
   pruning.unref();

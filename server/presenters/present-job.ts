@@ -8,6 +8,6 @@ export const presentJob = (job: JobEntity): Job => ({
   state: job.state,
   progress: job.progress,
   failure: job.failure ? errorSentence(job.failure.code, job.failure.data) : null,
-  resultUrl: job.state === 'done' ? `/api/jobs/${job.id}/file` : null,
+  resultUrl: job.state === 'done' && job.result !== null ? `/api/jobs/${job.id}/file` : null,
   createdAt: job.createdAt.toISOString(),
 });

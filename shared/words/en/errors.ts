@@ -1,6 +1,7 @@
 import type { ErrorCode, ErrorData } from '../../errors';
 import type { DocumentFault } from '../../model/document-faults';
 import { faultSentence } from './document';
+import { EXPORT_TOO_HEAVY } from './exports';
 import { fileTooLargeSentence, pictureRefusalSentence } from './pictures';
 
 interface Words {
@@ -73,7 +74,8 @@ const WORDS: Record<ErrorCode, Words> = {
   },
   unavailable: {
     title: 'Not available now',
-    sentence: () => 'This cannot be done at the moment, and nothing was changed: try again in a minute.',
+    sentence: ({ reason }) =>
+      reason === 'export-too-heavy' ? EXPORT_TOO_HEAVY : 'This cannot be done at the moment, and nothing was changed: try again in a minute.',
   },
   bug: {
     title: 'Our mistake',
