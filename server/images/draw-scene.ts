@@ -47,12 +47,11 @@ export async function drawScene(scene: Scene, { widthPx, loadPicture, concurrenc
 type FlatItem = Exclude<SceneItem, VectorItem | PhotoItem>;
 
 function paintFlat(canvas: Canvas, item: FlatItem, scale: number): void {
-  const px = toPixels(item.rect, scale);
   if (item.kind === 'rect') {
-    fillRect(canvas, px, item.fill, item.opacity);
+    fillRect(canvas, item.isLine ? lineToPixels(item.rect, scale) : toPixels(item.rect, scale), item.fill, item.opacity);
     return;
   }
-  for (const edge of frameEdges(px, thicknessToPixels(item.thickness, scale))) fillRect(canvas, edge, item.fill, item.opacity);
+  for (const edge of frameEdges(toPixels(item.rect, scale), thicknessToPixels(item.thickness, scale))) fillRect(canvas, edge, item.fill, item.opacity);
 }
 
 type PhotoLayers = AsyncGenerator<Awaited<ReturnType<typeof drawPhoto>>, void>;

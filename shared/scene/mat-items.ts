@@ -62,6 +62,7 @@ function carried(mat: Mat, photo: PhotoItem | null, rect: Rect): SceneItem[] {
         rect: rule,
         fill: content.color,
         opacity: RULE_OPACITY,
+        isLine: true,
       }));
       return [...ruled, ...textItems(mat, 'atkinson-italic', size, content.color, lines)];
     }

@@ -18,10 +18,12 @@ export function toPixels(rect: Rect, scale: number): Rect {
   };
 }
 
-/** As `toPixels`, but never thinner than one pixel: for lines. */
+/** For thin lines: equal ones come out equally thick, wherever they lie, and never thinner than one pixel. */
 export function lineToPixels(rect: Rect, scale: number): Rect {
   const px = toPixels(rect, scale);
-  return { ...px, width: Math.max(1, px.width), height: Math.max(1, px.height) };
+  return rect.width > rect.height
+    ? { ...px, height: thicknessToPixels(rect.height, scale) }
+    : { ...px, width: thicknessToPixels(rect.width, scale) };
 }
 
 /** A line of text stands on a whole pixel line, where browsers would put it anyway; its glyphs keep their places along it. */

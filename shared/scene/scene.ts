@@ -41,6 +41,8 @@ export interface RectItem extends ItemBase {
   readonly fill: Hex;
   /** 1 unless said. */
   readonly opacity?: number;
+  /** A thin line: never thinner than one pixel, and as thick as its like. */
+  readonly isLine?: boolean;
 }
 
 /** A line along the inside of a rectangle's four edges; never thinner than one pixel. */

@@ -3,7 +3,7 @@ import type { PictureSize } from '#shared/contracts/prints';
 import { drawAlike } from '#shared/scene/mat-groups';
 import { baselineOnPixels } from '#shared/scene/pixels';
 import type { FontId, SceneItem, TextItem } from '#shared/scene/scene';
-import { framePath, onPixels } from './on-pixels';
+import { framePath, lineOnPixels, onPixels } from './on-pixels';
 import { PhotoDrawing } from './photo-drawing';
 
 interface MatDrawingProps {
@@ -40,7 +40,7 @@ type ItemDrawingProps = Omit<MatDrawingProps, 'matId' | 'items'> & { readonly it
 function ItemDrawing({ item, scale, pictureSize, isMini }: ItemDrawingProps) {
   switch (item.kind) {
     case 'rect':
-      return <rect {...onPixels(item.rect, scale)} fill={item.fill} opacity={item.opacity} shapeRendering="crispEdges" />;
+      return <rect {...(item.isLine ? lineOnPixels : onPixels)(item.rect, scale)} fill={item.fill} opacity={item.opacity} shapeRendering="crispEdges" />;
     case 'frame':
       return isMini ? null : (
         <path d={framePath(item.rect, item.thickness, scale)} fill={item.fill} opacity={item.opacity} shapeRendering="crispEdges" />

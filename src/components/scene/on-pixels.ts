@@ -12,7 +12,7 @@ const toUnits = (px: Rect, scale: number): Rect => ({
 /** A rectangle with its edges on whole pixels, still in units; as it is where the scale is not known yet. */
 export const onPixels = (rect: Rect, scale: number | null): Rect => (scale === null ? rect : toUnits(toPixels(rect, scale), scale));
 
-/** As `onPixels`, but at least one pixel thick. */
+/** As `onPixels`, for thin lines: at least one pixel thick, and all alike. */
 export const lineOnPixels = (rect: Rect, scale: number | null): Rect => (scale === null ? rect : toUnits(lineToPixels(rect, scale), scale));
 
 /** The path of a frame's four edges on whole pixels, in units. */

@@ -25,6 +25,12 @@ describe('lines', () => {
     expect([thicknessToPixels(2, 0.01), thicknessToPixels(260, 0.01)]).toEqual([1, 3]);
   });
 
+  it('of one thickness come out alike wherever they lie', () => {
+    const heights = [0, 7, 33, 58, 91].map((y) => lineToPixels({ x: 0, y, width: 1000, height: 29 }, 0.05).height);
+    expect(heights).toEqual([1, 1, 1, 1, 1]);
+    expect(lineToPixels({ x: 130, y: 0, width: 29, height: 1000 }, 0.05)).toEqual({ x: 7, y: 0, width: 1, height: 50 });
+  });
+
   it('of text stand on a pixel line', () => {
     expect(baselineOnPixels(1234, 0.05)).toBeCloseTo(1240);
   });
