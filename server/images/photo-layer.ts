@@ -38,7 +38,8 @@ export async function drawPhoto(
 async function cutPicture(data: PictureData, photo: PhotoItem, cover: PictureCover, size: Size): Promise<Layer> {
   const { autoOrient: file } = await sharp(data).metadata();
   const onFile = scaleRect(cover.source, file.width / photo.imageWidth, file.height / photo.imageHeight);
-  const picture = sharp(data, { sequentialRead: true }).autoOrient();
+  // As strict as intake and no stricter: what was taken in must be drawn.
+  const picture = sharp(data, { sequentialRead: true, failOn: 'error' }).autoOrient();
   if (onFile.width < size.width * MUCH_LARGER || onFile.height < size.height * MUCH_LARGER) return cut(picture, file, onFile, size);
   const width = Math.ceil((file.width * size.width * 2) / onFile.width);
   const height = Math.ceil((file.height * size.height * 2) / onFile.height);
