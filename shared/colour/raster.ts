@@ -47,7 +47,29 @@ export function decodeRaster(raster: OklabRaster): DecodedRaster {
   return result;
 }
 
-/** OKLab lightness, 0–1, of the pixel that starts at `at` (3 × its index). */
+const BASE64 = 'ABCDEFGHIJKLMNOPQRSTUVWXYZabcdefghijklmnopqrstuvwxyz0123456789+/';
+/** Value of each base64 character by its char code. */
+const SEXTETS = new Uint8Array(128);
+for (let i = 0; i < BASE64.length; i++) SEXTETS[BASE64.charCodeAt(i)] = i;
+
+/**
+ * One pixel as OKLab, read straight from the stored text: three bytes are four characters, so nothing has
+ * to be decoded for a few pixels of a raster. Written to `out`.
+ *
+ * @param pixel - its index, row by row; must lie in the raster.
+ */
+export function readPixel({ data }: OklabRaster, pixel: number, out: [number, number, number]): void {
+  const at = pixel * 4;
+  const bits =
+    (SEXTETS[data.charCodeAt(at) & 127]! << 18) |
+    (SEXTETS[data.charCodeAt(at + 1) & 127]! << 12) |
+    (SEXTETS[data.charCodeAt(at + 2) & 127]! << 6) |
+    SEXTETS[data.charCodeAt(at + 3) & 127]!;
+  // Shifting up and back down again carries a byte's sign.
+  out[0] = (((bits << 8) >> 24) + LIGHTNESS_OFFSET) / SCALE;
+  out[1] = ((bits << 16) >> 24) / SCALE;
+  out[2] = ((bits << 24) >> 24) / SCALE;
+}
+
+/** OKLab lightness, 0–1, of a decoded pixel: `at` is 3 × its index. */
 export const lightnessAt = ({ data }: DecodedRaster, at: number): number => (data[at]! + LIGHTNESS_OFFSET) / SCALE;
-/** OKLab a or b: `at` is 3 × the pixel's index + 1 or + 2. */
-export const opponentAt = ({ data }: DecodedRaster, at: number): number => data[at]! / SCALE;

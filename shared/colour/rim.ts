@@ -3,8 +3,8 @@ import type { Hex } from '../model/ids';
 import type { OklabRaster, Print } from '../model/print';
 import type { Rect } from '../model/rect';
 import { ciede2000Each } from './ciede2000';
-import { hexToLab, labFromOklab } from './convert';
-import { decodeRaster, lightnessAt, opponentAt } from './raster';
+import { hexToLab, writeLab } from './convert';
+import { readPixel } from './raster';
 
 /** Under this CIEDE2000 difference a rim and its card are too close, unless their tones part them. */
 export const RIM_DELTA_E = 12;
@@ -30,7 +30,7 @@ type RimPrint = Pick<Print, 'raster' | 'imageWidth' | 'imageHeight'> & PaperFram
  * percent, which the eye takes for the photo's edge. Common practice; the depths are our own.
  */
 const RING_DEPTHS = [0.012, 0.045];
-const POINTS_PER_RING = 40;
+const POINTS_PER_RING = 32;
 const SAMPLES = RING_DEPTHS.length * POINTS_PER_RING;
 
 const rims = new WeakMap<OklabRaster, Map<string, Float64Array>>();
@@ -82,8 +82,8 @@ function rimOf(print: RimPrint, window: Rect): Float64Array {
 }
 
 function readRim(raster: OklabRaster, area: Rect): Float64Array {
-  const pixels = decodeRaster(raster);
   const labs = new Float64Array(SAMPLES * 3);
+  const pixel: [number, number, number] = [0, 0, 0];
   let at = 0;
   for (const depth of RING_DEPTHS) {
     const inset = Math.min(area.width, area.height) * depth;
@@ -93,19 +93,20 @@ function readRim(raster: OklabRaster, area: Rect): Float64Array {
       const [dx, dy] = alongRing(((i + 0.5) / POINTS_PER_RING) * 2 * (width + height), width, height);
       const x = Math.floor(area.x + inset + dx);
       const y = Math.floor(area.y + inset + dy);
-      const onPicture = x >= 0 && y >= 0 && x < pixels.width && y < pixels.height;
-      const pixel = 3 * (y * pixels.width + x);
-      const lab = onPicture
-        ? labFromOklab(lightnessAt(pixels, pixel), opponentAt(pixels, pixel + 1), opponentAt(pixels, pixel + 2))
-        : WHITE_PAPER;
-      labs.set(lab, at);
+      if (x >= 0 && y >= 0 && x < raster.width && y < raster.height) {
+        readPixel(raster, y * raster.width + x, pixel);
+        writeLab(pixel[0], pixel[1], pixel[2], labs, at);
+      } else {
+        labs[at] = WHITE_PAPER;
+      }
       at += 3;
     }
   }
   return labs;
 }
 
-const WHITE_PAPER = [100, 0, 0] as const;
+/** L* of paper where there is no picture; a* and b* are 0. */
+const WHITE_PAPER = 100;
 
 /** A point that many units clockwise along a rectangle's outline from its top-left corner. */
 function alongRing(distance: number, width: number, height: number): readonly [number, number] {

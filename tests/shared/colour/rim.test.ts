@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { hexToOklab } from '#shared/colour/convert';
-import { decodeRaster, encodeRaster } from '#shared/colour/raster';
+import { decodeRaster, encodeRaster, lightnessAt, readPixel } from '#shared/colour/raster';
 import { rimContrast, standsOut } from '#shared/colour/rim';
 import { inches } from '#shared/model/length';
 import type { OklabRaster } from '#shared/model/print';
@@ -33,6 +33,16 @@ describe('raster', () => {
     expect(Math.abs(data[1]! / 254 - a)).toBeLessThan(1 / 254);
     expect(Math.abs(data[2]! / 254 - b)).toBeLessThan(1 / 254);
     expect(data[3]).toBe(127);
+  });
+
+  it('reads one pixel from the stored text as from the decoded raster', () => {
+    const raster = paint(7, 3, (x, y) => `#${(x * 36).toString(16).padStart(2, '0')}${(y * 99).toString(16).padStart(2, '0')}c4`);
+    const decoded = decodeRaster(raster);
+    const pixel: [number, number, number] = [0, 0, 0];
+    for (let i = 0; i < 21; i++) {
+      readPixel(raster, i, pixel);
+      expect(pixel).toEqual([lightnessAt(decoded, 3 * i), decoded.data[3 * i + 1]! / 254, decoded.data[3 * i + 2]! / 254]);
+    }
   });
 
   it('refuses a raster of the wrong length', () => {
