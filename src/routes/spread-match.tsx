@@ -28,7 +28,7 @@ export function Component() {
   const sides = SIDES.filter((side) => doc.pages[side]);
   const [target, setTarget] = useState<Side>(sides[0] ?? 'left');
   const all = sketchesFor(doc.format);
-  const shown = filterSketches(all, filter, doc.format);
+  const shown = filterSketches(all, doc.format, filter);
 
   const choose = (sketch: Sketch): void => {
     setPair({ ...pair, [target]: sketch });

@@ -3,11 +3,13 @@ import type { AppDeps } from '../../app-deps';
 import { MembershipEntity } from '../../entities/membership-entity';
 import { UserEntity } from '../../entities/user-entity';
 import { hashPassword } from '../../services/passwords';
+import { loadContents } from './load-contents';
 import type { DemoAccount } from './accounts';
 import { DEMO_ACCOUNTS, DEMO_STUDIO } from './accounts';
 
-/** Makes the demo's studio with its four members. */
-export async function loadDemo({ dataSource, services: { accounts, studios }, now }: AppDeps): Promise<readonly DemoAccount[]> {
+/** Makes the demo's studio with its four members, its prints and its album. */
+export async function loadDemo(deps: AppDeps): Promise<readonly DemoAccount[]> {
+  const { dataSource, services: { accounts, studios }, now } = deps;
   const [owner, ...members] = DEMO_ACCOUNTS;
   if (!owner) return [];
   const { id: ownerId } = await accounts.signUp({ ...owner, studioName: DEMO_STUDIO });
@@ -20,5 +22,6 @@ export async function loadDemo({ dataSource, services: { accounts, studios }, no
       await manager.insert(MembershipEntity, { studioId, userId: user.id, role, createdAt: user.createdAt });
     });
   }
+  await loadContents(deps, { studioId, userId: ownerId });
   return DEMO_ACCOUNTS;
 }

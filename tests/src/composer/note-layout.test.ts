@@ -1,25 +1,25 @@
 import { describe, expect, it } from 'vitest';
 import type { Note } from '#shared/checks/check';
-import { layOutNotes, leaderPath } from '@/features/composer/canvas/note-layout';
+import { anchorOf, layOutNotes, leaderPath } from '@/features/composer/canvas/note-layout';
 
 const note = (key: string, matId: string): Note => ({
   key,
   checkId: 'bare-mat',
-  messageId: 'bare',
+  messageId: 'bare-mat',
   severity: 'fix',
   matIds: [matId],
   page: 'left',
-  data: {},
+  data: { fitting: 0 },
   remedy: null,
-}) as Note;
+});
 
 const rects: Record<string, { x: number; y: number; width: number; height: number }> = {
   high: { x: 20, y: 10, width: 100, height: 60 },
   low: { x: 20, y: 300, width: 100, height: 60 },
   lower: { x: 140, y: 310, width: 100, height: 60 },
 };
-const rectOf = (id: string) => rects[id];
-const lay = (notes: Note[], bottom = 528) => layOutNotes(notes, 'left', rectOf, () => 80, { top: 0, bottom });
+const anchor = (id: string) => anchorOf(rects[id]!, Object.entries(rects).flatMap(([key, rect]) => (key === id ? [] : [rect])), 'left');
+const lay = (notes: Note[], bottom = 528) => layOutNotes(notes, anchor, () => 80, { top: 0, bottom });
 
 describe('notes in a margin', () => {
   it('stand in the order of the mats they mean, whatever order they come in', () => {
@@ -46,6 +46,17 @@ describe('notes in a margin', () => {
 });
 
 describe('a leader', () => {
+  it('reaches a mat at the outer side straight from the margin', () => {
+    const { ring, lineY } = anchor('low');
+    expect(lineY).toBe(ring.y);
+  });
+
+  it('runs in the gap above a mat that stands behind another', () => {
+    const { ring, lineY } = anchor('lower');
+    expect(lineY).toBeLessThan(rects.lower!.y);
+    expect(ring.y).toBeGreaterThan(rects.lower!.y);
+  });
+
   it('is one horizontal line where note and mat are level', () => {
     expect(leaderPath({ x: 0, y: 50 }, { x: 90, y: 50 })).toBe('M0 50H90');
   });

@@ -7,6 +7,7 @@ import { useComposer, useComposerStore } from '@/features/composer/hooks/compose
 import { isPrintDrag } from '@/features/composer/hooks/drag-data';
 import { useComposeDrag } from '@/features/composer/hooks/use-compose-drag';
 import { useJudgement } from '@/features/composer/hooks/use-judgement';
+import { RefusalLine, RefusalProvider } from '@/features/composer/hooks/use-run';
 import { useViewport } from '@/features/composer/hooks/use-viewport';
 import { HeldPrint } from './held-print';
 import { NoteText } from './notes-margin';
@@ -47,8 +48,10 @@ export function ComposeScreen({ piles, mayEdit, sortHref }: ComposeScreenProps) 
   const heldPrint = held && isPrintDrag(held.data) ? (prints.get(held.data.printId) ?? null) : null;
   const marked = useMemo(() => new Set(sources ?? []), [sources]);
   return (
-    <DndContext {...contextProps}>
+    <RefusalProvider>
+      <DndContext {...contextProps}>
       <main className={`compose ${isSmall ? 'is-small' : ''}`}>
+        <RefusalLine />
         <SpreadTable judgement={isSmall ? { ...judgement, notes: [] } : judgement} held={held} perInch={perInch} margin={margin} isEditable={isEditable} sources={sources} />
         {isSmall ? (
           <section className="notes-below" aria-label="Notes">
@@ -69,7 +72,8 @@ export function ComposeScreen({ piles, mayEdit, sortHref }: ComposeScreenProps) 
         )}
       </main>
       {isEditable && <HeldPrint print={heldPrint} perInch={perInch} />}
-    </DndContext>
+      </DndContext>
+    </RefusalProvider>
   );
 }
 

@@ -3,7 +3,8 @@ import type { Mat, SpreadDocument } from '#shared/model/spread';
 import type { CommandCall } from '#shared/commands/calls';
 import { hexToOklab } from '#shared/colour/convert';
 import { formatLength, type Unit } from '#shared/words/measure';
-import { useComposer, useComposerStore } from '@/features/composer/hooks/composer-context';
+import { useComposer } from '@/features/composer/hooks/composer-context';
+import { useRun } from '@/features/composer/hooks/use-run';
 import { ColorSheet, colorGroups } from './color-sheet';
 import { ContentSheet } from './content-sheet';
 import { ActionPopover } from './popover';
@@ -19,12 +20,11 @@ interface MatActionsProps {
 
 /** What can be done with the selected mats, in a strip close to them. */
 export function MatActions({ mats, unit, onDone }: MatActionsProps) {
-  const store = useComposerStore();
+  const run = useRun();
   const doc = useComposer((state) => state.doc);
   const prints = useComposer((state) => state.prints);
   const first = mats[0];
   if (!first) return null;
-  const run = (call: CommandCall): boolean => store.getState().run(call);
   const matIds = mats.map((mat) => mat.id);
   const isOne = mats.length === 1;
   const print = first.content.kind === 'print' ? prints.get(first.content.printId) : undefined;

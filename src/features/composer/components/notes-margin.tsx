@@ -1,19 +1,18 @@
 import { useLayoutEffect, useRef, useState } from 'react';
 import type { Note } from '#shared/checks/check';
-import type { Rect } from '#shared/model/rect';
 import { SEVERITY_WORDS, noteSentence, remedyLabel } from '#shared/words/en/notes';
 import type { Unit } from '#shared/words/measure';
-import { layOutNotes, leaderPath, type NotePlace } from '@/features/composer/canvas/note-layout';
+import { layOutNotes, leaderPath, type Anchor, type NotePlace } from '@/features/composer/canvas/note-layout';
 
 interface NotesMarginProps {
   side: 'left' | 'right';
   notes: readonly Note[];
   unit: Unit;
   width: number;
-  /** Left edge of the margin in px, from the same origin as the mats' rectangles. */
+  /** Left edge of the margin in px, from the same origin as the anchors. */
   x: number;
   bounds: { top: number; bottom: number };
-  rectOf: (matId: string) => Rect | undefined;
+  anchor: (matId: string) => Anchor | undefined;
   isEditable: boolean;
   onRemedy: (note: Note) => void;
   onMark: (matIds: readonly string[] | null) => void;
@@ -22,7 +21,7 @@ interface NotesMarginProps {
 const ESTIMATED_HEIGHT = 96;
 
 /** One margin's notes in blue pencil, each beside its mat with a thin leader. */
-export function NotesMargin({ side, notes, unit, width, x, bounds, rectOf, isEditable, onRemedy, onMark }: NotesMarginProps) {
+export function NotesMargin({ side, notes, unit, width, x, bounds, anchor, isEditable, onRemedy, onMark }: NotesMarginProps) {
   const [heights, setHeights] = useState<Readonly<Record<string, number>>>({});
   const [hovered, setHovered] = useState<string | null>(null);
   const [isUnfolded, setIsUnfolded] = useState(false);
@@ -33,7 +32,7 @@ export function NotesMargin({ side, notes, unit, width, x, bounds, rectOf, isEdi
     if (Object.entries(measured).some(([key, height]) => heights[key] !== height)) setHeights((old) => ({ ...old, ...measured }));
   }, [notes, width, heights]);
 
-  const { placed, folded } = layOutNotes(notes, side, rectOf, (note) => heights[note.key] ?? ESTIMATED_HEIGHT, bounds);
+  const { placed, folded } = layOutNotes(notes, anchor, (note) => heights[note.key] ?? ESTIMATED_HEIGHT, bounds);
   const mark = (note: Note | null): void => {
     setHovered(note?.key ?? null);
     onMark(note?.matIds ?? null);

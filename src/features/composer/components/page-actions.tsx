@@ -2,7 +2,8 @@ import { gridOf } from '#shared/geometry/grid';
 import type { Side } from '#shared/model/ids';
 import type { SpreadDocument } from '#shared/model/spread';
 import { overlaps } from '#shared/geometry/rects';
-import { useComposer, useComposerStore } from '@/features/composer/hooks/composer-context';
+import { useComposer } from '@/features/composer/hooks/composer-context';
+import { useRun } from '@/features/composer/hooks/use-run';
 import { ColorSheet, colorGroups } from './color-sheet';
 import { ActionPopover } from './popover';
 
@@ -25,12 +26,11 @@ export function freeSquare(doc: SpreadDocument, page: Side): { x: number; y: num
 
 /** What can be done with one page as a whole. */
 export function PageActions({ side }: { side: Side }) {
-  const store = useComposerStore();
+  const run = useRun();
   const doc = useComposer((state) => state.doc);
   const prints = useComposer((state) => state.prints);
   const page = doc.pages[side];
   if (!page) return null;
-  const { run } = store.getState();
   const free = freeSquare(doc, side);
   const isBare = !doc.mats.some((mat) => mat.page === side);
   const word = side === 'left' ? 'Left page' : 'Right page';

@@ -13,6 +13,9 @@ const NAMES = { echo: 'Echo', quiet: 'Quiet', lift: 'Lift' } as const;
 const ROLES: readonly SchemeRole[] = ['base', 'main', 'second', 'accent'];
 const ROLE_WORDS = { base: 'page', main: 'main mat', second: 'second mat', accent: 'accent' } as const;
 
+/** A colour that hardly shows still has a chip that can be pointed at. */
+const chipWidth = (share: number): number => Math.max(share, 0.08);
+
 interface Suggestion {
   readonly scheme: Scheme;
   readonly shares: Readonly<Record<SchemeRole, number>>;
@@ -82,28 +85,32 @@ function SchemeBlock({ suggestion: { scheme, shares }, isInUse, isEditable, onAp
           const color = scheme.colors[role];
           const label = `${colorName(color.hex)}, ${ROLE_WORDS[role]}, ${Math.round(shares[role] * 100)}% of the card, ${sourceTitles(color.printIds)}`;
           return (
-            <li key={role} style={{ flexGrow: Math.max(shares[role], 0.06) }}>
+            <li key={role} style={{ flexGrow: chipWidth(shares[role]) }}>
               <button
                 type="button"
                 className="chip"
                 aria-label={label}
                 title={label}
-                style={{ background: color.hex, height: `calc(100% - ${i * 3}px)` }}
+                style={{ background: color.hex, height: (character === 'echo' ? 34 : 22) - i * 3 }}
                 onPointerEnter={() => onSources(color.printIds)}
                 onPointerLeave={() => onSources(null)}
                 onFocus={() => onSources(color.printIds)}
                 onBlur={() => onSources(null)}
               />
-              {character === 'echo' && (
-                <span className="chip-words" aria-hidden="true">
-                  <b>{colorName(color.hex)}</b>
-                  <span className="num">{Math.round(shares[role] * 100)}%</span>
-                </span>
-              )}
             </li>
           );
         })}
       </ul>
+      {character === 'echo' && (
+        <ul className="chip-words" aria-hidden="true">
+          {ROLES.map((role) => (
+            <li key={role}>
+              <b>{colorName(scheme.colors[role].hex)}</b>
+              <span className="num">{Math.round(shares[role] * 100)}%</span>
+            </li>
+          ))}
+        </ul>
+      )}
       {character !== 'echo' && (
         <p className="num scheme-shares" aria-hidden="true">
           {ROLES.map((role) => Math.round(shares[role] * 100)).join(', ')}%

@@ -1,6 +1,7 @@
 import { memo } from 'react';
+import { sketchWords } from '#shared/words/en/sketches';
 import type { SketchMat } from '#shared/commands/calls';
-import { describeSketch } from '#shared/sketches/features';
+import { sketchFeatures } from '#shared/sketches/features';
 import type { Sketch } from '#shared/sketches/sketch';
 import { cellRect, gridOf, matRect } from '#shared/geometry/grid';
 import type { PageFormat } from '#shared/model/page-format';
@@ -39,7 +40,7 @@ export const SketchCard = memo(function SketchCard({ sketch, format, isChosen, o
     <button type="button" className="sketch" aria-pressed={isChosen} onClick={onChoose}>
       <SketchPicture format={format} mats={sketch.mats} />
       <b>{sketch.name}</b>
-      <span>{describeSketch(sketch, format)}</span>
+      <span>{sketchWords(sketchFeatures(sketch, format))}</span>
     </button>
   );
 });

@@ -10,6 +10,7 @@ import type { Print } from '#shared/model/print';
 import { buildScene } from '#shared/scene/build-scene';
 import { formatSize, type Unit } from '#shared/words/measure';
 import { SceneDrawing } from '@/components/scene/scene-drawing';
+import { anchorOf, type Anchor } from '@/features/composer/canvas/note-layout';
 import { cellsAt, inReadingOrder, matLabels, pageLeft, toScreen } from '@/features/composer/canvas/page-scale';
 import { useComposer, useComposerStore } from '@/features/composer/hooks/composer-context';
 import { isPrintDrag } from '@/features/composer/hooks/drag-data';
@@ -55,7 +56,7 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
     () => new Map(doc.mats.map((mat) => [mat.id, toScreen(matRect(doc.format, mat), pageLeft(doc, mat.page), perInch)])),
     [doc, perInch],
   );
-  const rectOf = useCallback((id: string) => rects.get(id), [rects]);
+  const anchors = useMemo(() => anchorsOf(doc.mats, rects), [doc.mats, rects]);
   const select = useCallback(
     (matId: MatId, adds: boolean) => {
       const { selection: old, select: set } = store.getState();
@@ -73,10 +74,10 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
     <div className="spread-table" style={{ width: size.width + 2 * margin, paddingInline: margin }}>
       <div className="table-head">
         <BalanceBeam left={judgement.left} right={judgement.right} limit={BALANCE_LIMIT} />
-        {SIDES.map((side) => doc.pages[side] && <PageRuler key={side} format={doc.format} left={margin + pageLeft(doc, side) * scale} perInch={perInch} />)}
+        {SIDES.map((side) => doc.pages[side] && <PageRuler key={side} format={doc.format} left={pageLeft(doc, side) * scale} perInch={perInch} />)}
       </div>
       <div className="spread" style={size} onDoubleClick={(event) => isEditable && addMatAt(event, store.getState(), perInch)} onPointerDown={(event) => event.target === event.currentTarget && store.getState().select([])}>
-        <SceneDrawing scene={scene} pictureSize="medium" underlay={<Grids doc={doc} />} />
+        <SceneDrawing scene={scene} pictureSize={perInch * devicePixelRatio > 80 ? 'large' : 'medium'} underlay={<Grids doc={doc} />} />
         {inReadingOrder(doc.mats).map((mat) => (
           <MatControl
             key={mat.id}
@@ -121,7 +122,7 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
             width={margin - 36}
             x={side === 'left' ? 16 - margin : size.width + NOTE_GUTTER}
             bounds={bounds}
-            rectOf={rectOf}
+            anchor={(matId) => anchors.get(matId)}
             isEditable={isEditable}
             onRemedy={applyRemedy}
             onMark={setMarked}
@@ -142,6 +143,17 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
 const Grids = memo(function Grids({ doc }: { doc: SpreadDocument }) {
   return SIDES.map((side) => doc.pages[side] && <PageGrid key={side} format={doc.format} x={pageLeft(doc, side)} />);
 });
+
+/** Where the leader to each mat ends; mats laid over others do not stand in a leader's way. */
+function anchorsOf(mats: readonly Mat[], rects: ReadonlyMap<MatId, Rect>): Map<MatId, Anchor> {
+  return new Map(
+    mats.flatMap((mat) => {
+      const rect = rects.get(mat.id);
+      const others = mats.flatMap((other) => (other !== mat && other.page === mat.page && !other.laidOver ? (rects.get(other.id) ?? []) : []));
+      return rect ? [[mat.id, anchorOf(rect, others, mat.page)] as const] : [];
+    }),
+  );
+}
 
 /** The print that dragging a mat's picture picks up: its own, or its pane group's. */
 function carriedPrint(mat: Mat, doc: SpreadDocument): PrintId | null {
