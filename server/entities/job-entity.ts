@@ -37,11 +37,11 @@ export class JobEntity {
   @Column({ type: 'enum', enum: JOB_STATES })
   state!: Job['state'];
 
-  @Column({ type: 'int', unsigned: true, default: 0 })
+  @Column({ type: 'int', unsigned: true })
   attempts!: number;
 
   /** 0 to 1. */
-  @Column({ type: 'double', default: 0 })
+  @Column({ type: 'double' })
   progress!: number;
 
   /** While running: when the claim lapses, unless the runner renews it. */

@@ -20,7 +20,7 @@ export class PileEntity {
   @Column({ type: 'int', unsigned: true })
   position!: number;
 
-  @Column({ name: 'shared_with_contributors', type: 'boolean', default: false })
+  @Column({ name: 'shared_with_contributors', type: 'boolean' })
   sharedWithContributors!: boolean;
 
   @Column(instant('created_at'))

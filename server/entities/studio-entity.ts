@@ -21,10 +21,10 @@ export class StudioEntity {
   finestMark!: number;
 
   /** An attendee's copy lives in a hidden studio of its own. MODEL.md 11. */
-  @Column({ type: 'boolean', default: false })
+  @Column({ type: 'boolean' })
   hidden!: boolean;
 
-  @Column({ ...bytes('bytes_used'), default: 0 })
+  @Column(bytes('bytes_used'))
   bytesUsed!: number;
 
   @Column(bytes('bytes_quota'))

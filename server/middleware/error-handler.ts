@@ -65,6 +65,13 @@ function asAppError(error: unknown): AppError | null {
     case 'request.aborted':
       return new AppError('invalid-input', { where: 'body' });
     default:
-      return null;
+      return fromStatus(error);
   }
+}
+
+/** Express and its static files say with a status what the request itself is to blame for. */
+function fromStatus(error: unknown): AppError | null {
+  const status = typeof error === 'object' && error !== null && 'status' in error ? error.status : undefined;
+  if (status === 404) return new AppError('not-found');
+  return typeof status === 'number' && status >= 400 && status < 500 ? new AppError('invalid-input') : null;
 }
