@@ -1,4 +1,5 @@
 import { spawn } from 'node:child_process';
+import { stripVTControlCharacters } from 'node:util';
 
 export interface QuietRun {
   readonly code: number;
@@ -14,8 +15,7 @@ export function runQuietly(
   return new Promise((resolve) => {
     let output = '';
     // A group of its own, so that a stop of this process ends the program's own children too.
-    const env = { ...process.env, NO_COLOR: '1' };
-    const child = spawn(program, args, { ...options, env, stdio: ['ignore', 'pipe', 'pipe'], detached: true });
+    const child = spawn(program, args, { ...options, stdio: ['ignore', 'pipe', 'pipe'], detached: true });
     const endGroup = (): void => {
       try {
         if (child.pid !== undefined) process.kill(-child.pid, 'SIGKILL');
@@ -26,7 +26,7 @@ export function runQuietly(
     process.once('exit', endGroup);
     const settle = (run: QuietRun): void => {
       process.off('exit', endGroup);
-      resolve(run);
+      resolve({ ...run, output: stripVTControlCharacters(run.output) });
     };
     const collect = (chunk: Buffer): void => void (output += chunk.toString());
     child.stdout.on('data', collect);
