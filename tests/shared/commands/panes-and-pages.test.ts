@@ -39,6 +39,12 @@ describe('a split print', () => {
     expect(matIn(doc, B).content.kind).toBe('pane');
   });
 
+  it('stays spread apart when its picture changes', () => {
+    const panes = buildPanes(buildPrint(), pair(), { run: 'apart' });
+    const doc = commands.after(buildSpread({ mats: panes.mats, panes: [panes.group] }), placeCall(print.id, A));
+    expect(doc.panes[0]!.content).toMatchObject({ printId: print.id, run: 'apart' });
+  });
+
   it('keeps the print that one of its mats carried', () => {
     const start = spread(pair()[0]!, { ...pair()[1]!, content: printContent(print) });
     expect(commands.after(start, group(null)).panes[0]!.content).toMatchObject({ printId: print.id });

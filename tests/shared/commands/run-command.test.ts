@@ -25,7 +25,7 @@ const histories = spreads.chain((doc) => fc.tuple(fc.constant(doc), callsOn(doc)
 
 const plain = (doc: SpreadDocument): unknown => JSON.parse(JSON.stringify(doc));
 
-describe('every command', () => {
+describe('every command', { timeout: 60_000 }, () => {
   it('starts from spreads that are faultless', () => {
     fc.assert(
       fc.property(spreads, (doc) => {
@@ -54,7 +54,7 @@ describe('every command', () => {
       }),
       { numRuns: 800 },
     );
-  }, 60_000);
+  });
 
   it('leaves no fault behind a split and the merge that takes it back', () => {
     let merges = 0;

@@ -206,11 +206,13 @@ describe('a conflict', () => {
   it('is found when others touched what is not sent yet', async () => {
     const tab = openTab({ doc: twoMats() });
     tab.store.getState().run(move(A, 1));
-    const saving = tab.store.getState().flush();
     tab.server.otherEdit(changeMat(tab.server.doc, B, { y: 9 }), 'Ines');
+    const saving = tab.store.getState().flush();
     tab.store.getState().run(move(B, 2));
     await saving;
     expect(statusOf(tab)).toBe('conflict');
+    expect(tab.server.posts).toHaveLength(1);
+    expect(matIn(tab.store.getState().doc, B)).toMatchObject({ x: 12, y: 0 });
     expect(matIn(tab.server.doc, B)).toMatchObject({ x: 10, y: 9 });
     tab.store.getState().resolveConflict('mine');
     await tab.clock.pass(600);

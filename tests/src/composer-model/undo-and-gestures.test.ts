@@ -13,7 +13,7 @@ const twoMats = (): SpreadDocument => buildSpread({ mats: [buildMat({ id: A, x: 
 const move = (matId: string, dx: number, dy = 0): CommandCall => ({ id: 'mats.move', args: { matIds: [matId], dx, dy } });
 const matIn = (doc: SpreadDocument, id: string) => doc.mats.find((mat) => mat.id === id)!;
 
-describe('undo and redo', () => {
+describe('undo and redo', { timeout: 30_000 }, () => {
   it('takes back and brings back a step', () => {
     const { store } = openTab({ doc: twoMats() });
     const before = store.getState().doc;

@@ -40,13 +40,12 @@ export interface JoinedDraft {
 export function joinDraft(now: Base, draft: Draft, log: readonly LoggedEdit[]): JoinedDraft {
   const edits = unsavedEdits(draft, log);
   const foreign = foreignEdits(log, draft.edits);
-  const keys = touchedByBoth(edits, foreign);
-  if (keys.length === 0 && joinsSoundly(now.doc, edits)) return { base: now, edits, conflict: null };
+  if (joinsSoundly(now.doc, edits)) return { base: now, edits, conflict: null };
   const doc = [...foreign].reverse().reduce((before, { patch }) => applyPatch(before, invertPatch(patch)), now.doc);
   return {
     base: { doc, revision: draft.baseRevision },
     edits,
-    conflict: { revision: now.revision, keys, missed: foreign },
+    conflict: { revision: now.revision, keys: touchedByBoth(edits, foreign), missed: foreign },
   };
 }
 
