@@ -1,4 +1,3 @@
-import './lib/zod-config';
 import { QueryClientProvider } from '@tanstack/react-query';
 import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
