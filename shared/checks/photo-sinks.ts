@@ -1,12 +1,12 @@
 import { hexToOklab } from '../colour/convert';
 import { rimContrast, SINKING_SHARE } from '../colour/rim';
-import type { PlacedPhoto } from '../geometry/placed-photos';
+import { windowAtOwnSize, type PlacedPhoto } from '../geometry/placed-photos';
 import type { Hex } from '../model/ids';
 import type { Mat } from '../model/spread';
 import { MIN_REVEAL } from '../model/trim-settings';
 import { defineCheck, type Finding, type Remedy, type SpreadView } from './check';
 import { piecesOf } from './pieces';
-import { atOwnSize, cardUnder, rimOnCard } from './rims';
+import { cardUnder, rimOnCard } from './rims';
 
 /** Card of this OKLab lightness or more is called light. */
 const LIGHT = 0.85;
@@ -78,5 +78,5 @@ const schemeColors = ({ doc }: SpreadView): readonly Hex[] => {
 const standOutFrom = (view: SpreadView, photos: readonly PlacedPhoto[], hex: Hex, share: number): boolean =>
   photos.every((photo) => {
     const print = view.prints.get(photo.printId);
-    return print !== undefined && rimContrast(print, atOwnSize(print, photo), hex).closeShare < share;
+    return print !== undefined && rimContrast(print, windowAtOwnSize(print, photo), hex).closeShare < share;
   });

@@ -1,6 +1,6 @@
 import { rimContrast, type RimContrast } from '../colour/rim';
 import { revealOf } from '../geometry/grid';
-import type { PlacedPhoto } from '../geometry/placed-photos';
+import { windowAtOwnSize, type PlacedPhoto } from '../geometry/placed-photos';
 import type { Hex } from '../model/ids';
 import type { Print } from '../model/print';
 import type { Mat } from '../model/spread';
@@ -30,7 +30,7 @@ export function rimOnCard(view: SpreadView, photo: PlacedPhoto): RimContrast | n
   if (!mat || !print || !card) return null;
   const last = known.get(mat);
   if (last && last.print === print && last.card === card && sameWindow(last.photo, photo)) return last.contrast;
-  const contrast = rimContrast(print, atOwnSize(print, photo), card);
+  const contrast = rimContrast(print, windowAtOwnSize(print, photo), card);
   known.set(mat, { print, photo, card, contrast });
   return contrast;
 }
@@ -41,12 +41,3 @@ const sameWindow = (a: PlacedPhoto, b: PlacedPhoto): boolean =>
   a.window.width === b.window.width &&
   a.window.height === b.window.height &&
   a.placement.scaledWidth === b.placement.scaledWidth;
-
-/** The window at the print's own size: a scaled digital photo shows the same part of the picture. */
-export function atOwnSize(print: Print, photo: PlacedPhoto): PlacedPhoto['window'] {
-  const { scaledWidth } = photo.placement;
-  if (scaledWidth === null) return photo.window;
-  const factor = print.paperWidth / scaledWidth;
-  const { x, y, width, height } = photo.window;
-  return { x: x * factor, y: y * factor, width: width * factor, height: height * factor };
-}

@@ -1,5 +1,5 @@
 import { cellRect, contentRect, matRect, revealOf } from '../geometry/grid';
-import { placedPhotos, type PlacedPhoto } from '../geometry/placed-photos';
+import { placedPhotos, windowAtOwnSize, type PlacedPhoto } from '../geometry/placed-photos';
 import { area, bottom, boundingBox, contains, inset, overlaps, right } from '../geometry/rects';
 import type { Hex, MatId, PrintId, Side } from '../model/ids';
 import { inches } from '../model/length';
@@ -66,6 +66,8 @@ export function cardUnits(doc: SpreadDocument, prints: ReadonlyMap<PrintId, Prin
   const lists = [...groups.values()];
   return lists.map((mats, i) => {
     const own = ownInner(doc, mats[0]!);
+    // An inner mat without a reveal lies wholly under the photo: the card still meets it.
+    const shown = own && own.reveal > 0 ? own : null;
     const carried = suitabilities(mats, photos, prints, scheme);
     return {
       mats: mats.map((mat) => ({ ...mat, inner: ownInner(doc, mat) })),
@@ -74,10 +76,9 @@ export function cardUnits(doc: SpreadDocument, prints: ReadonlyMap<PrintId, Prin
       area: mats.reduce((sum, mat) => sum + area(matRect(doc.format, mat)), 0),
       isFocal: mats.some((mat) => mat.focal),
       kind: mats[0]!.content.kind,
-      // With an inner mat of its own the card does not meet what it carries.
-      card: own ? against(own.color, scheme) : carried,
+      card: cardSuitability(doc, mats, shown, carried, scheme),
       inner: carried,
-      ownInnerHides: own !== null && !fitsAll(mats, photos, prints, own.color),
+      ownInnerHides: shown !== null && !fitsAll(mats, photos, prints, shown.color),
       mayTakeInner: !own && mats.every((mat) => canTakeInner(doc, mat, photos.get(mat.id))),
       neighbours: lists.flatMap((others, k) => (k !== i && touch(doc, mats, others) ? [k] : [])),
     };
@@ -104,6 +105,13 @@ const fitsAll = (mats: readonly Mat[], photos: ReadonlyMap<MatId, PlacedPhoto>, 
 const eachRole = (scheme: Scheme, measure: (hex: Hex) => Suitability): RoleSuitability =>
   Object.fromEntries(ROLES.map((role) => [role, measure(scheme.colors[role].hex)])) as RoleSuitability;
 
+/** With an inner mat of its own the card does not meet what it carries, and without a reveal no card shows at all. */
+function cardSuitability(doc: SpreadDocument, mats: readonly Mat[], shownInner: Mat['inner'], carried: RoleSuitability, scheme: Scheme): RoleSuitability {
+  if (shownInner) return against(shownInner.color, scheme);
+  const isHidden = mats.every((mat) => revealOf(mat, doc.reveal) === 0 && (mat.content.kind === 'print' || mat.content.kind === 'pane'));
+  return isHidden ? eachRole(scheme, () => NOTHING_CARRIED) : carried;
+}
+
 const against = (color: Hex, scheme: Scheme): RoleSuitability => eachRole(scheme, (hex) => apart(color, hex));
 
 function apart(color: Hex, hex: Hex): Suitability {
@@ -116,7 +124,7 @@ const NOTHING_CARRIED: Suitability = { fits: true, distance: 100 };
 function suitability(mat: Mat, photo: PlacedPhoto | undefined, prints: ReadonlyMap<PrintId, Print>, hex: Hex): Suitability {
   const print = photo && prints.get(photo.printId);
   if (photo && print) {
-    const contrast = rimContrast(print, photo.window, hex);
+    const contrast = rimContrast(print, windowAtOwnSize(print, photo), hex);
     return { fits: standsOut(contrast), distance: contrast.medianDeltaE };
   }
   const { content } = mat;

@@ -1,5 +1,5 @@
 import { toPicture } from '../geometry/paper';
-import { placedPhotos } from '../geometry/placed-photos';
+import { placedPhotos, windowAtOwnSize } from '../geometry/placed-photos';
 import { area } from '../geometry/rects';
 import type { PrintId } from '../model/ids';
 import type { Print } from '../model/print';
@@ -64,7 +64,7 @@ export function photoColors(doc: SpreadDocument, prints: ReadonlyMap<PrintId, Pr
 function seenParts(doc: SpreadDocument, prints: ReadonlyMap<PrintId, Print>): SeenPart[] {
   const placed = placedPhotos(doc, (id) => prints.get(id)).flatMap((photo): SeenPart[] => {
     const print = prints.get(photo.printId);
-    return print ? [{ print, source: toPicture(print, photo.window), weight: area(photo.rect) }] : [];
+    return print ? [{ print, source: toPicture(print, windowAtOwnSize(print, photo)), weight: area(photo.rect) }] : [];
   });
   if (placed.length > 0) return placed;
   return doc.table.flatMap((id): SeenPart[] => {

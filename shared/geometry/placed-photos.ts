@@ -89,3 +89,15 @@ function paneParts(doc: SpreadDocument): Map<MatId, PanePart> {
   }
   return parts;
 }
+
+/**
+ * The part of the picture that a piece shows, as a window on the print's own paper, for `toPicture`: a
+ * scaled digital photo shows the same part as the unscaled one. Not rounded.
+ */
+export function windowAtOwnSize(print: Pick<Print, 'paperWidth'>, photo: Pick<PlacedPhoto, 'window' | 'placement'>): Rect {
+  const { scaledWidth } = photo.placement;
+  if (scaledWidth === null) return photo.window;
+  const factor = print.paperWidth / scaledWidth;
+  const { x, y, width, height } = photo.window;
+  return { x: x * factor, y: y * factor, width: width * factor, height: height * factor };
+}

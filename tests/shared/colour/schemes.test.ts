@@ -180,6 +180,26 @@ describe('placeScheme', () => {
     expect(applied(doc, seaside, echo!).inners).toBeUndefined();
   });
 
+  it('asks nothing of card that does not show, and puts no inner mat on it', () => {
+    const white = bands(1, '#ffffff');
+    const doc = buildSpread({ mats: [buildMat({ id: matIdOf(0), reveal: 0, content: printContent(white) })] });
+    const hidden: Scheme = {
+      character: 'quiet',
+      colors: { base: { hex: '#fefefe', printIds: [] }, main: { hex: '#fdfdfd', printIds: [] }, second: { hex: '#fcfcfc', printIds: [] }, accent: { hex: '#fbfbfb', printIds: [] } },
+    };
+    expect(applied(doc, [white], hidden)).toEqual({ scheme: hidden, pageColor: '#fefefe', matColors: { [matIdOf(0)]: '#fdfdfd' } });
+  });
+
+  it('reads the same part of a scaled digital photo as is printed', () => {
+    const half = { ...bands(1, '#1f4e5f', '#f4f2ee'), marks: { ...harbour.marks, digital: true } };
+    // At half its size, 3 × 2 in: the window's 1 5/8 in show all of the dark half and little of the pale one.
+    const doc = buildSpread({ mats: [buildMat({ id: matIdOf(0), content: printContent(half, { scaledWidth: inches(3) }) })] });
+    const [echo] = suggestSchemes(inputOf(doc, [half]));
+    expect(echo!.colors.main.printIds).toEqual([half.id]);
+    const unscaled = buildSpread({ mats: [buildMat({ id: matIdOf(0), content: printContent(half) })] });
+    expect(suggestSchemes(inputOf(unscaled, [half]))[0]!.colors.base).not.toEqual(echo!.colors.base);
+  });
+
   it('lands the accent on small mats of both pages', () => {
     // Pale all round, so that every card colour would do.
     const inside = ['#1f4e5f', '#2d6f86', '#8a4f7d', '#d9a441'].map(hexToOklab);
