@@ -20,6 +20,8 @@ const MIN_CARD_SHARE = 0.03;
 const MIN_ACCENT_SHARE = 0.004;
 /** Hues this far apart, in degrees, read as two colours. */
 const OTHER_HUE = 40;
+/** An accent is small and vivid, so it stands apart from a calm card already at this hue distance. */
+const ACCENT_HUE = 30;
 /** Skin lies about here in OKLCH; a card of it makes faces look pale. Common practice: it is not favoured. */
 const SKIN = { hue: [30, 75], chroma: [0.03, 0.12], lightness: [0.5, 0.92] } as const;
 const SKIN_FACTOR = 0.3;
@@ -98,7 +100,7 @@ function secondOf(colors: readonly PhotoColor[], main: Chosen): Chosen {
 
 /** The most vivid colour that is neither of the other two; in photos without colour a near-black. */
 function accentOf(colors: readonly PhotoColor[], taken: readonly Chosen[]): Chosen {
-  const isOther = ({ vivid }: PhotoColor): boolean => taken.every(({ oklch }) => hueDistance(vivid[2], oklch[2]) >= OTHER_HUE);
+  const isOther = ({ vivid }: PhotoColor): boolean => taken.every(({ oklch }) => hueDistance(vivid[2], oklch[2]) >= ACCENT_HUE);
   const score = ({ vivid, weight }: PhotoColor): number => (weight >= MIN_ACCENT_SHARE ? vivid[1] * Math.sqrt(Math.sqrt(weight)) : 0);
   const vivid = colors.filter(({ vivid: [, chroma] }) => chroma >= NEUTRAL_CHROMA);
   const from = strongest(vivid.filter(isOther), score) ?? strongest(vivid, score);
@@ -145,8 +147,8 @@ function liftOf(colors: readonly PhotoColor[], echo: Scheme): Scheme {
 
 const isColored = ({ oklch: [, chroma] }: PhotoColor): boolean => chroma >= NEUTRAL_CHROMA;
 
-/** Hues this near count as one family, so that light and dark of one colour speak together. */
-const SAME_FAMILY = 28;
+/** Hues this near count as one family, so that light and dark of one colour speak together; wider, and sand would speak for brick. */
+const SAME_FAMILY = 20;
 /** A colour that runs through so many prints ties the spread together; one print's own colour counts less. */
 const TYING_PRINTS = 4;
 /** A colour whose tone must be moved far to become card is not the colour any more. */
