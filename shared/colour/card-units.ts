@@ -1,4 +1,5 @@
 import { cellRect, contentRect, matRect, revealOf } from '../geometry/grid';
+import { toPaper } from '../geometry/paper';
 import { placedPhotos, windowAtOwnSize, type PlacedPhoto } from '../geometry/placed-photos';
 import { area, bottom, boundingBox, contains, inset, overlaps, right } from '../geometry/rects';
 import type { Hex, MatId, PrintId, Side } from '../model/ids';
@@ -6,7 +7,7 @@ import { inches } from '../model/length';
 import type { Print } from '../model/print';
 import type { Rect } from '../model/rect';
 import type { Mat, Scheme, SchemeRole, SpreadDocument } from '../model/spread';
-import { MIN_REVEAL } from '../model/trim-settings';
+import { MIN_REVEAL, TRIM_SETTINGS_INCH } from '../model/trim-settings';
 import { ciede2000 } from './ciede2000';
 import { contrastRatio } from './contrast';
 import { hexToLab } from './convert';
@@ -79,7 +80,7 @@ export function cardUnits(doc: SpreadDocument, prints: ReadonlyMap<PrintId, Prin
       card: cardSuitability(doc, mats, shown, carried, scheme),
       inner: carried,
       ownInnerHides: shown !== null && !fitsAll(mats, photos, prints, shown.color),
-      mayTakeInner: !own && mats.every((mat) => canTakeInner(doc, mat, photos.get(mat.id))),
+      mayTakeInner: !own && mats.every((mat) => canTakeInner(doc, mat, photos.get(mat.id), prints.get(photos.get(mat.id)?.printId ?? ''))),
       neighbours: lists.flatMap((others, k) => (k !== i && touch(doc, mats, others) ? [k] : [])),
     };
   });
@@ -141,12 +142,26 @@ function suitability(mat: Mat, photo: PlacedPhoto | undefined, prints: ReadonlyM
   }
 }
 
-function canTakeInner(doc: SpreadDocument, mat: Mat, photo: PlacedPhoto | undefined): boolean {
-  if (!photo) return false;
-  const inner = inset(matRect(doc.format, mat), revealOf(mat, doc.reveal));
-  if (photo.placement.mode === 'whole') return contains(inset(inner, MIN_REVEAL), photo.rect);
+/**
+ * True where a thin inner mat would show and do no harm: it makes the photo narrower from its right and
+ * bottom edges, so it must leave enough of it, and the keep zone with it. Panes take none: it would move
+ * their seams.
+ */
+function canTakeInner(doc: SpreadDocument, mat: Mat, photo: PlacedPhoto | undefined, print: Print | undefined): boolean {
+  if (!photo || !print || photo.groupId !== null) return false;
+  if (photo.placement.mode === 'whole') {
+    const inner = inset(matRect(doc.format, mat), revealOf(mat, doc.reveal));
+    return contains(inset(inner, MIN_REVEAL), photo.rect);
+  }
   const left = inset(contentRect(doc.format, doc.reveal, { ...mat, inner: null }), MIN_REVEAL);
-  return left.width >= MIN_PHOTO && left.height >= MIN_PHOTO;
+  if (left.width < MIN_PHOTO || left.height < MIN_PHOTO) return false;
+  if (!print.keepZone) return true;
+  const zone = inset(toPaper(print, print.keepZone), -TRIM_SETTINGS_INCH.tolerance);
+  const window = windowAtOwnSize(print, photo);
+  const { scaledWidth } = photo.placement;
+  const taken = 2 * MIN_REVEAL * (scaledWidth === null ? 1 : print.paperWidth / scaledWidth);
+  const narrower = { ...window, width: window.width - taken, height: window.height - taken };
+  return contains(narrower, zone) || !contains(window, zone);
 }
 
 /** True where some mat of one list shares an edge with, or lies on, some mat of the other. */

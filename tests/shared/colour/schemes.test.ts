@@ -180,6 +180,19 @@ describe('placeScheme', () => {
     expect(applied(doc, seaside, echo!).inners).toBeUndefined();
   });
 
+  it('puts no inner mat where it would cut into the keep zone: the page colour serves as card', () => {
+    const scheme: Scheme = {
+      character: 'echo',
+      colors: { base: { hex: '#f6f2e8', printIds: [] }, main: { hex: '#1f4e5f', printIds: [] }, second: { hex: '#22505f', printIds: [] }, accent: { hex: '#1d4d60', printIds: [] } },
+    };
+    // The window shows 1 5/8 in of the paper from its corner, at 100 px an inch.
+    const tight = { ...bands(1, '#1f4e5f'), keepZone: { x: 10, y: 10, width: 145, height: 60 } };
+    const roomy = { ...tight, keepZone: { x: 10, y: 10, width: 100, height: 60 } };
+    expect(applied(spreadOf([tight]), [tight], scheme)).toMatchObject({ matColors: { [matIdOf(0)]: '#f6f2e8' } });
+    expect(applied(spreadOf([tight]), [tight], scheme).inners).toBeUndefined();
+    expect(applied(spreadOf([roomy]), [roomy], scheme).inners).toBeDefined();
+  });
+
   it('asks nothing of card that does not show, and puts no inner mat on it', () => {
     const white = bands(1, '#ffffff');
     const doc = buildSpread({ mats: [buildMat({ id: matIdOf(0), reveal: 0, content: printContent(white) })] });
