@@ -72,9 +72,10 @@ async function takenMediaType(path: string): Promise<string> {
   const type = await fileTypeFromFile(path);
   if (type && TAKEN.has(type.mime)) return type.mime;
   if (/<svg[\s>]/i.test(head.toString('latin1'))) throw new Refusal('svg' satisfies PictureRefusal);
-  if (!type || type.mime === 'application/xml') throw new Refusal('not-a-picture' satisfies PictureRefusal);
-  const reason = REFUSED.get(type.mime) ?? ('other-kind' satisfies PictureRefusal);
-  throw new Refusal(reason, reason === 'other-kind' ? { kind: type.ext.toUpperCase() } : {});
+  const refused = REFUSED.get(type?.mime ?? '');
+  if (refused) throw new Refusal(refused);
+  if (!type?.mime.startsWith('image/')) throw new Refusal('not-a-picture' satisfies PictureRefusal);
+  throw new Refusal('other-kind' satisfies PictureRefusal, { kind: type.ext.toUpperCase() });
 }
 
 async function readHead(path: string): Promise<Buffer> {

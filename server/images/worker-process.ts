@@ -21,6 +21,7 @@ export class WorkerEndedError extends Error {
   }
 }
 
+const ROOT = fileURLToPath(new URL('../../', import.meta.url));
 const WATCH_MS = 50;
 /** Below the API process, so that picture work never starves requests. */
 const NICENESS = 10;
@@ -47,6 +48,8 @@ export class WorkerProcess {
     private readonly limits: WorkerLimits,
   ) {
     this.child = fork(fileURLToPath(script), {
+      // Where tsx and its settings are found.
+      cwd: ROOT,
       execArgv: ['--import', 'tsx'],
       stdio: ['ignore', 'ignore', 'inherit', 'ipc'],
       // Nothing of ours that is secret is a picture's business.

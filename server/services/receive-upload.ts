@@ -39,9 +39,10 @@ export type ReceiveUpload = (req: Request, res: Response) => Promise<ReceivedUpl
 /**
  * Reads one multipart body with one file to disk, hashing it on the way.
  *
+ * @param requireRoom - throws where so many bytes more have no room on the disk; asked before anything is read.
  * @throws AppError `too-large` · `invalid-input` · `picture-refused` (no file) · `unavailable` when too many wait.
  */
-export function createReceiveUpload(incoming: Incoming): ReceiveUpload {
+export function createReceiveUpload(incoming: Incoming, requireRoom: (bytes: number) => Promise<void>): ReceiveUpload {
   const limit = pLimit(RECEIVING_AT_ONCE);
   const parse = multer({
     storage: hashingStorage(incoming),
@@ -55,6 +56,7 @@ export function createReceiveUpload(incoming: Incoming): ReceiveUpload {
       res.set('Connection', 'close');
       throw new AppError('too-large', { maxBytes: MAX_UPLOAD_BYTES });
     }
+    await requireRoom(Number(req.headers['content-length'] ?? MAX_UPLOAD_BYTES));
     if (limit.pendingCount >= MAX_WAITING) throw new AppError('unavailable', { reason: 'busy' });
     await limit(() => new Promise<void>((resolve, reject) => parse(req, res, (error) => (error ? reject(explain(error)) : resolve()))));
     return read(req);

@@ -2,6 +2,7 @@ import type { DataSource } from 'typeorm';
 import type { Config } from '../config';
 import type { ExportPool, IntakePool } from '../images/pools';
 import type { Incoming } from '../storage/incoming';
+import { requireFreeDisk } from '../storage/free-disk';
 import type { Storage } from '../storage/storage';
 import { AccountService } from './account-service';
 import { AlbumService } from './album-service';
@@ -64,7 +65,7 @@ export function createServices({ config, dataSource, storage, incoming, intakePo
     cutSizes: new CutSizeService(dataSource, now),
     jobs,
     uploads: new UploadService({ dataSource, storage, incoming, pool: intakePool, freeDiskBytes, now }),
-    receive: createReceiveUpload(incoming),
+    receive: createReceiveUpload(incoming, (bytes) => requireFreeDisk(storage, bytes, freeDiskBytes)),
     exports: new ExportService({ dataSource, storage, incoming, pool: exportPool, jobs, freeDiskBytes, now }),
   };
 }

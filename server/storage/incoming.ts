@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { mkdir, readdir, readFile, rm, writeFile } from 'node:fs/promises';
-import { join } from 'node:path';
+import { join, resolve } from 'node:path';
 import { z } from 'zod';
 import { idSchema } from '../../shared/contracts/common';
 
@@ -20,7 +20,7 @@ export class Incoming {
 
   /** @param parent - folder that all processes of this installation share, on the storage's disk. */
   static async open(parent: string): Promise<Incoming> {
-    const folder = join(parent, `${process.pid}-${randomUUID()}`);
+    const folder = resolve(parent, `${process.pid}-${randomUUID()}`);
     await mkdir(folder, { recursive: true, mode: 0o700 });
     return new Incoming(folder);
   }
@@ -72,7 +72,7 @@ export class Incoming {
  */
 export async function sweepIncoming(parent: string, own: Incoming, undo: (pending: Pending) => Promise<void>): Promise<number> {
   await mkdir(parent, { recursive: true });
-  const folders = (await readdir(parent)).filter((name) => join(parent, name) !== own.folder && isAbandoned(name));
+  const folders = (await readdir(parent)).filter((name) => resolve(parent, name) !== own.folder && isAbandoned(name));
   for (const name of folders) {
     const folder = join(parent, name);
     for (const file of await readdir(folder)) {

@@ -1,17 +1,17 @@
 import { randomUUID } from 'node:crypto';
 import { constants } from 'node:fs';
 import { copyFile, mkdir, open, rename, rm, stat, statfs } from 'node:fs/promises';
-import { dirname, join } from 'node:path';
+import { dirname, resolve } from 'node:path';
 import type { Storage, StorageKey } from './storage';
 
 /**
  * Storage on the local disk, one file per key under `folder`.
  *
- * A put syncs the file's bytes, renames it into place and syncs the folder, so that after a power cut a key is
+ * Paths that it gives out are absolute. A put syncs the file's bytes, renames it into place and syncs the folder, so that after a power cut a key is
  * either whole or absent.
  */
 export function localDiskStorage(folder: string): Storage {
-  const pathOf = (key: StorageKey): string => join(folder, key);
+  const pathOf = (key: StorageKey): string => resolve(folder, key);
 
   return {
     async put(key, sourcePath) {

@@ -61,7 +61,10 @@ async function fetchPackage(target: string): Promise<void> {
     const [archive] = (await readdir(folder)).filter((name) => name.endsWith('.deb'));
     if (!archive) throw new Error(`apt-get fetched no ${PACKAGE}`);
     await run('dpkg-deb', ['-x', archive, 'unpacked'], { cwd: folder });
-    await rename(join(folder, 'unpacked'), target);
+    // Another process may have been quicker.
+    await rename(join(folder, 'unpacked'), target).catch((error: unknown) => {
+      if (!existsSync(target)) throw error;
+    });
   } finally {
     await rm(folder, { recursive: true, force: true });
   }

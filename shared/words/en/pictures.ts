@@ -14,7 +14,7 @@ const SENTENCES: Record<PictureRefusal, (data: ErrorData) => string> = {
   gif: () => 'This is a GIF, which holds too few colours for a photograph: save it as JPEG or PNG and add that.',
   pdf: () => 'This is a PDF: save the photograph in it as JPEG and add that.',
   heic: () => 'This is a HEIC picture, which cannot be read here yet: save it as JPEG and add that.',
-  'other-kind': ({ kind }) => `This is a ${String(kind)} file: save it as ${KINDS} and add that.`,
+  'other-kind': ({ kind }) => `This is a picture of the kind ${String(kind)}, which cannot be read here: save it as ${KINDS} and add that.`,
   animated: () => 'This is an animation: save the one picture that you want as JPEG and add that.',
   'several-pages': ({ pages }) => `This file holds ${String(pages)} pages: save each page as a file of its own and add those.`,
   'too-many-pixels': ({ width, height, max }) =>

@@ -75,7 +75,7 @@ describe('a file that is not a usable photograph is refused by its content', () 
   it.each<[string, string, () => Buffer | string | Promise<Buffer>]>([
     ['zero bytes', 'empty', () => ''],
     ['text named .jpg', 'not-a-picture', () => 'Dear diary, no picture today.'],
-    ['a program named .png', 'other-kind', () => Buffer.concat([Buffer.from('MZ'), Buffer.alloc(300)])],
+    ['a program named .png', 'not-a-picture', () => Buffer.concat([Buffer.from('MZ'), Buffer.alloc(300)])],
     ['an SVG with external references', 'svg', () => SVG],
     ['an SVG with an XML declaration named .jpg', 'svg', () => `<?xml version="1.0"?>${SVG}`],
     ['a GIF', 'gif', gif],
@@ -83,6 +83,7 @@ describe('a file that is not a usable photograph is refused by its content', () 
     ['a HEIC', 'heic', () => heic('heic')],
     ['a HEIF of the general brand', 'heic', () => heic('mif1')],
     ['a BMP', 'other-kind', bmp],
+    ['a ZIP archive', 'not-a-picture', () => Buffer.concat([Buffer.from('PK\x03\x04'), Buffer.alloc(300)])],
     ['a truncated JPEG', 'damaged', async () => halfOf(await photo().jpeg().toBuffer())],
     ['a truncated PNG', 'damaged', async () => halfOf(await photo().png().toBuffer())],
     ['a truncated WebP', 'damaged', async () => halfOf(await photo().webp().toBuffer())],
