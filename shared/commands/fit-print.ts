@@ -2,7 +2,8 @@ import { contentRect, innerMatRect, matRect } from '../geometry/grid';
 import { paneWindow } from '../geometry/panes';
 import { toPaper, turnedSize } from '../geometry/paper';
 import { contains, intersection, inset } from '../geometry/rects';
-import { centreWindow, placedPaper, slideWindow, windowOnPaper } from '../geometry/window';
+import { mustStayWhole } from '../geometry/smallest-mat';
+import { centreWindow, placedPaper, slideWindow, spareShavings, windowOnPaper } from '../geometry/window';
 import type { Turns } from '../model/ids';
 import type { Print } from '../model/print';
 import type { Rect, Size } from '../model/rect';
@@ -28,10 +29,6 @@ export function frameOfGroup(doc: SpreadDocument, group: Pick<PaneGroup, 'matIds
   return { photo: paneWindow(members.map((mat) => contentRect(doc.format, doc.reveal, mat)), run).size, card: null };
 }
 
-/** Prints that a cut or glue would spoil: mounted whole wherever they fit. PRODUCT.md section 5, paper truth. */
-const mustStayWhole = ({ marks }: Print): boolean =>
-  !marks.digital && (marks.instantFilm || marks.oneOfAKind || marks.borrowedUntil !== null);
-
 const holds = (outer: Size, inner: Size): boolean => inner.width <= outer.width && inner.height <= outer.height;
 
 /** True where the print fits uncut on the card. A digital photo can be printed small enough for any. */
@@ -55,12 +52,15 @@ function keepZoneOn(print: Print, paper: Size): Rect | null {
   return print.keepZone && toPaper({ ...print, paperWidth: paper.width, paperHeight: paper.height }, print.keepZone);
 }
 
-/** The print trimmed to the photo, its window centred on the keep zone, for one turn. */
+/** The print trimmed to the photo, its window centred on the keep zone and leaving no shavings, for one turn. */
 function fitWindow(print: Print, photo: Size, turn: Turns, trim: TrimSettings): Placement {
   const window = turnedSize(photo, turn);
   const scaledWidth = print.marks.digital ? coverWidth(print, window) : null;
   const paper = placedPaper(print, { scaledWidth });
-  const at = centreWindow(window, paper, trim.finestMark, keepZoneOn(print, paper));
+  const keep = keepZoneOn(print, paper);
+  const centred = centreWindow(window, paper, trim.finestMark, keep);
+  const spared = keep && intersection(inset(keep, -trim.tolerance), { x: 0, y: 0, ...paper });
+  const at = print.marks.digital ? centred : spareShavings(centred, window, paper, spared, trim.finestMark);
   return { printId: print.id, mode: 'window', ...at, turn, scaledWidth };
 }
 

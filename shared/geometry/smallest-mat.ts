@@ -6,10 +6,10 @@ import { toPaper } from './paper';
 
 /**
  * True where a print must not be trimmed at all: instant film (its pack holds caustic paste), the only
- * print there is, or one that must go back.
+ * print there is, or one that must go back. A digital photo can be printed again. PRODUCT.md section 5.
  */
-export const mustStayWhole = (print: Pick<Print, 'marks'>): boolean =>
-  print.marks.instantFilm || print.marks.oneOfAKind || print.marks.borrowedUntil !== null;
+export const mustStayWhole = ({ marks }: Pick<Print, 'marks'>): boolean =>
+  !marks.digital && (marks.instantFilm || marks.oneOfAKind || marks.borrowedUntil !== null);
 
 /**
  * True size (Lengths) of the smallest mat on a page's grid whose photo, at this reveal, still holds the

@@ -1,4 +1,4 @@
-import { snapTo } from '../model/length';
+import { inches, snapTo } from '../model/length';
 import type { Print } from '../model/print';
 import type { Rect, Size } from '../model/rect';
 import type { Placement } from '../model/spread';
@@ -53,4 +53,27 @@ export function centreWindow(window: Size, paper: Size, finestMark: number, on?:
     paper,
     finestMark,
   );
+}
+
+/** A strip thinner than this is a shaving: a trimmer cannot hold it. Common practice. */
+export const SHAVING = inches(1 / 4);
+
+/**
+ * The window's place, slid to an edge of the paper where it would leave a mere shaving there, if it still
+ * holds `kept` then. The cut is spared, and so is a strip that no trimmer can hold.
+ *
+ * @param kept - what the window must hold, on the paper; null for nothing.
+ */
+export function spareShavings(at: { x: number; y: number }, window: Size, paper: Size, kept: Rect | null, finestMark: number): { x: number; y: number } {
+  return {
+    x: spareAxis(at.x, window.width, paper.width, kept && [kept.x, kept.x + kept.width], finestMark),
+    y: spareAxis(at.y, window.height, paper.height, kept && [kept.y, kept.y + kept.height], finestMark),
+  };
+}
+
+function spareAxis(at: number, window: number, paper: number, kept: readonly [number, number] | null, mark: number): number {
+  const room = paper - window;
+  if (room < SHAVING || room % mark !== 0) return at;
+  const flush = at > 0 && at < SHAVING ? 0 : at < room && room - at < SHAVING ? room : at;
+  return !kept || (kept[0] >= flush && kept[1] <= flush + window) ? flush : at;
 }

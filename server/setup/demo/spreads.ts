@@ -115,8 +115,15 @@ export function buildDemoSpreads(printByFile: ReadonlyMap<string, Print>, newId:
     return run(doc, { id: 'scheme.apply', args: placeScheme({ doc, prints }, scheme) });
   };
 
+  /** The headland's four panes spread apart, so that the lighthouse stands whole in the third. */
+  const spreadPanes = (doc: SpreadDocument): SpreadDocument => {
+    const headland = doc.panes.find((group) => group.content?.printId === idOf('headland.jpg'))!;
+    const apart = run(doc, { id: 'panes.setRun', args: { groupId: headland.id, run: 'apart' } });
+    return run(apart, { id: 'window.slide', args: { matId: headland.matIds[0]!, x: inches(1, 1 / 2), y: inches(1 / 4) } });
+  };
+
   const all = [...printByFile.keys()];
-  const out = inScheme(layOut(layOut(withTable(all), 'left', OUT_LEFT), 'right', OUT_RIGHT), 0);
+  const out = inScheme(spreadPanes(layOut(layOut(withTable(all), 'left', OUT_LEFT), 'right', OUT_RIGHT)), 0);
   const grassPrints = ['picnic.jpg', 'rope.jpg', 'thrift.jpg', 'ticket.jpg', 'beach.jpg', 'gulls.jpg', 'pim.jpg', 'seawindow.jpg', 'cliff.jpg', 'scone.jpg', 'station.jpg', 'tower.jpg'];
   const grass = layOut(layOut(withTable(grassPrints), 'left', GRASS_LEFT), 'right', GRASS_RIGHT);
   return [

@@ -17,7 +17,8 @@ describe('placing a print', () => {
     ['on the middle of the paper without a keep zone', null, { x: 19 * MARK, y: 11 * MARK }],
     ['on the keep zone, at the nearest mark', { x: 250, y: 180, width: 100, height: 100 }, { x: 19 * MARK, y: 16 * MARK }],
     ['as near to a keep zone in the corner as the paper reaches', { x: 50, y: 50, width: 100, height: 100 }, { x: 0, y: 0 }],
-    ['as near to a keep zone at the far edge as the paper reaches', { x: 400, y: 100, width: 100, height: 100 }, { x: 38 * MARK, y: 3 * MARK }],
+    ['as near to a keep zone at the far edge as the paper reaches', { x: 400, y: 100, width: 100, height: 100 }, { x: 38 * MARK, y: 0 }],
+    ['at the paper’s edge rather than a shaving away from it', { x: 250, y: 100, width: 100, height: 100 }, { x: 19 * MARK, y: 0 }],
   ])('centres its window %s', (_name, keepZone, at) => {
     const print = buildPrint({ keepZone });
     const doc = commandsWith([print]).after(oneMat(), placeCall(print.id, A));

@@ -135,10 +135,10 @@ describe('a mat that changes its size', () => {
   });
 
   it('keeps a window on its keep zone that was centred there', () => {
-    const zoned = buildPrint({ keepZone: { x: 50, y: 50, width: 100, height: 100 } });
+    const zoned = buildPrint({ keepZone: { x: 100, y: 100, width: 100, height: 100 } });
     const commands = commandsWith([zoned]);
     const doc = commands.after(oneMat(), placeCall(zoned.id, A), resize(4, 4));
-    expect(commands.photoOn(doc, A).window).toMatchObject({ x: 3 * MARK, y: 3 * MARK });
+    expect(commands.photoOn(doc, A).window).toMatchObject({ x: 11 * MARK, y: 11 * MARK });
   });
 
   it('keeps the window on the paper as it grows', () => {

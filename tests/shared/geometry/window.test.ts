@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { centreWindow, placedPaper, slideWindow, windowOnPaper } from '#shared/geometry/window';
+import { centreWindow, placedPaper, slideWindow, spareShavings, windowOnPaper } from '#shared/geometry/window';
 import { inches } from '#shared/model/length';
 
 const paper = { width: inches(6), height: inches(4) };
@@ -40,5 +40,27 @@ describe('a window', () => {
 describe('a digital photo', () => {
   it('is scaled in proportion', () => {
     expect(placedPaper({ paperWidth: inches(6), paperHeight: inches(4) }, { scaledWidth: inches(3) })).toEqual({ width: inches(3), height: inches(2) });
+  });
+});
+
+describe('a window that would leave a shaving', () => {
+  const keep = { x: inches(1), y: inches(1, 1 / 2), width: inches(2), height: inches(2) };
+
+  it('slides to the edge and spares the cut', () => {
+    expect(spareShavings({ x: inches(3 / 16), y: inches(1, 3 / 16) }, window, paper, keep, mark)).toEqual({ x: 0, y: inches(1, 3 / 8) });
+  });
+
+  it('stays where sliding would lose what it keeps', () => {
+    const edge = { ...keep, x: inches(1 / 8), width: inches(3, 5 / 8) };
+    expect(spareShavings({ x: inches(1 / 8), y: 0 }, window, paper, edge, mark).x).toBe(inches(1 / 8));
+  });
+
+  it('stays where a strip of a quarter inch or more comes off anyway', () => {
+    expect(spareShavings({ x: inches(1 / 4), y: inches(1 / 2) }, window, paper, keep, mark)).toEqual({ x: inches(1 / 4), y: inches(1 / 2) });
+  });
+
+  it('stays where the whole rest is a shaving', () => {
+    const tight = { width: inches(5, 7 / 8), height: inches(3) };
+    expect(spareShavings({ x: inches(1 / 16), y: inches(1 / 2) }, tight, paper, null, mark).x).toBe(inches(1 / 16));
   });
 });
