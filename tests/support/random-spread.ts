@@ -32,8 +32,12 @@ const PAPERS = [
   [3.5, 5],
 ] as const;
 
-/** Prints of all kinds of sizes, tones, keep zones and marks. */
-export function randomPrints(random: Random, count: number): Print[] {
+/**
+ * Prints of all kinds of sizes, tones, keep zones and marks.
+ *
+ * @param rasterSize - px on the long side; 64 as at intake, fewer where making it costs too much.
+ */
+export function randomPrints(random: Random, count: number, rasterSize = 64): Print[] {
   return Array.from({ length: count }, (_, i) => {
     const [width, height] = pick(random, PAPERS);
     const px = { width: width * 100, height: height * 100 };
@@ -53,7 +57,7 @@ export function randomPrints(random: Random, count: number): Print[] {
         { hex: '#336699', oklch: [tone, random() * 0.2, random() * 360], share: 0.5, role: 'vibrant' },
         { hex: '#808080', oklch: [random(), 0, 0], share: 0.4, role: 'area' },
       ],
-      raster: buildRaster(64, Math.round((64 * height) / width), (x, y) => [Math.min(1, Math.max(0, tone + ((x * 7 + y * 13) % 11) / 40 - 0.12)), (x % 5) / 40, (y % 7) / 40]),
+      raster: buildRaster(width >= height ? rasterSize : Math.round((rasterSize * width) / height), width >= height ? Math.round((rasterSize * height) / width) : rasterSize, (x, y) => [Math.min(1, Math.max(0, tone + ((x * 7 + y * 13) % 11) / 40 - 0.12)), (x % 5) / 40, (y % 7) / 40]),
     });
   });
 }
@@ -67,13 +71,14 @@ interface RandomParts {
   readonly mats: number;
   readonly prints: number;
   readonly format?: PageFormat;
+  readonly rasterSize?: number;
   /** Whether some mats are grouped into split prints. */
   readonly withPanes?: boolean;
 }
 
 /** A valid spread whose pages are filled by random splits; as many mats as asked, or as many as the grid holds. */
-export function randomSpread(random: Random, { mats: count, prints: printCount, format = formatOf('12x12in'), withPanes = true }: RandomParts): RandomSpread {
-  const prints = randomPrints(random, Math.max(1, printCount));
+export function randomSpread(random: Random, { mats: count, prints: printCount, format = formatOf('12x12in'), withPanes = true, rasterSize }: RandomParts): RandomSpread {
+  const prints = randomPrints(random, Math.max(1, printCount), rasterSize);
   const cells = (['left', 'right'] as const).flatMap((page, i) => splitPage(random, format, page, Math.floor((count + i) / 2)));
   const mats = cells.map((cell, i) => buildMat({ ...cell, id: matIdOf(i + 1), color: pick(random, CARD), content: randomContent(random, prints[i % prints.length]!) }));
   const grouped = withPanes ? groupSome(random, mats, prints) : { mats, panes: [] };

@@ -1,0 +1,29 @@
+import { existsSync } from 'node:fs';
+import { describe, expect, it } from 'vitest';
+import { CHECK_IDS } from '#shared/checks/check-ids';
+import { CHECKS } from '#shared/checks/registry';
+
+describe('the registry of checks', () => {
+  it.each(CHECK_IDS)('%s stands under its own id, in a file of its own, with a test of its own', (id) => {
+    expect(CHECKS[id].id).toBe(id);
+    expect(existsSync(new URL(`../../../shared/checks/${id}.ts`, import.meta.url))).toBe(true);
+    expect(existsSync(new URL(`./${id}.test.ts`, import.meta.url))).toBe(true);
+  });
+
+  it.each(CHECK_IDS)('%s has defaults within their ranges', (id) => {
+    for (const [name, { default: value, min, max }] of Object.entries(CHECKS[id].thresholds)) {
+      expect([name, min <= value && value <= max && min < max]).toEqual([name, true]);
+    }
+  });
+
+  it('lets matters of taste only be considered: no design check is a stop', () => {
+    const stops = CHECK_IDS.filter((id) => CHECKS[id].severity === 'stop' && CHECKS[id].needsFilledPages);
+    expect(stops).toEqual([]);
+  });
+
+  it('lets no two checks yield to each other', () => {
+    const reaches = (from: (typeof CHECK_IDS)[number], seen: readonly string[] = []): readonly string[] =>
+      (CHECKS[from].yieldsTo ?? []).flatMap((to) => (seen.includes(to) ? [to] : [to, ...reaches(to, [...seen, from])]));
+    for (const id of CHECK_IDS) expect(reaches(id)).not.toContain(id);
+  });
+});
