@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import type { Patch } from '../model/patch';
 import { idSchema, instantSchema, lineSchema, revisionSchema } from './common';
+import { fieldFaults } from './field-faults';
 import { matSchema, pageSchema, paneGroupSchema, schemeSchema, tableSchema } from './document';
 
 const changeOf = <T extends z.ZodType>(value: T) => z.strictObject({ before: value.nullable(), after: value.nullable() });
@@ -32,7 +33,11 @@ export const patchSchema = z.record(z.string().max(60), z.unknown()).transform((
     }
     const parsed = schema.safeParse(value);
     if (parsed.success) patch[key] = parsed.data;
-    else for (const issue of parsed.error.issues) ctx.addIssue({ code: 'custom', path: [key, ...issue.path], message: issue.message });
+    else {
+      for (const { path, message } of fieldFaults(parsed.error.issues)) {
+        ctx.addIssue({ code: 'custom', path: [key, ...path.split('.').filter((part) => part !== '')], message });
+      }
+    }
   }
   return patch as Patch;
 });
