@@ -1,4 +1,4 @@
-import { useRouteError } from 'react-router-dom';
+import { Navigate, useLocation, useRouteError } from 'react-router-dom';
 import { Button } from '@/components/button';
 import { PlainPage } from '@/components/plain-page';
 import { ApiError } from '@/lib/api';
@@ -7,7 +7,11 @@ import { NotFound } from './not-found';
 /** What a screen shows when it could not be drawn or loaded. */
 export function RouteError() {
   const error = useRouteError();
+  const { pathname, search } = useLocation();
   if (error instanceof ApiError && error.code === 'not-found') return <NotFound />;
+  if (error instanceof ApiError && error.code === 'unauthenticated') {
+    return <Navigate to={`/sign-in?next=${encodeURIComponent(pathname + search)}`} replace />;
+  }
   return (
     <PlainPage title={error instanceof ApiError ? 'This could not be fetched' : 'Something slipped'}>
       <p>

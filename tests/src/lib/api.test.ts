@@ -1,6 +1,6 @@
 import { describe, expect, it, vi } from 'vitest';
 import { z } from 'zod';
-import { api, ApiError } from '@/lib/api';
+import { api, type ApiError } from '@/lib/api';
 import { fakeApi, problem } from '../../support/fake-api';
 
 const schema = z.object({ name: z.string() });

@@ -19,7 +19,6 @@ function setUp(parts: { zone?: Rect | null; mayEdit?: boolean } = {}) {
       step={STEP}
       mayEdit={parts.mayEdit ?? true}
       onSave={onSave}
-      onFocusChange={vi.fn()}
     />,
   );
   return onSave;

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { MAX_UPLOAD_BYTES, type UploadedPrint } from '#shared/contracts/prints';
+import { MAX_UPLOAD_BYTES, printSchema, type UploadedPrint } from '#shared/contracts/prints';
 import { createUploadQueue, refusalBeforeSending, shownName } from '@/features/prints/model/upload-queue';
 import { buildPrint } from '../../support/builders';
 
@@ -25,7 +25,7 @@ function setUp(mayRetry = false) {
           file,
           pileId,
           progress,
-          succeed: (known = false) => resolve({ print: buildPrint(), known }),
+          succeed: (known = false) => resolve({ print: printSchema.parse(buildPrint()), known }),
           fail: (reason) => reject(new Error(reason)),
         });
       }),

@@ -1,10 +1,10 @@
-import { useState } from 'react';
 import { toPaper } from '#shared/geometry/paper';
 import { toInches, UNITS_PER_INCH } from '#shared/model/length';
 import type { Print } from '#shared/model/print';
 import type { TrimSettings } from '#shared/model/spread';
 import { formatSize, type Unit } from '#shared/words/measure';
 import { PrintPicture } from '@/components/print-picture';
+import { useWidth } from '@/lib/use-width';
 import type { PrintChange } from '../api/print-mutations';
 import { middleZone, toPxRect } from '../model/zone-edit';
 import { KeepZoneEditor } from './keep-zone-editor';
@@ -18,20 +18,21 @@ interface BigPrintProps {
   readonly onSave: (change: PrintChange) => void;
 }
 
-/** Room for the opened print, in px. */
+/** The most room for the opened print, in px. */
 const ROOM = { width: 452, height: 468 };
 
 /** The opened print as large as there is room, with a ruler along two edges and its keep zone on it. */
 export function BigPrint({ print, unit, trim, mayEdit, onSave }: BigPrintProps) {
-  const pxPerInch = Math.floor(Math.min(ROOM.width / toInches(print.paperWidth), ROOM.height / toInches(print.paperHeight)));
+  const [width, room] = useWidth<HTMLDivElement>(ROOM.width);
+  const pxPerInch = Math.min(Math.min(width, ROOM.width) / toInches(print.paperWidth), ROOM.height / toInches(print.paperHeight));
   const pxPerLength = pxPerInch / UNITS_PER_INCH;
   const zone = print.keepZone && toPaper(print, print.keepZone);
-  const [hint, setHint] = useState(false);
   const paper = { width: print.paperWidth, height: print.paperHeight };
   return (
     <div className="mb-4">
       <div className="big-print">
-        <div className="relative w-max" style={{ width: paper.width * pxPerLength }}>
+        <div ref={room} aria-hidden="true" />
+        <div className="relative" style={{ width: paper.width * pxPerLength }}>
           <PrintPicture print={print} pxPerInch={pxPerInch} pictureSize="large" />
           <PaperRulers paper={paper} unit={unit} pxPerLength={pxPerLength} />
           <KeepZoneEditor
@@ -41,7 +42,6 @@ export function BigPrint({ print, unit, trim, mayEdit, onSave }: BigPrintProps) 
             pxPerLength={pxPerLength}
             step={trim.finestMark}
             mayEdit={mayEdit}
-            onFocusChange={setHint}
             onSave={(rect) => onSave({ keepZone: toPxRect(print, rect) })}
           />
         </div>
@@ -63,9 +63,9 @@ export function BigPrint({ print, unit, trim, mayEdit, onSave }: BigPrintProps) 
             Clear
           </button>
         )}
-        {hint && (
+        {mayEdit && zone !== null && (
           <span className="w-full text-12 text-ink-2">
-            Arrows move it by the trimmer’s finest mark, with <kbd>Shift</kbd> by four; <kbd>Alt</kbd> and arrows pull its right and lower edge.
+            Drag it, or use arrows; <kbd>Shift</kbd> goes further, <kbd>Alt</kbd> pulls its right and lower edge.
           </span>
         )}
       </div>

@@ -14,7 +14,6 @@ interface KeepZoneEditorProps {
   readonly step: Length;
   readonly mayEdit: boolean;
   readonly onSave: (zone: Rect) => void;
-  readonly onFocusChange: (hasFocus: boolean) => void;
 }
 
 /** A keep zone is at least this many steps on a side. */
@@ -31,7 +30,7 @@ interface Gesture {
  * The keep zone as a rectangle on the paper: drawn, moved and pulled by pointer; with the focus on it, by
  * arrows. It is stored once, when the pointer or the key lets go.
  */
-export function KeepZoneEditor({ zone, paper, unit, pxPerLength, step, mayEdit, onSave, onFocusChange }: KeepZoneEditorProps) {
+export function KeepZoneEditor({ zone, paper, unit, pxPerLength, step, mayEdit, onSave }: KeepZoneEditorProps) {
   const [gesture, setGesture] = useState<Gesture | null>(null);
   const [draft, setDraft] = useState<Rect | null>(null);
   const shown = draft ?? zone;
@@ -97,11 +96,7 @@ export function KeepZoneEditor({ zone, paper, unit, pxPerLength, step, mayEdit, 
             onPointerDown={(event) => begin(event, null)}
             onKeyDown={press}
             onKeyUp={(event) => ARROWS[event.key] !== undefined && gesture === null && end()}
-            onFocus={() => onFocusChange(true)}
-            onBlur={() => {
-              onFocusChange(false);
-              end();
-            }}
+            onBlur={end}
           />
           {mayEdit &&
             HANDLES.map((handle) => (

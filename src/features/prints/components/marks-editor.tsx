@@ -1,6 +1,7 @@
 import { useId, type ReactNode } from 'react';
 import type { Print } from '#shared/model/print';
 import type { PrintChange } from '../api/print-mutations';
+import { Fact } from './fact';
 
 interface MarksEditorProps {
   readonly print: Print;
@@ -66,31 +67,26 @@ export function MarksEditor({ print, mayEdit, onSave }: MarksEditorProps) {
         ]}
         onSave={onSave}
       />
-      <div>
-        <dt>
-          <label htmlFor={`${id}-borrowed`}>Borrowed</label>
-        </dt>
-        <dd>
-          <span className="text-13 text-ink-2">until</span>
-          <input
-            key={marks.borrowedUntil}
-            id={`${id}-borrowed`}
-            type="date"
-            className="field-input num w-40!"
-            defaultValue={marks.borrowedUntil ?? ''}
-            disabled={!mayEdit}
-            onBlur={(event) => {
-              const date = event.target.value === '' ? null : event.target.value;
-              if (date !== marks.borrowedUntil) onSave({ marks: { borrowedUntil: date } });
-            }}
-          />
-          {marks.borrowedUntil !== null && mayEdit && (
-            <button type="button" className="opt" onClick={() => onSave({ marks: { borrowedUntil: null } })}>
-              It is ours
-            </button>
-          )}
-        </dd>
-      </div>
+      <Fact label="Borrowed" htmlFor={`${id}-borrowed`}>
+        <span className="text-13 text-ink-2">until</span>
+        <input
+          key={marks.borrowedUntil}
+          id={`${id}-borrowed`}
+          type="date"
+          className="field-input num w-40!"
+          defaultValue={marks.borrowedUntil ?? ''}
+          disabled={!mayEdit}
+          onBlur={(event) => {
+            const date = event.target.value === '' ? null : event.target.value;
+            if (date !== marks.borrowedUntil) onSave({ marks: { borrowedUntil: date } });
+          }}
+        />
+        {marks.borrowedUntil !== null && mayEdit && (
+          <button type="button" className="opt" onClick={() => onSave({ marks: { borrowedUntil: null } })}>
+            It is ours
+          </button>
+        )}
+      </Fact>
     </>
   );
 }
@@ -104,23 +100,20 @@ interface ChoiceProps extends Omit<MarksEditorProps, 'print'> {
 /** One of a few, each a button that says whether it is chosen. */
 function Choice({ label, options, mayEdit, onSave, children }: ChoiceProps) {
   return (
-    <div>
-      <dt>{label}</dt>
-      <dd role="group" aria-label={label}>
-        {options.map((option) => (
-          <button
-            key={option.label}
-            type="button"
-            className="opt"
-            aria-pressed={option.isOn}
-            disabled={!mayEdit}
-            onClick={() => !option.isOn && onSave(option.change)}
-          >
-            {option.label}
-          </button>
-        ))}
-        {children}
-      </dd>
-    </div>
+    <Fact label={label}>
+      {options.map((option) => (
+        <button
+          key={option.label}
+          type="button"
+          className="opt"
+          aria-pressed={option.isOn}
+          disabled={!mayEdit}
+          onClick={() => !option.isOn && onSave(option.change)}
+        >
+          {option.label}
+        </button>
+      ))}
+      {children}
+    </Fact>
   );
 }

@@ -3,6 +3,7 @@ import { pictureUrl } from '#shared/contracts/prints';
 import { centreCrop, inverseTurn, turnedSize, turnInBox } from '#shared/geometry/paper';
 import type { Print, PxRect } from '#shared/model/print';
 import { Button } from '@/components/button';
+import { useWidth } from '@/lib/use-width';
 import { growPaper, movePaper } from '../model/paper-edit';
 
 interface PaperRectEditorProps {
@@ -12,6 +13,8 @@ interface PaperRectEditorProps {
 }
 
 const ROOM = { width: 452, height: 400 };
+/** Space kept at the left, where the rulers stand in the print's own view. */
+const MARGIN = 24;
 
 /** One press of an arrow, and of "more" or "less", as a share of the picture's long side. */
 const NUDGE = 0.004;
@@ -26,7 +29,8 @@ export function PaperRectEditor({ print, onSave, onDone }: PaperRectEditorProps)
   const [from, setFrom] = useState<{ readonly x: number; readonly y: number; readonly rect: PxRect } | null>(null);
   const image = { width: print.imageWidth, height: print.imageHeight };
   const upright = turnedSize(image, print.turns);
-  const scale = Math.min(ROOM.width / upright.width, ROOM.height / upright.height);
+  const [width, room] = useWidth<HTMLDivElement>(ROOM.width);
+  const scale = Math.min(Math.min(width - MARGIN, ROOM.width) / upright.width, ROOM.height / upright.height);
   const outline = turnInBox(rect, image, print.turns);
 
   /** A shift as it is seen, back in the directions of the file. */
@@ -49,6 +53,7 @@ export function PaperRectEditor({ print, onSave, onDone }: PaperRectEditorProps)
   };
   return (
     <div className="mb-4">
+      <div ref={room} aria-hidden="true" />
       <div className="paper-nudge" style={{ width: upright.width * scale, height: upright.height * scale }}>
         <img
           src={pictureUrl(print.id, 'medium')}

@@ -33,7 +33,11 @@ export function PileSection({ studioId, group, isEditable, action, onFail, child
           {name}
         </h2>
         <span className="num text-12 text-ink-2">{group.prints.length}</span>
-        {sharedWithContributors && <span className="text-12 text-ink-2">shared with contributors</span>}
+        {sharedWithContributors && (
+          <span className="text-12 text-ink-2" title="Contributors may add to this pile">
+            shared
+          </span>
+        )}
         <span className="ml-auto flex items-center gap-1">
           {action}
           {id !== null && isEditable && (

@@ -1,5 +1,4 @@
 import { useState } from 'react';
-import { differsInShape } from '#shared/geometry/paper';
 import { smallestMat } from '#shared/geometry/smallest-mat';
 import type { Print } from '#shared/model/print';
 import { Button, IconButton } from '@/components/button';
@@ -10,10 +9,11 @@ import { Notice } from '@/components/notice';
 import { ApiError } from '@/lib/api';
 import { sentenceOf } from '@/lib/form-errors';
 import { useDeletePrint, useUpdatePrint, type PrintChange } from '../api/print-mutations';
-import { turnPrint } from '../model/paper-edit';
+import { needsALook, turnPrint } from '../model/paper-edit';
 import type { PileGroup } from '../model/pile-groups';
 import { cautionsOf, type Sizing } from '../model/table-words';
 import { BigPrint } from './big-print';
+import { Fact } from './fact';
 import { MarksEditor } from './marks-editor';
 import { PaletteStrip } from './palette-strip';
 import { PaperRectEditor } from './paper-rect-editor';
@@ -35,7 +35,7 @@ export function PrintPanel({ print, groups, sizing, mayEdit, mayDelete, onClose 
   const [failure, setFailure] = useState<string | null>(null);
   const [isNaming, setIsNaming] = useState(false);
   const [isNudging, setIsNudging] = useState(false);
-  const isOdd = differsInShape(print);
+  const isOdd = needsALook(print);
   const fail = (error: unknown): void =>
     setFailure(
       error instanceof ApiError && error.code === 'stale-revision'
@@ -94,50 +94,39 @@ export function PrintPanel({ print, groups, sizing, mayEdit, mayDelete, onClose 
           </li>
         )}
       </ul>
-      <dl className="facts">
+      <div className="facts">
         <SizeChoice print={print} unit={sizing.unit} mayEdit={mayEdit} onSave={save} />
-        <div>
-          <dt>Smallest mat</dt>
-          <dd>
-            <Measure of={smallestMat(print, sizing.format, sizing.reveal, sizing.trim)} unit={sizing.unit} />
-          </dd>
-        </div>
-        <div>
-          <dt>Picture</dt>
-          <dd>
-            <Button variant="bare" disabled={!mayEdit} onClick={() => save(turnPrint(print))}>
-              <TurnIcon /> Turn upright
-            </Button>
-            {!isNudging && !isOdd && mayEdit && (
-              <button type="button" className="opt" onClick={() => setIsNudging(true)}>
-                Nudge the paper
-              </button>
-            )}
-          </dd>
-        </div>
+        <Fact label="Smallest mat">
+          <Measure of={smallestMat(print, sizing.format, sizing.reveal, sizing.trim)} unit={sizing.unit} />
+        </Fact>
+        <Fact label="Picture">
+          <Button variant="bare" disabled={!mayEdit} onClick={() => save(turnPrint(print))}>
+            <TurnIcon /> Turn upright
+          </Button>
+          {!isNudging && !isOdd && mayEdit && (
+            <button type="button" className="opt" onClick={() => setIsNudging(true)}>
+              Nudge the paper
+            </button>
+          )}
+        </Fact>
         <MarksEditor print={print} mayEdit={mayEdit} onSave={save} />
-        <div>
-          <dt>
-            <label htmlFor="print-pile">Pile</label>
-          </dt>
-          <dd>
-            <select
-              id="print-pile"
-              className="field-input max-w-[240px]"
-              value={print.pileId ?? ''}
-              disabled={!mayEdit}
-              onChange={(event) => save({ pileId: event.target.value === '' ? null : event.target.value })}
-            >
-              {groups.map(({ id, name }) => (
-                <option key={id ?? 'loose'} value={id ?? ''}>
-                  {name}
-                </option>
-              ))}
-            </select>
-          </dd>
-        </div>
+        <Fact label="Pile" htmlFor="print-pile">
+          <select
+            id="print-pile"
+            className="field-input max-w-[240px]"
+            value={print.pileId ?? ''}
+            disabled={!mayEdit}
+            onChange={(event) => save({ pileId: event.target.value === '' ? null : event.target.value })}
+          >
+            {groups.map(({ id, name }) => (
+              <option key={id ?? 'loose'} value={id ?? ''}>
+                {name}
+              </option>
+            ))}
+          </select>
+        </Fact>
         <PaletteStrip palette={print.palette} />
-      </dl>
+      </div>
       {mayDelete && (
         <p className="mt-4 text-right">
           <button

@@ -5,6 +5,7 @@ import { Button } from '@/components/button';
 import { TextField } from '@/components/field';
 import { changeSize, hasSize, laidLike, readLength, sizesFor } from '../model/paper-edit';
 import type { PrintChange } from '../api/print-mutations';
+import { Fact } from './fact';
 
 interface SizeChoiceProps {
   readonly print: Print;
@@ -24,34 +25,31 @@ export function SizeChoice({ print, unit, mayEdit, onSave }: SizeChoiceProps) {
   const ready = sizes.slice(0, READY);
   const isListed = current !== undefined && ready.includes(current);
   return (
-    <div>
-      <dt>Size</dt>
-      <dd role="group" aria-label="Size" className="flex-wrap">
-        {ready.map((size) => (
-          <button
-            key={size.name}
-            type="button"
-            className="opt"
-            aria-pressed={size === current}
-            disabled={!mayEdit}
-            onClick={() => size !== current && onSave(changeSize(print, laidLike(size, print)))}
-          >
-            <span className="num">{size === current ? laidName(print, size.name, unit) : size.name}</span>
-          </button>
-        ))}
-        {!isListed && (
-          <button type="button" className="opt" aria-pressed="true" disabled={!mayEdit} onClick={() => setIsOther(true)}>
-            <span className="num">{current?.name ?? formatSize({ width: print.paperWidth, height: print.paperHeight }, unit)}</span>
-          </button>
-        )}
-        {mayEdit && (
-          <button type="button" className="opt" aria-expanded={isOther} onClick={() => setIsOther(!isOther)}>
-            Other
-          </button>
-        )}
-        {isOther && <OtherSize print={print} unit={unit} onSave={onSave} onDone={() => setIsOther(false)} />}
-      </dd>
-    </div>
+    <Fact label="Size">
+      {ready.map((size) => (
+        <button
+          key={size.name}
+          type="button"
+          className="opt"
+          aria-pressed={size === current}
+          disabled={!mayEdit}
+          onClick={() => size !== current && onSave(changeSize(print, laidLike(size, print)))}
+        >
+          <span className="num">{size === current ? laidName(print, size.name, unit) : size.name}</span>
+        </button>
+      ))}
+      {!isListed && (
+        <button type="button" className="opt" aria-pressed="true" disabled={!mayEdit} onClick={() => setIsOther(true)}>
+          <span className="num">{current?.name ?? formatSize({ width: print.paperWidth, height: print.paperHeight }, unit)}</span>
+        </button>
+      )}
+      {mayEdit && (
+        <button type="button" className="opt" aria-expanded={isOther} onClick={() => setIsOther(!isOther)}>
+          Other
+        </button>
+      )}
+      {isOther && <OtherSize print={print} unit={unit} onSave={onSave} onDone={() => setIsOther(false)} />}
+    </Fact>
   );
 }
 

@@ -13,7 +13,7 @@ import { useFileDrop } from '../hooks/use-file-drop';
 import { useLetterAfterM } from '../hooks/use-letter-after-m';
 import { usePileDrag } from '../hooks/use-pile-drag';
 import { useUploadQueue } from '../hooks/use-upload-queue';
-import { groupByPile, pileByLetter } from '../model/pile-groups';
+import { groupByPile, pileByLetter, type PileGroup } from '../model/pile-groups';
 import type { Sizing } from '../model/table-words';
 import { ArrivalsList } from './arrivals-list';
 import { FileButton } from './file-button';
@@ -84,7 +84,7 @@ export function SortView({ studioId, sizing, mayEdit, mayDelete, onTable, setOnT
   return (
     <div className="sort-screen" data-dropping={isDropping && mayEdit}>
       <div className="sort-table">
-        <SortHead unit={sizing.unit}>
+        <SortHead unit={sizing.unit} isForSpread={onTable !== undefined}>
           {mayEdit && (
             <>
               <FileButton label="Add prints" onFiles={takeFiles} />
@@ -159,13 +159,19 @@ export function SortView({ studioId, sizing, mayEdit, mayDelete, onTable, setOnT
   );
 }
 
-function ChooseAll({ group, onTable, setOnTable }: { readonly group: { readonly name: string; readonly prints: readonly { readonly id: string }[] }; readonly onTable: ReadonlySet<string>; readonly setOnTable: SortViewProps['setOnTable'] }) {
+interface ChooseAllProps {
+  readonly group: PileGroup;
+  readonly onTable: ReadonlySet<string>;
+  readonly setOnTable: SortViewProps['setOnTable'];
+}
+
+/** Means a whole pile for the spread, or none of it. */
+function ChooseAll({ group, onTable, setOnTable }: ChooseAllProps) {
   const ids = group.prints.map(({ id }) => id);
   const areAllOn = ids.every((id) => onTable.has(id));
   return (
     <button type="button" className="link-button text-12 text-ink-2" onClick={() => setOnTable?.(ids, !areAllOn)}>
-      {areAllOn ? 'Put all away' : 'Choose all'}
-      {' '}<span className="visually-hidden">of {group.name}</span>
+      {areAllOn ? 'Put all away' : 'Choose all'} <span className="visually-hidden">of {group.name}</span>
     </button>
   );
 }

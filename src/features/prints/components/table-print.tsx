@@ -54,16 +54,20 @@ export const TablePrint = memo(function TablePrint({
       >
         <PrintPicture print={print} state={isHeld ? 'gone' : 'rest'} decorative />
       </button>
+      {isOnSpread !== undefined && !isHeld && (
+        <input
+          type="checkbox"
+          className="on-spread"
+          aria-label={`${print.title} on this spread`}
+          title={isOnSpread ? 'Meant for this spread' : 'Choose for this spread'}
+          checked={isOnSpread}
+          disabled={!isEditable}
+          onChange={(event) => onChoose(print.id, event.target.checked)}
+        />
+      )}
       <div className="mt-1 flex flex-wrap items-center gap-1">
         {isHeld ? <Tag tone="quiet">in hand</Tag> : <Tag tone={tag.tone}>{tag.words}</Tag>}
         {print.marks.digital && !isHeld && <Tag tone="quiet">digital</Tag>}
-        {isOnSpread !== undefined && !isHeld && (
-          <label className="on-spread" data-on={isOnSpread}>
-            <input type="checkbox" checked={isOnSpread} disabled={!isEditable} onChange={(event) => onChoose(print.id, event.target.checked)} />
-            <span className="visually-hidden">{print.title} </span>
-            {isOnSpread ? 'on this spread' : 'choose'}
-          </label>
-        )}
       </div>
     </li>
   );

@@ -1,4 +1,4 @@
-import { centreCrop, turnedSize } from '#shared/geometry/paper';
+import { centreCrop, differsInShape, turnedSize } from '#shared/geometry/paper';
 import { INCH_PRINT_SIZES, INSTANT_PRINT_SIZES, METRIC_PRINT_SIZES, type PrintSize } from '#shared/model/guess-print-size';
 import type { Turns } from '#shared/model/ids';
 import { inches, millimetres, type Length } from '#shared/model/length';
@@ -59,6 +59,17 @@ export function readLength(text: string, unit: Unit): Length | null {
   const value = decimal !== undefined ? Number(decimal.replace(',', '.')) : Number(whole ?? 0) + Number(numerator) / Number(denominator);
   const length = unit === 'in' ? inches(value) : millimetres(value * 10);
   return length >= inches(1 / 2) && length <= inches(40) ? length : null;
+}
+
+/**
+ * True where file and paper differ in shape and nobody has yet looked: the paper rectangle is still the centre
+ * crop that it started from.
+ */
+export function needsALook(print: Print): boolean {
+  const { x, y, width, height } = print.paperRect;
+  const start = centreCrop({ width: print.imageWidth, height: print.imageHeight }, { width: print.paperWidth, height: print.paperHeight }, print.turns);
+  const isUntouched = x === start.x && y === start.y && width === start.width && height === start.height;
+  return isUntouched && differsInShape(print);
 }
 
 /** The paper rectangle moved by whole pixels, in the oriented original. It may leave the image: there the paper is white. */
