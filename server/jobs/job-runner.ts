@@ -76,7 +76,8 @@ export async function runNextJob(deps: RunnerDeps, signal: AbortSignal): Promise
   const job = await claimNextJob(dataSource, now(), claimMs);
   if (!job) return false;
   const claim = claimOn(dataSource, job, now, claimMs);
-  const renewal = setInterval(() => void claim.renew().catch((error: unknown) => log.warn({ err: error }, 'could not renew a job')), RENEW_MS);
+  const renew = (): void => void claim.renew().catch((error: unknown) => log.warn({ err: error }, 'could not renew a job'));
+  const renewal = setInterval(renew, RENEW_MS).unref();
   try {
     if (job.attempts > MAX_ATTEMPTS) throw new AppError('unavailable', { reason: 'tried-too-often' });
     const handler = handlers[job.kind];

@@ -114,5 +114,7 @@ function documentRefused({ faults }: ErrorData): string {
   const all = list(faults) as readonly DocumentFault[];
   const [first] = all;
   if (!first) return 'The spread does not fit together: undo the last step and try again.';
-  return all.length === 1 ? faultSentence(first) : `${faultSentence(first)} There are ${all.length - 1} more faults like this.`;
+  const more = all.length - 1;
+  if (more === 0) return faultSentence(first);
+  return `${faultSentence(first)} There ${more === 1 ? 'is one more fault' : `are ${more} more faults`}.`;
 }
