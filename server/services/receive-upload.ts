@@ -24,7 +24,7 @@ export interface ReceivedUpload {
 }
 
 /** So many bodies are read at once; the rest wait unread, so that neither memory nor sockets' buffers grow. */
-const RECEIVING_AT_ONCE = 8;
+const RECEIVING_AT_ONCE = 32;
 const MAX_WAITING = 400;
 /** A body that claims more than this is not even drained. */
 const MAX_DRAINED_BYTES = 4 * MAX_UPLOAD_BYTES;
