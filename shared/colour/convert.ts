@@ -17,10 +17,6 @@ const RGB_TO_XYZ = [
   0.41239079926595934, 0.357584339383878, 0.1804807884018343, 0.21263900587151027, 0.715168678767756,
   0.07219231536073371, 0.01933081871559182, 0.11919477979462598, 0.9505321522496607,
 ] as const;
-const XYZ_TO_RGB = [
-  3.2409699419045226, -1.537383177570094, -0.4986107602930034, -0.9692436362808796, 1.8759675015077202,
-  0.04155505740717559, 0.05563007969699366, -0.20397695888897652, 1.0569715142428786,
-] as const;
 const XYZ_TO_LMS = [
   0.819022437996703, 0.3619062600528904, -0.1288737815209879, 0.0329836539323885, 0.9292868615863434,
   0.0361446663506424, 0.0481771893596242, 0.2642395317527308, 0.6335478284694309,
@@ -56,8 +52,6 @@ const LINEAR = Float64Array.from({ length: 256 }, (_, value) => {
   return v <= 0.04045 ? v / 12.92 : ((v + 0.055) / 1.055) ** 2.4;
 });
 
-const encodeChannel = (v: number): number => (v <= 0.0031308 ? 12.92 * v : 1.055 * v ** (1 / 2.4) - 0.055);
-
 /** Channels of `#rrggbb`, 0–255. @throws RangeError for any other text. */
 export function hexToRgb(hex: Hex): Rgb {
   if (!/^#[0-9a-f]{6}$/i.test(hex)) throw new RangeError(`not a colour of the form #rrggbb: ${hex}`);
@@ -81,10 +75,6 @@ export function xyzToOklab(x: number, y: number, z: number): Triple {
   return multiply(LMS_TO_OKLAB, Math.cbrt(l), Math.cbrt(m), Math.cbrt(s));
 }
 
-function oklabToXyz(l: number, a: number, b: number): Triple {
-  const [p, q, r] = multiply(OKLAB_TO_LMS, l, a, b);
-  return multiply(LMS_TO_XYZ, cube(p), cube(q), cube(r));
-}
 
 function xyzToLab(x: number, y: number, z: number): Triple {
   const fx = labCurve(x / WHITE_X);
@@ -130,39 +120,6 @@ export function oklabToOklch([l, a, b]: Oklab): Oklch {
   const hue = (Math.atan2(b, a) * 180) / Math.PI;
   return [l, chroma, hue < 0 ? hue + 360 : hue];
 }
-
-export function oklchToOklab([l, c, h]: Oklch): Oklab {
-  const angle = (h * Math.PI) / 180;
-  return [l, c * Math.cos(angle), c * Math.sin(angle)];
-}
-
-/** Slack for a channel that leaves 0–1 only by rounding. */
-const GAMUT_SLACK = 1e-4;
-const GAMUT_HALVINGS = 18;
-
-/**
- * The nearest `#rrggbb`. A colour outside sRGB keeps its lightness and hue and gives up as much chroma
- * as it must; lightness is first held to 0–1.
- */
-export function oklabToHex([lightness, a, b]: Oklab): Hex {
-  const l = Math.min(1, Math.max(0, lightness));
-  const linearAt = (share: number): Triple => multiply(XYZ_TO_RGB, ...oklabToXyz(l, a * share, b * share));
-  const fits = (rgb: Triple): boolean => rgb.every((v) => v >= -GAMUT_SLACK && v <= 1 + GAMUT_SLACK);
-  let rgb = linearAt(1);
-  if (!fits(rgb)) {
-    let inside = 0;
-    let outside = 1;
-    for (let i = 0; i < GAMUT_HALVINGS; i++) {
-      const middle = (inside + outside) / 2;
-      if (fits(linearAt(middle))) inside = middle;
-      else outside = middle;
-    }
-    rgb = linearAt(inside);
-  }
-  return rgbToHex(...(rgb.map((v) => encodeChannel(Math.max(0, v)) * 255) as Triple));
-}
-
-export const oklchToHex = (oklch: Oklch): Hex => oklabToHex(oklchToOklab(oklch));
 
 /** Euclidean distance in OKLab: good enough to sort colours into groups; differences that people read use CIEDE2000. */
 export const oklabDistance = (p: Oklab, q: Oklab): number => Math.hypot(p[0] - q[0], p[1] - q[1], p[2] - q[2]);

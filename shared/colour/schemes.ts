@@ -4,7 +4,8 @@ import type { Mat, Scheme, SchemeColor, SpreadDocument } from '../model/spread';
 import type { CommandArgs } from '../commands/calls';
 import { assignCards, type CardRole } from './assign-cards';
 import { cardUnits } from './card-units';
-import { oklchToHex, type Oklch } from './convert';
+import type { Oklch } from './convert';
+import { oklchToHex } from './css-color';
 import { innersFor } from './thin-inners';
 import { photoColors, type PhotoColor } from './photo-colors';
 

@@ -7,12 +7,11 @@ import {
   hexToOklch,
   hexToRgb,
   labFromOklab,
-  oklabToHex,
-  oklchToHex,
   rgbToHex,
   rgbToXyz,
   xyzToOklab,
 } from '#shared/colour/convert';
+import { oklchToHex, parseColor } from '#shared/colour/css-color';
 
 const hexes = fc.tuple(fc.nat(255), fc.nat(255), fc.nat(255)).map(([r, g, b]) => rgbToHex(r, g, b));
 const near = (actual: readonly number[], expected: readonly number[], tolerance: number): void =>
@@ -73,10 +72,9 @@ describe('conversions', () => {
     );
   });
 
-  it('comes back to the very same hex from OKLab and OKLCH', () => {
+  it('comes back to the very same hex from OKLCH', () => {
     fc.assert(
       fc.property(hexes, (hex) => {
-        expect(oklabToHex(hexToOklab(hex))).toBe(hex);
         // A hue of a near-grey is dropped, which may move a channel by one.
         if (hexToOklch(hex)[1] > 0.01) expect(oklchToHex(hexToOklch(hex))).toBe(hex);
       }),
@@ -85,11 +83,27 @@ describe('conversions', () => {
 
   it('keeps lightness and hue of a colour outside sRGB and gives up chroma', () => {
     const [l, c, h] = hexToOklch(oklchToHex([0.7, 0.4, 150]));
-    expect(l).toBeCloseTo(0.7, 2);
-    expect(h).toBeCloseTo(150, 0);
+    // CSS Color 4 clips where the eye sees no difference (deltaE OK 0.02), so neither is kept to the last digit.
+    expect(Math.abs(l - 0.7)).toBeLessThan(0.02);
+    expect(Math.abs(h - 150)).toBeLessThan(6);
     expect(c).toBeLessThan(0.4);
     expect(oklchToHex([1.4, 0.2, 30])).toBe('#ffffff');
     expect(oklchToHex([-0.2, 0.2, 30])).toBe('#000000');
+  });
+
+  it.each([
+    ['#1D4F5C', '#1d4f5c'],
+    [' #fff ', '#ffffff'],
+    // CSS Color 4: named colours.
+    ['teal', '#008080'],
+    ['rgb(29 79 92)', '#1d4f5c'],
+    ['hsl(200 50% 50%)', '#4095bf'],
+    ['rgb(0 0 0 / 0.5)', '#000000'],
+    ['sea', null],
+    ['', null],
+    ['#12345', null],
+  ])('reads %j as %j', (text, hex) => {
+    expect(parseColor(text)).toBe(hex);
   });
 
   it('gives greys no hue', () => {

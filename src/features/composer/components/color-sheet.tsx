@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import { parseColor } from '#shared/colour/css-color';
 import { colorName } from '#shared/colour/name';
 import type { Hex } from '#shared/model/ids';
 import type { Print } from '#shared/model/print';
@@ -11,10 +12,12 @@ interface ColorSheetProps {
   readonly onChoose: (color: Hex) => void;
 }
 
-/** Any colour for a mat or a page: those at hand first, then a hex code or the system's picker. */
+const HOW_TO_TYPE = 'Type a CSS colour, such as #1d4f5c or teal.';
+
+/** Any colour for a mat or a page: those at hand first, then a typed one or the system's picker. */
 export function ColorSheet({ heading, value, groups, onChoose }: ColorSheetProps) {
   const [typed, setTyped] = useState(value ?? '');
-  const isHex = /^#[0-9a-f]{6}$/i.test(typed);
+  const parsed = parseColor(typed);
   return (
     <div className="color-sheet">
       <h3>{heading}</h3>
@@ -44,25 +47,25 @@ export function ColorSheet({ heading, value, groups, onChoose }: ColorSheetProps
         className="color-typed"
         onSubmit={(event) => {
           event.preventDefault();
-          if (isHex) onChoose(typed.toLowerCase());
+          if (parsed) onChoose(parsed);
         }}
       >
-        <input type="color" aria-label="Pick any colour" value={isHex ? typed.toLowerCase() : '#888888'} onChange={(event) => setTyped(event.target.value)} />
+        <input type="color" aria-label="Pick any colour" value={parsed ?? '#888888'} onChange={(event) => setTyped(event.target.value)} />
         <input
           type="text"
           className="field-input num"
           aria-label="Colour code"
-          aria-invalid={typed !== '' && !isHex}
+          aria-invalid={typed !== '' && !parsed}
           value={typed}
-          maxLength={7}
+          maxLength={40}
           spellCheck={false}
           onChange={(event) => setTyped(event.target.value)}
         />
-        <button type="submit" className="btn" disabled={!isHex} title={isHex ? undefined : 'A colour code is # and six digits, such as #1d4f5c'}>
+        <button type="submit" className="btn" disabled={!parsed} title={parsed ? undefined : HOW_TO_TYPE}>
           Use
         </button>
       </form>
-      <p className="color-words">{isHex ? colorName(typed.toLowerCase()) : 'Type # and six digits, such as #1d4f5c.'}</p>
+      <p className="color-words">{parsed ? colorName(parsed) : HOW_TO_TYPE}</p>
     </div>
   );
 }
