@@ -6,7 +6,7 @@ import type { Mat } from '../model/spread';
 import { MIN_REVEAL } from '../model/trim-settings';
 import type { Remedy, SpreadView } from './check';
 import { keepZoneOf, paperOf, withSpare } from './keep-zones';
-import { growMat } from './larger-mat';
+import { growMat } from './resize-mat';
 import { motifsOf } from './motifs';
 import type { Piece } from './pieces';
 

@@ -52,6 +52,7 @@ export interface RemedyMessages {
   'slide-window': Record<never, never>;
   'mount-whole': Record<never, never>;
   'larger-mat': Record<never, never>;
+  'smaller-mat': Record<never, never>;
   'no-reveal': Record<never, never>;
   'thinner-reveal': { reveal: number };
   'back-to-table': Record<never, never>;

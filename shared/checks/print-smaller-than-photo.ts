@@ -5,9 +5,10 @@ import { mountWhole } from './keep-zone-remedies';
 import { paperOf } from './keep-zones';
 import { offPaper } from './off-paper';
 import { piecesOf } from './pieces';
+import { shrinkMat } from './resize-mat';
 import { mustBeFilled, slideOntoPaper } from './window-off-paper';
 
-/** A window that reaches past its print where the mat may show instead: the print is mounted whole, or its window slid back. */
+/** A window that reaches past its print where the mat may show instead: the window is slid back, the print mounted whole, or the mat made smaller. */
 export const printSmallerThanPhoto = defineCheck({
   id: 'print-smaller-than-photo',
   severity: 'fix',
@@ -29,7 +30,11 @@ export const printSmallerThanPhoto = defineCheck({
           messageId: 'print-smaller',
           data: { title: print.title, print: shown, photo: wanted, axis: isWide ? 'wide' : 'high' },
           matIds: piece.matIds,
-          remedies: () => [...slideOntoPaper(view, piece), ...mountWhole(view, piece)],
+          remedies: () => {
+            const mat = view.matById.get(piece.matIds[0]!);
+            const excess = { width: Math.max(0, photo.width - onPage.width), height: Math.max(0, photo.height - onPage.height) };
+            return [...slideOntoPaper(view, piece), ...mountWhole(view, piece), ...(mat ? shrinkMat(view, mat, excess) : [])];
+          },
         },
       ];
     }),

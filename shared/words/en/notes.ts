@@ -90,6 +90,7 @@ const LABELS: { readonly [Id in RemedyMessageId]: (data: RemedyMessages[Id], uni
   'slide-window': () => 'Slide the window',
   'mount-whole': () => 'Mount it whole',
   'larger-mat': () => 'Make the mat larger',
+  'smaller-mat': () => 'Make mat smaller',
   'no-reveal': () => 'Use no reveal',
   'thinner-reveal': ({ reveal }, unit) => `Use a ${formatLength(reveal, unit)} ${unit} reveal`,
   'back-to-table': () => 'Put it on the table',

@@ -30,6 +30,12 @@ describe('print-smaller-than-photo', () => {
     expect(note).toMatchObject({ data: { axis: 'wide' }, remedy: { messageId: 'slide-window', call: { args: { x: inches(2, 7 / 8) } } } });
   });
 
+  it('offers a smaller mat to a print that is shorter than its photo and wider than its card', () => {
+    // The photo's 2 1/8 in come down to 1 5/8 with one step.
+    const [note] = runChecks(viewOf({ width: inches(6), height: inches(2) }));
+    expect(note).toMatchObject({ data: { axis: 'high' }, remedy: { messageId: 'smaller-mat', call: { id: 'mats.resize', args: { w: 7, h: 4 } } } });
+  });
+
   it('says the side as it lies on the page', () => {
     // Turned, the paper’s 3 in stand upright on the page, where 2 1/8 are shown; across it has 2 of 3 1/8.
     expect(printSmallerThanPhoto.run(viewOf({ width: inches(3), height: inches(2) }, { turn: 1 }, true))).toMatchObject([

@@ -18,6 +18,15 @@ export function growMat(view: SpreadView, mat: Mat, missing: Size): Remedy[] {
   return place ? [{ messageId: 'larger-mat', data: {}, call: { id: 'mats.resize', args: { matId: mat.id, ...place, w, h } } }] : [];
 }
 
+/** The mat made smaller by as few steps as take off what is too much, its top left corner kept; nothing for a die's mat, or where nothing would stay. */
+export function shrinkMat(view: SpreadView, mat: Mat, excess: Size): Remedy[] {
+  const { step } = view.doc.format;
+  const w = mat.w - Math.ceil(excess.width / step);
+  const h = mat.h - Math.ceil(excess.height / step);
+  if (mat.trueSize || w < 1 || h < 1) return [];
+  return [{ messageId: 'smaller-mat', data: {}, call: { id: 'mats.resize', args: { matId: mat.id, x: mat.x, y: mat.y, w, h } } }];
+}
+
 /** Free cells of that size which include the mat's own: the most even growth first, then leftward and upward. */
 function roomFor(view: SpreadView, mat: Mat, w: number, h: number): { x: number; y: number } | null {
   const grid = gridOf(view.doc.format);
