@@ -22,6 +22,7 @@ import { localDiskStorage } from './storage/local-disk';
 
 const PAGES_DIR = fileURLToPath(new URL('../dist', import.meta.url));
 const PRUNE_EVERY_MS = 60 * 60_000;
+const STOP_WITHIN_MS = 5_000;
 
 export interface OpenOptions {
   /** Null where something else serves the pages. */
@@ -100,7 +101,12 @@ function listen(server: Server, { port, host }: Config): Promise<string> {
 function stopServer(server: Server): Promise<void> {
   if (!server.listening) return Promise.resolve();
   return new Promise((resolve) => {
-    server.close(() => resolve());
+    // Whoever is still being answered after this long is cut off, so that stopping ends.
+    const cutOff = setTimeout(() => server.closeAllConnections(), STOP_WITHIN_MS);
+    server.close(() => {
+      clearTimeout(cutOff);
+      resolve();
+    });
     server.closeIdleConnections();
   });
 }

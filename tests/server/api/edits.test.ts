@@ -81,6 +81,16 @@ describe('saving edits', () => {
     expect((await current()).document.mats[0]?.color).toBe('#112233');
   });
 
+  it('refuses an edit of what changed since even where it was changed back', async () => {
+    await begin();
+    const mat = buildMat({ id: randomUUID() });
+    const other = { ...mat, color: '#112233' };
+    await post({ baseRevision: 0, edits: [edits.add(mat)] }).expect(200);
+    await post({ baseRevision: 1, edits: [edits.change(other, mat), edits.change(mat, other)] }).expect(200);
+    const stale = await post({ baseRevision: 1, edits: [edits.change({ ...mat, color: '#445566' }, mat)] }).expect(409);
+    expect(stale.body.data).toMatchObject({ revision: 3, keys: [`mat/${mat.id}`], missed: [{ revision: 2 }, { revision: 3 }] });
+  });
+
   it('refuses an edit that starts from what never was', async () => {
     await begin();
     const mat = buildMat({ id: randomUUID() });
