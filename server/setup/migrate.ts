@@ -13,7 +13,7 @@ export async function migrate(url: string, onProgress: (line: string) => void): 
     await dataSource.initialize();
   } catch (error) {
     throw new SetupFailure(
-      `The database at ${placeOf(url)} does not answer.`,
+      `The database at ${placeOf(url)} cannot be used.`,
       'Check DATABASE_URL, and that the server runs and lets this account in.',
       wordsOf(error),
     );
