@@ -2,7 +2,7 @@ import { createBrowserRouter } from 'react-router-dom';
 import { RequireSession } from './features/session/components/require-session';
 import { NotFound } from './routes/not-found';
 import { Root } from './routes/root';
-import { RouteError } from './routes/route-error';
+import { RouteError, StageError } from './routes/route-error';
 
 /**
  * The routes. Every screen is its own chunk, so that whoever signs in does not fetch the editor. Each
@@ -30,9 +30,9 @@ export const createRouter = () =>
               lazy: () => import('./routes/spread'),
               ErrorBoundary: RouteError,
               children: [
-                { index: true, lazy: () => import('./routes/spread-compose'), ErrorBoundary: RouteError },
-                { path: 'sort', lazy: () => import('./routes/spread-sort'), ErrorBoundary: RouteError },
-                { path: 'match', lazy: () => import('./routes/spread-match'), ErrorBoundary: RouteError },
+                { index: true, lazy: () => import('./routes/spread-compose'), ErrorBoundary: StageError },
+                { path: 'sort', lazy: () => import('./routes/spread-sort'), ErrorBoundary: StageError },
+                { path: 'match', lazy: () => import('./routes/spread-match'), ErrorBoundary: StageError },
               ],
             },
           ],

@@ -13,11 +13,10 @@ export function Menu({ trigger, children, align = 'start' }: MenuProps) {
   return (
     <DropdownMenu.Root modal={false}>
       <DropdownMenu.Trigger asChild>{trigger}</DropdownMenu.Trigger>
-      <DropdownMenu.Portal>
-        <DropdownMenu.Content className="menu" align={align} sideOffset={4} collisionPadding={8}>
-          {children}
-        </DropdownMenu.Content>
-      </DropdownMenu.Portal>
+      {/* Without a portal, so that the list stays inside the landmark that its button is in. */}
+      <DropdownMenu.Content className="menu" align={align} sideOffset={4} collisionPadding={8}>
+        {children}
+      </DropdownMenu.Content>
     </DropdownMenu.Root>
   );
 }

@@ -5,15 +5,20 @@ import { ApiError } from '@/lib/api';
 import { NotFound } from './not-found';
 
 /** What a screen shows when it could not be drawn or loaded. */
-export function RouteError() {
+export const RouteError = () => <Failure hasBar />;
+
+/** The same for one stage of a spread, under the spread's own bar: undo and the save state stay in reach. */
+export const StageError = () => <Failure hasBar={false} />;
+
+function Failure({ hasBar }: { readonly hasBar: boolean }) {
   const error = useRouteError();
   const { pathname, search } = useLocation();
-  if (error instanceof ApiError && error.code === 'not-found') return <NotFound />;
+  if (error instanceof ApiError && error.code === 'not-found') return <NotFound hasBar={hasBar} />;
   if (error instanceof ApiError && error.code === 'unauthenticated') {
     return <Navigate to={`/sign-in?next=${encodeURIComponent(pathname + search)}`} replace />;
   }
   return (
-    <PlainPage title={error instanceof ApiError ? 'This could not be fetched' : 'Something slipped'}>
+    <PlainPage hasBar={hasBar} title={error instanceof ApiError ? 'This could not be fetched' : 'Something slipped'}>
       <p>
         {error instanceof ApiError
           ? error.detail

@@ -2,6 +2,8 @@ import { useQuery } from '@tanstack/react-query';
 import { Suspense, useEffect, useMemo } from 'react';
 import { useOutletContext } from 'react-router-dom';
 import type { SpreadDetail } from '#shared/contracts/albums';
+import type { CommandCall } from '#shared/commands/calls';
+import { reasonSentence } from '#shared/words/en/commands';
 import { useAnnounce } from '@/components/live-region';
 import { useComposer, useComposerStore } from '@/features/composer/hooks/composer-context';
 import { printsQuery } from '@/features/prints/api/print-queries';
@@ -26,13 +28,20 @@ export function Component() {
     putPrints(prints.filter((print) => known.has(print.id) && known.get(print.id)?.revision !== print.revision));
   }, [prints, store]);
 
-  const setOnTable = (printIds: readonly string[], on: boolean): void => {
+  const setOnTable = (printIds: readonly string[], on: boolean): string | null => {
     const changed = printIds.filter((id) => onTable.has(id) !== on);
-    if (on) store.getState().putPrints(prints.filter(({ id }) => changed.includes(id)));
-    const isDone = store.getState().run({ id: on ? 'table.add' : 'table.remove', args: { printIds: changed } });
-    const count = `${changed.length} ${changed.length === 1 ? 'print' : 'prints'}`;
-    if (isDone) announce(on ? `${count} chosen for this spread` : `${count} put away`);
-    else announce('Still on a mat: lift it off in Compose first');
+    const { putPrints, whyNot, run } = store.getState();
+    if (on) putPrints(prints.filter(({ id }) => changed.includes(id)));
+    const call: CommandCall = { id: on ? 'table.add' : 'table.remove', args: { printIds: changed } };
+    const reason = whyNot(call);
+    if (reason !== null) return reasonSentence(reason);
+    run(call);
+    const after = new Set(store.getState().doc.table);
+    const done = changed.filter((id) => after.has(id) === on);
+    const count = `${done.length} ${done.length === 1 ? 'print' : 'prints'}`;
+    announce(on ? `${count} chosen for this spread` : `${count} put away`);
+    // Those that lie on a mat stay, while the rest of their pile goes.
+    return done.length < changed.length ? reasonSentence('still-placed') : null;
   };
   return (
     <main>

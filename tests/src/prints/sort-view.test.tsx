@@ -29,7 +29,7 @@ function setUp({ prints = [gulls, scones], patch = 'saves' as 'saves' | 'is stal
       return [200, after];
     },
   });
-  const setOnTable = vi.fn();
+  const setOnTable = vi.fn((_ids: readonly string[], on: boolean) => (on ? null : 'Still on a mat: lift it off first.'));
   renderInApp(
     <SortView
       studioId={STUDIO_ID}
@@ -86,6 +86,12 @@ describe('prints in their piles', () => {
     expect(setOnTable).toHaveBeenLastCalledWith([scones.id], true);
     await userEvent.click(screen.getByRole('button', { name: 'Choose all of The line' }));
     expect(setOnTable).toHaveBeenLastCalledWith([gulls.id, scones.id], true);
+  });
+
+  it('say why one of them stays, when it lies on a mat', async () => {
+    setUp({ onTable: new Set([gulls.id]) });
+    await userEvent.click(await screen.findByRole('checkbox', { name: /Three gulls/ }));
+    expect(screen.getByRole('alert')).toHaveTextContent('Still on a mat: lift it off first.');
   });
 
   it('offer nothing to change to someone who only looks', async () => {

@@ -29,7 +29,8 @@ interface SortViewProps {
   readonly mayDelete: boolean;
   /** Prints chosen for the spread whose stage this is; left out on the studio's own table. */
   readonly onTable?: ReadonlySet<string>;
-  readonly setOnTable?: (ids: readonly string[], on: boolean) => void;
+  /** @returns why some of it was not done, in one sentence, or null. */
+  readonly setOnTable?: (ids: readonly string[], on: boolean) => string | null;
 }
 
 /** The prints of a studio in their piles, at one scale, and one of them opened beside them. */
@@ -67,7 +68,8 @@ export function SortView({ studioId, sizing, mayEdit, mayDelete, onTable, setOnT
     [prints, groups, move, announce],
   );
   const onKey = useLetterAfterM(mayEdit, moveByLetter);
-  const choose = useCallback((id: string, on: boolean) => setOnTable?.([id], on), [setOnTable]);
+  const mean = useCallback((ids: readonly string[], on: boolean) => setFailure(setOnTable?.(ids, on) ?? null), [setOnTable]);
+  const choose = useCallback((id: string, on: boolean) => mean([id], on), [mean]);
   const { add } = uploads;
   const takeFiles = useCallback((files: readonly File[]) => void (mayEdit && files.length > 0 && add(files, null)), [mayEdit, add]);
   const isDropping = useFileDrop(takeFiles);
@@ -112,7 +114,7 @@ export function SortView({ studioId, sizing, mayEdit, mayDelete, onTable, setOnT
                   group={group}
                   isEditable={mayEdit}
                   onFail={fail}
-                  action={onTable !== undefined && mayEdit && group.prints.length > 0 && <ChooseAll group={group} onTable={onTable} setOnTable={setOnTable} />}
+                  action={onTable !== undefined && mayEdit && group.prints.length > 0 && <ChooseAll group={group} onTable={onTable} onChoose={mean} />}
                 >
                   {group.prints.map((print) => (
                     <TablePrint
@@ -162,15 +164,15 @@ export function SortView({ studioId, sizing, mayEdit, mayDelete, onTable, setOnT
 interface ChooseAllProps {
   readonly group: PileGroup;
   readonly onTable: ReadonlySet<string>;
-  readonly setOnTable: SortViewProps['setOnTable'];
+  readonly onChoose: (ids: readonly string[], on: boolean) => void;
 }
 
 /** Means a whole pile for the spread, or none of it. */
-function ChooseAll({ group, onTable, setOnTable }: ChooseAllProps) {
+function ChooseAll({ group, onTable, onChoose }: ChooseAllProps) {
   const ids = group.prints.map(({ id }) => id);
   const areAllOn = ids.every((id) => onTable.has(id));
   return (
-    <button type="button" className="link-button text-12 text-ink-2" onClick={() => setOnTable?.(ids, !areAllOn)}>
+    <button type="button" className="link-button text-12 text-ink-2" onClick={() => onChoose(ids, !areAllOn)}>
       {areAllOn ? 'Put all away' : 'Choose all'} <span className="visually-hidden">of {group.name}</span>
     </button>
   );
