@@ -67,10 +67,23 @@ describe('photo-sinks', () => {
     expect(light?.remedy).toMatchObject({ messageId: 'other-color', call: { id: 'mats.setColor', args: { color: DARK_CARD } } });
   });
 
-  it('reads the rim anew when the window slides, and only then', () => {
+  it('reads the rim anew when the window slides under panes whose mats stay the same', () => {
     const print = darkUpTo(20);
-    const small = { w: 4, h: 4, color: DARK_CARD };
-    expect(run(print, small, { x: 0 })).toHaveLength(1);
-    expect(run(print, small, { x: inches(3) })).toEqual([]);
+    const { group, mats } = buildPanes(print, [buildMat({ x: 0, color: DARK_CARD }), buildMat({ x: 4, color: DARK_CARD })]);
+    const sunkAt = (x: number): number => {
+      const slid = { ...group, content: { ...group.content!, x } };
+      return photoSinks.run(buildView({ doc: buildSpread({ mats, panes: [slid] }), prints: [print] }))[0]?.matIds.length ?? 0;
+    };
+    // Dark is the paper up to 2 in: the first pane's 1 5/8, until the window starts beyond.
+    expect([sunkAt(0), sunkAt(inches(2.25)), sunkAt(0)]).toEqual([1, 0, 1]);
+  });
+
+  it('forgets a rim when the same mat gets another reveal, inner card or print', () => {
+    const mat = buildMat({ w: 12, h: 8, color: DARK_CARD, content: printContent('00000001-0000-4000-8000-00000000abcd') });
+    const sinks = (pixel: OklabPixel, reveal: number): boolean => {
+      const print = { ...printOf(pixel), id: '00000001-0000-4000-8000-00000000abcd' };
+      return photoSinks.run(buildView({ doc: buildSpread({ mats: [mat], reveal }), prints: [print] })).length > 0;
+    };
+    expect([sinks(DARK, 508), sinks(LIGHT, 508), sinks(DARK, 508), sinks(DARK, 0)]).toEqual([true, false, true, false]);
   });
 });
