@@ -30,16 +30,6 @@ export const UpDownIcon = (props: IconProps) => (
     <path d="M6 8l4-4 4 4M6 12l4 4 4-4" />
   </Icon>
 );
-export const DownIcon = (props: IconProps) => (
-  <Icon {...props}>
-    <path d="M5 7.5l5 5 5-5" />
-  </Icon>
-);
-export const PlusIcon = (props: IconProps) => (
-  <Icon {...props}>
-    <path d="M10 4v12M4 10h12" />
-  </Icon>
-);
 export const CloseIcon = (props: IconProps) => (
   <Icon {...props}>
     <path d="M5 5l10 10M15 5 5 15" />
@@ -55,39 +45,14 @@ export const MoreIcon = (props: IconProps) => (
     <path d="M4.5 10h.01M10 10h.01M15.5 10h.01" strokeWidth="2.5" />
   </Icon>
 );
-export const BinIcon = (props: IconProps) => (
-  <Icon {...props}>
-    <path d="M4 6h12M8 6V4h4v2M6 6l.7 10h6.6L14 6" />
-  </Icon>
-);
 export const TurnIcon = (props: IconProps) => (
   <Icon {...props}>
     <path d="M15.5 10a5.5 5.5 0 1 1-1.8-4.1" />
     <path d="M14.5 2.5v3.700h-3.7" />
   </Icon>
 );
-export const MirrorIcon = (props: IconProps) => (
-  <Icon {...props}>
-    <path d="M10 3v14M7.5 6 3 14h4.5ZM12.5 6 17 14h-4.5Z" />
-  </Icon>
-);
-export const CopyIcon = (props: IconProps) => (
-  <Icon {...props}>
-    <path d="M7.5 7.5h8v8h-8zM12.5 7.5v-3h-8v8h3" />
-  </Icon>
-);
-export const SwapIcon = (props: IconProps) => (
-  <Icon {...props}>
-    <path d="M4 7h11M12 4l3 3-3 3M16 13H5M8 10l-3 3 3 3" />
-  </Icon>
-);
-export const SlideIcon = (props: IconProps) => (
-  <Icon {...props}>
-    <path d="M10 3v14M3 10h14M8 5l2-2 2 2M8 15l2 2 2-2M5 8l-2 2 2 2M15 8l2 2-2 2" />
-  </Icon>
-);
 
-/** Marks of severity, as in the notes: a red square with a bar, a caret, a ring. */
+/** Marks of severity, as in the notes: a red square with a bar, a caret. */
 export function StopMark() {
   return (
     <svg className="size-[13px] flex-none" viewBox="0 0 13 13" aria-hidden="true">
@@ -100,13 +65,6 @@ export function FixMark() {
   return (
     <svg className="size-[13px] flex-none" viewBox="0 0 13 13" aria-hidden="true" fill="none" stroke="currentColor" strokeWidth="1.6">
       <path d="M1 12 6.5 1.5 12 12" />
-    </svg>
-  );
-}
-export function ConsiderMark() {
-  return (
-    <svg className="size-[13px] flex-none" viewBox="0 0 13 13" aria-hidden="true" fill="none" stroke="currentColor" strokeWidth="1.6">
-      <circle cx="6.5" cy="6.5" r="5" />
     </svg>
   );
 }

@@ -46,7 +46,7 @@ export function Component() {
   return (
     <main>
       <title>{`Sort · ${detail.title} · Pairleaf`}</title>
-      <h1 className="visually-hidden">Sort prints for {detail.title}</h1>
+      <h1 className="sr-only">Sort prints for {detail.title}</h1>
       <Suspense fallback={<p className="p-6 text-ink-2">Laying out…</p>}>
         <SortView
           studioId={detail.studioId}

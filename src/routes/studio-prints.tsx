@@ -22,7 +22,7 @@ export function Component() {
         <AccountMenu />
       </TopBar>
       <main>
-        <h1 className="visually-hidden">Prints of {studio.name}</h1>
+        <h1 className="sr-only">Prints of {studio.name}</h1>
         <Suspense fallback={<p className="p-6 text-ink-2">Laying out…</p>}>
           <SortView
             studioId={studio.id}

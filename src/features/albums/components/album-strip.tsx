@@ -109,7 +109,7 @@ function Bin({ albumId, spreads, onFail }: { readonly albumId: string; readonly 
           <li key={id} className="flex min-h-10 items-center justify-between gap-4 border-b border-rule">
             {title}
             <Button variant="bare" onClick={() => update.mutate({ id, binned: false }, { onError: onFail })}>
-              Take out <span className="visually-hidden">{title}</span>
+              Take out <span className="sr-only">{title}</span>
             </Button>
           </li>
         ))}

@@ -85,7 +85,7 @@ function RailAlbums({ studio }: { readonly studio: Studio }) {
             </NavLink>
             <span className="num">
               {spreadCount}
-              <span className="visually-hidden"> spreads</span>
+              <span className="sr-only"> spreads</span>
             </span>
           </li>
         ))}

@@ -76,7 +76,7 @@ function ArrivalRow({ arrival, onRetry }: { readonly arrival: Arrival; readonly 
           {reason}{' '}
           {state === 'unsent' && (
             <Button variant="bare" className="h-6!" onClick={() => onRetry(id)}>
-              Send again <span className="visually-hidden">{name}</span>
+              Send again <span className="sr-only">{name}</span>
             </Button>
           )}
         </p>

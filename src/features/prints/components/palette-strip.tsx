@@ -12,7 +12,7 @@ export function PaletteStrip({ palette }: { readonly palette: readonly Swatch[] 
         <ul className="hues">
           {palette.map(({ hex, share }) => (
             <li key={hex} style={{ backgroundColor: hex, flexGrow: Math.max(share, 0.06) }} title={`${colorName(hex)}, ${percent(share)}`}>
-              <span className="visually-hidden">
+              <span className="sr-only">
                 {colorName(hex)}, {percent(share)}
               </span>
             </li>

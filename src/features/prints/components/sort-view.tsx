@@ -173,7 +173,7 @@ function ChooseAll({ group, onTable, onChoose }: ChooseAllProps) {
   const areAllOn = ids.every((id) => onTable.has(id));
   return (
     <button type="button" className="link-button text-12 text-ink-2" onClick={() => onChoose(ids, !areAllOn)}>
-      {areAllOn ? 'Put all away' : 'Choose all'} <span className="visually-hidden">of {group.name}</span>
+      {areAllOn ? 'Put all away' : 'Choose all'} <span className="sr-only">of {group.name}</span>
     </button>
   );
 }

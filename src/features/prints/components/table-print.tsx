@@ -34,37 +34,39 @@ export const TablePrint = memo(function TablePrint({
   const { setNodeRef, attributes, listeners } = useDraggable({ id: print.id, disabled: !isEditable });
   const tag = tagOf(print, sizing);
   return (
-    <li className="table-print-place">
-      <button
-        ref={setNodeRef}
-        {...attributes}
-        {...listeners}
-        type="button"
-        aria-disabled={undefined}
-        aria-label={describePrint(print, sizing.unit)}
-        aria-expanded={isOpen}
-        className="sort-print"
-        data-open={isOpen}
-        style={{ rotate: isHeld ? undefined : `${printAngle(print.id)}deg` }}
-        onClick={() => onOpen(print.id)}
-        onKeyDown={(event) => {
-          onKey(print.id, event);
-          if (!event.defaultPrevented) listeners?.onKeyDown?.(event);
-        }}
-      >
-        <PrintPicture print={print} state={isHeld ? 'gone' : 'rest'} decorative />
-      </button>
-      {isOnSpread !== undefined && !isHeld && (
-        <input
-          type="checkbox"
-          className="on-spread"
-          aria-label={`${print.title} on this spread`}
-          title={isOnSpread ? 'Meant for this spread' : 'Choose for this spread'}
-          checked={isOnSpread}
-          disabled={!isEditable}
-          onChange={(event) => onChoose(print.id, event.target.checked)}
-        />
-      )}
+    <li>
+      <div className="relative w-max">
+        <button
+          ref={setNodeRef}
+          {...attributes}
+          {...listeners}
+          type="button"
+          aria-disabled={undefined}
+          aria-label={describePrint(print, sizing.unit)}
+          aria-expanded={isOpen}
+          className="sort-print"
+          data-open={isOpen}
+          style={{ rotate: isHeld ? undefined : `${printAngle(print.id)}deg` }}
+          onClick={() => onOpen(print.id)}
+          onKeyDown={(event) => {
+            onKey(print.id, event);
+            if (!event.defaultPrevented) listeners?.onKeyDown?.(event);
+          }}
+        >
+          <PrintPicture print={print} state={isHeld ? 'gone' : 'rest'} decorative />
+        </button>
+        {isOnSpread !== undefined && !isHeld && (
+          <input
+            type="checkbox"
+            className="on-spread"
+            aria-label={`${print.title} on this spread`}
+            title={isOnSpread ? 'Meant for this spread' : 'Choose for this spread'}
+            checked={isOnSpread}
+            disabled={!isEditable}
+            onChange={(event) => onChoose(print.id, event.target.checked)}
+          />
+        )}
+      </div>
       <div className="mt-1 flex flex-wrap items-center gap-1">
         {isHeld ? <Tag tone="quiet">in hand</Tag> : <Tag tone={tag.tone}>{tag.words}</Tag>}
         {print.marks.digital && !isHeld && <Tag tone="quiet">digital</Tag>}
