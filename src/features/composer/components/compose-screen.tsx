@@ -2,14 +2,15 @@ import { DndContext } from '@dnd-kit/core';
 import { useEffect, useMemo, useState } from 'react';
 import type { Pile } from '#shared/contracts/prints';
 import type { PrintId } from '#shared/model/ids';
+import { formatSize, type Unit } from '#shared/words/measure';
 import { pixelsPerInch } from '@/features/composer/canvas/page-scale';
 import { useComposer, useComposerStore } from '@/features/composer/hooks/composer-context';
 import { isPrintDrag } from '@/features/composer/hooks/drag-data';
 import { useComposeDrag } from '@/features/composer/hooks/use-compose-drag';
-import { useJudgement } from '@/features/composer/hooks/use-judgement';
+import { stopOn, useJudgement, type Judgement } from '@/features/composer/hooks/use-judgement';
 import { RefusalLine, RefusalProvider } from '@/features/composer/hooks/use-run';
 import { useViewport } from '@/features/composer/hooks/use-viewport';
-import { HeldPrint } from './held-print';
+import { HeldPrint, type DropWords } from './held-print';
 import { NoteText } from './notes-margin';
 import { PileEdge } from './pile-edge';
 import { SchemeFan } from './scheme-fan';
@@ -71,10 +72,21 @@ export function ComposeScreen({ piles, mayEdit, sortHref }: ComposeScreenProps) 
           </div>
         )}
       </main>
-      {isEditable && <HeldPrint print={heldPrint} perInch={perInch} />}
+      {isEditable && <HeldPrint print={heldPrint} perInch={perInch} drop={held?.overMatId ? dropWords(judgement, held.overMatId, unit) : null} />}
       </DndContext>
     </RefusalProvider>
   );
+}
+
+/** What dropping the print on this mat would do: the preview lies there already, so its notes tell. */
+function dropWords({ view, notes }: Judgement, matId: string, unit: Unit): DropWords | null {
+  const photo = view.photosByMat.get(matId);
+  if (!photo) return null;
+  const stop = stopOn(notes, matId);
+  const isKept = Boolean(view.prints.get(photo.printId)?.keepZone);
+  const fits = photo.placement.mode === 'whole' ? 'Whole' : isKept ? 'Keep zone fits' : 'Photo';
+  const spoils = stop?.checkId === 'never-cut' ? 'Do not cut' : 'Would cut the keep zone';
+  return { words: stop ? spoils : fits, size: formatSize(photo.rect, unit), isStop: stop !== undefined };
 }
 
 /** Undo, redo, duplicate, delete and let go, from the keyboard, while no field has the focus. */

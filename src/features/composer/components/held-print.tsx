@@ -17,8 +17,15 @@ const centreUnderPointer: Modifier = ({ activatorEvent, activeNodeRect, overlayN
 
 const MODIFIERS = [centreUnderPointer];
 
-/** The print in the hand, at the pages' scale, with its keep zone. */
-export function HeldPrint({ print, perInch }: { print: Print | null; perInch: number }) {
+/** What dropping the print where it is now would do. */
+export interface DropWords {
+  readonly words: string;
+  readonly size: string;
+  readonly isStop: boolean;
+}
+
+/** The print in the hand, at the pages' scale, with its keep zone and what a drop would do. */
+export function HeldPrint({ print, perInch, drop }: { print: Print | null; perInch: number; drop: DropWords | null }) {
   const scale = perInch / UNITS_PER_INCH;
   const keep = print?.keepZone ? toPaper(print, print.keepZone) : null;
   return (
@@ -26,6 +33,11 @@ export function HeldPrint({ print, perInch }: { print: Print | null; perInch: nu
       {print && (
         <div className="held-print">
           <PrintPicture print={print} pxPerInch={perInch} pictureSize="medium" state="hand" decorative />
+          {drop && (
+            <span className="tag drop-tag" data-tone={drop.isStop ? 'stop' : 'pencil'}>
+              {drop.words} <span className="num">{drop.size}</span>
+            </span>
+          )}
           {keep && <i style={{ left: keep.x * scale, top: keep.y * scale, width: keep.width * scale, height: keep.height * scale }} />}
         </div>
       )}

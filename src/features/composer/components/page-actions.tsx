@@ -50,10 +50,10 @@ export function PageActions({ side }: { side: Side }) {
         <ColorSheet heading="Page colour" value={page.color} groups={colorGroups(doc, prints)} onChoose={(color) => run({ id: 'pages.setColor', args: { pages: [side], color } })} />
       </ActionPopover>
       <button type="button" className="mat-action" disabled={isBare} title={isBare ? 'This page has no mats' : 'Mirror this page left to right; pictures are never mirrored'} onClick={() => run({ id: 'pages.mirror', args: { page: side, axis: 'horizontal' } })}>
-        Mirror
+        Mirror across
       </button>
-      <button type="button" className="mat-action" disabled={isBare} title={isBare ? 'This page has no mats' : 'Mirror this page top to bottom'} onClick={() => run({ id: 'pages.mirror', args: { page: side, axis: 'vertical' } })}>
-        Upside over
+      <button type="button" className="mat-action" disabled={isBare} title={isBare ? 'This page has no mats' : 'Mirror this page top to bottom; pictures are never mirrored'} onClick={() => run({ id: 'pages.mirror', args: { page: side, axis: 'vertical' } })}>
+        Mirror down
       </button>
       {side === 'left' && doc.pages.right && (
         <button type="button" className="mat-action" title="The left page becomes the right one, and the other way round" onClick={() => run({ id: 'pages.swap', args: {} })}>

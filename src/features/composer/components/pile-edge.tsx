@@ -14,7 +14,7 @@ import { TABLE_DROP_ID, type DragData, type DropData } from '@/features/composer
 import { useComposer } from '@/features/composer/hooks/composer-context';
 
 /** px per inch of the prints along the table's edge: one scale for all, so that they compare. */
-const PILE_SCALE = 19;
+const PILE_SCALE = 17;
 
 /** Copies of each print that this spread shows; the panes of one group are one copy. */
 export function copiesUsed(doc: SpreadDocument, prints: ReadonlyMap<PrintId, Print>): Map<PrintId, number> {

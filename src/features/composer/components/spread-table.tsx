@@ -1,6 +1,7 @@
 import { memo, useCallback, useMemo, useState, type MouseEvent } from 'react';
 import type { Note } from '#shared/checks/check';
 import { BALANCE_LIMIT } from '#shared/checks/pages-unequal';
+import { CHECKS } from '#shared/checks/registry';
 import { matRect } from '#shared/geometry/grid';
 import type { MatId, PrintId, Side } from '#shared/model/ids';
 import { SIDES } from '#shared/model/ids';
@@ -15,7 +16,7 @@ import { cellsAt, inReadingOrder, matLabels, pageLeft, toScreen } from '@/featur
 import { useComposer, useComposerStore } from '@/features/composer/hooks/composer-context';
 import { isPrintDrag } from '@/features/composer/hooks/drag-data';
 import type { Held } from '@/features/composer/hooks/use-compose-drag';
-import type { Judgement } from '@/features/composer/hooks/use-judgement';
+import { stopOn, type Judgement } from '@/features/composer/hooks/use-judgement';
 import { BalanceBeam } from './balance-beam';
 import { MatActions } from './mat-actions';
 import { MatControl } from './mat-control';
@@ -37,6 +38,7 @@ interface SpreadTableProps {
 }
 
 const NOTE_GUTTER = 20;
+const CHECK_COUNT = Object.keys(CHECKS).length;
 
 /** The two facing pages on the neutral table, with everything that hangs on them. */
 export function SpreadTable({ judgement, held, perInch, margin, isEditable, sources }: SpreadTableProps) {
@@ -88,7 +90,7 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
             printId={carriedPrint(mat, doc)}
             isSelected={selection.includes(mat.id)}
             isEditable={isEditable}
-            drop={held?.overMatId === mat.id ? (isCut(judgement, mat.id) ? 'cuts' : 'fits') : null}
+            drop={held?.overMatId === mat.id ? (stopOn(judgement.notes, mat.id) ? 'cuts' : 'fits') : null}
             isMarked={(marked?.includes(mat.id) ?? false) || (sources?.includes(carriedPrint(mat, doc) ?? '') ?? false)}
             onSelect={select}
           />
@@ -112,7 +114,6 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
             <MatActions mats={selected} unit={unit} onDone={() => store.getState().select([])} />
           </div>
         )}
-        {held?.overMatId && isHoldingPrint && <DropTag judgement={judgement} matId={held.overMatId} rect={rects.get(held.overMatId)} unit={unit} />}
         {SIDES.map((side) => (
           <NotesMargin
             key={side}
@@ -129,6 +130,9 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
           />
         ))}
       </div>
+      <p className="tally" style={{ width: margin - 36 }}>
+        {CHECK_COUNT} checks, {judgement.notes.length === 1 ? '1 note' : `${judgement.notes.length} notes`}
+      </p>
       {isEditable && (
         <div className="table-foot">
           {SIDES.map((side) => (
@@ -172,10 +176,6 @@ function describeMat(mat: Mat, label: string, doc: SpreadDocument, prints: Reado
   return `Mat ${label}, ${size}, ${carried}${mat.focal ? ', focal' : ''}`;
 }
 
-/** True where a stop note speaks of this mat. */
-const isCut = (judgement: Judgement, matId: MatId): boolean =>
-  judgement.notes.some((note) => note.severity === 'stop' && note.matIds.includes(matId));
-
 /** Just under the selection, or over it where it stands at the foot of the page. */
 function actionsPlace(rects: readonly Rect[], size: { width: number; height: number }): { left: number; top: number } {
   const left = Math.min(...rects.map((r) => r.x));
@@ -183,20 +183,6 @@ function actionsPlace(rects: readonly Rect[], size: { width: number; height: num
   const foot = Math.max(...rects.map((r) => r.y + r.height));
   const below = foot + 10;
   return { left: Math.max(0, Math.min(left, size.width - 420)), top: below + 34 <= size.height + 4 ? below : Math.max(4, top - 66) };
-}
-
-/** What dropping here would do to the print in the hand. */
-function DropTag({ judgement, matId, rect, unit }: { judgement: Judgement; matId: MatId; rect: Rect | undefined; unit: Unit }) {
-  const photo = judgement.view.photosByMat.get(matId);
-  if (!photo || !rect) return null;
-  const cuts = isCut(judgement, matId);
-  const hasKeepZone = Boolean(judgement.view.prints.get(photo.printId)?.keepZone);
-  const words = cuts ? 'Would cut the keep zone' : photo.placement.mode === 'whole' ? 'Whole' : hasKeepZone ? 'Keep zone fits' : 'Photo';
-  return (
-    <span className="tag drop-tag" data-tone={cuts ? 'stop' : 'pencil'} style={{ left: rect.x, top: rect.y - 20 }}>
-      {words} <span className="num">{formatSize(photo.rect, unit)}</span>
-    </span>
-  );
 }
 
 type StoreState = ReturnType<ReturnType<typeof useComposerStore>['getState']>;

@@ -24,3 +24,7 @@ export function useJudgement(): Judgement {
     return { view, notes: runChecks(view), left, right };
   }, [doc, prints, trim, usedElsewhere]);
 }
+
+/** The stop that speaks of this mat, if one does. */
+export const stopOn = (notes: readonly Note[], matId: string): Note | undefined =>
+  notes.find((note) => note.severity === 'stop' && note.matIds.includes(matId));
