@@ -21,8 +21,8 @@ interface TopBarProps {
 /** The bar over every screen: mark, where we are, stages, actions. */
 export function TopBar({ crumbs = [], title, stages, children }: TopBarProps) {
   return (
-    <header className="bar max-sm:h-14 max-sm:px-3">
-      <Link to="/" className="flex flex-none items-center gap-[9px] font-serif text-19 leading-none no-underline" aria-label="Pairleaf: albums">
+    <header className="bar max-sm:px-3">
+      <Link to="/" className="flex h-[51px] flex-none max-sm:h-[55px] items-center gap-[9px] font-serif text-19 leading-none no-underline" aria-label="Pairleaf: albums">
         <Mark />
         <span className={title === undefined ? undefined : 'max-md:hidden'}>Pairleaf</span>
       </Link>
@@ -43,7 +43,7 @@ export function TopBar({ crumbs = [], title, stages, children }: TopBarProps) {
           {title !== undefined && <span className="truncate font-serif text-16">{title}</span>}
         </nav>
       )}
-      {stages !== undefined && <div className="absolute top-0 left-1/2 h-full -translate-x-1/2 max-lg:hidden">{stages}</div>}
+      {stages !== undefined && <div className="bar-stages">{stages}</div>}
       <div className="ml-auto flex flex-none items-center gap-1">{children}</div>
     </header>
   );
