@@ -18,14 +18,16 @@ export interface KeyboardStrides {
 /**
  * Where an arrow key takes what is in the hand: a print to the nearest mat that way (or to the table),
  * everything else by its stride.
+ *
+ * @param inHand - what is in the hand, as it was picked up.
  */
 export const keyboardCoordinates =
-  (strides: () => KeyboardStrides): KeyboardCoordinateGetter =>
+  (strides: () => KeyboardStrides, inHand: () => DragData | null): KeyboardCoordinateGetter =>
   (event, { currentCoordinates, context }) => {
     const direction = DIRECTIONS[event.code];
     if (!direction) return undefined;
     event.preventDefault();
-    const data = context.active?.data.current as DragData | undefined;
+    const data = inHand() ?? undefined;
     const [dx, dy] = direction;
     if (!isPrintDrag(data)) {
       const { stepPx, markPx } = strides();

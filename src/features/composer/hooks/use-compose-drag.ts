@@ -32,14 +32,14 @@ export interface Held {
 }
 
 interface Start {
+  readonly data: DragData;
   readonly gesture: Gesture;
   readonly mat: Mat | undefined;
   readonly photo: PlacedPhoto | undefined;
 }
 
 /** The pointer's topmost target; the nearest one when the hand is a keyboard. */
-const collisionDetection: CollisionDetection = (args) => {
-  if (!isPrintDrag(args.active.data.current as DragData | undefined)) return [];
+const findTargets: CollisionDetection = (args) => {
   if (!args.pointerCoordinates) return closestCenter(args);
   const zOf = (hit: (typeof hits)[number]): number => {
     const data = hit.data?.droppableContainer.data.current as DropData | undefined;
@@ -56,6 +56,9 @@ const collisionDetection: CollisionDetection = (args) => {
 export function useComposeDrag(perInch: number) {
   const store = useComposerStore();
   const start = useRef<Start | null>(null);
+  // As it was picked up, also once it is let go. The draggable's own data changes in mid-drag: while its print is
+  // previewed elsewhere, the mat that it was taken from is bare.
+  const inHand = useRef<DragData | null>(null);
   const [held, setHeld] = useState<Held | null>(null);
   const perInchRef = useRef(perInch);
   perInchRef.current = perInch;
@@ -73,7 +76,7 @@ export function useComposeDrag(perInch: number) {
   const sensors = useSensors(
     useSensor(PointerSensor, { activationConstraint: { distance: 5 } }),
     useSensor(KeyboardSensor, {
-      coordinateGetter: useMemo(() => keyboardCoordinates(strides), [strides]),
+      coordinateGetter: useMemo(() => keyboardCoordinates(strides, () => inHand.current), [strides]),
       keyboardCodes: { start: ['Space'], cancel: ['Escape'], end: ['Space', 'Enter'] },
     }),
   );
@@ -84,35 +87,35 @@ export function useComposeDrag(perInch: number) {
     const matId = 'matId' in data ? data.matId : undefined;
     const mat = state.doc.mats.find((m) => m.id === matId);
     const photo = placedPhotos(state.doc, (id) => state.prints.get(id)).find((p) => p.matId === matId);
-    start.current = { gesture: state.beginGesture(), mat, photo };
+    inHand.current = data;
+    start.current = { data, gesture: state.beginGesture(), mat, photo };
     setHeld({ data, overMatId: null });
   };
 
-  const handleDragMove = ({ active, delta }: DragMoveEvent) => {
-    const data = active.data.current as DragData;
+  const handleDragMove = ({ delta }: DragMoveEvent) => {
     const begun = start.current;
-    if (!begun || isPrintDrag(data)) return;
-    const call = callOf(data, begun, delta, perInchRef.current, store.getState().doc);
+    if (!begun || isPrintDrag(begun.data)) return;
+    const call = callOf(begun, delta, perInchRef.current, store.getState().doc);
     if (call) begun.gesture.preview(call);
   };
 
-  const handleDragOver = ({ active, over }: DragOverEvent) => {
-    const data = active.data.current as DragData;
-    if (!isPrintDrag(data)) return;
+  const handleDragOver = ({ over }: DragOverEvent) => {
+    const begun = start.current;
+    if (!begun || !isPrintDrag(begun.data)) return;
+    const { data, gesture } = begun;
     const drop = over?.data.current as DropData | undefined;
-    const calls = dropCalls(data, drop);
-    start.current?.gesture.preview(calls);
+    gesture.preview(dropCalls(data, drop));
     setHeld({ data, overMatId: drop?.type === 'mat' ? drop.matId : null });
   };
 
-  const handleDragEnd = ({ active, over, delta }: DragEndEvent) => {
-    const data = active.data.current as DragData;
+  const handleDragEnd = ({ over, delta }: DragEndEvent) => {
     const begun = start.current;
     if (begun) {
+      const { data } = begun;
       const drop = over?.data.current as DropData | undefined;
       if (isPrintDrag(data)) begun.gesture.preview(dropCalls(data, drop));
       else {
-        const call = callOf(data, begun, delta, perInchRef.current, store.getState().doc);
+        const call = callOf(begun, delta, perInchRef.current, store.getState().doc);
         if (call) begun.gesture.preview(call);
       }
       begun.gesture.commit();
@@ -128,9 +131,15 @@ export function useComposeDrag(perInch: number) {
     setHeld(null);
   };
 
+  const collisionDetection = useMemo(
+    (): CollisionDetection => (args) => (isPrintDrag(inHand.current ?? undefined) ? findTargets(args) : []),
+    [],
+  );
+
   const announcements = useMemo((): Announcements => {
-    const nameOf = (data: DragData): string => {
+    const nameOf = (data: DragData | null): string => {
       const { prints, doc } = store.getState();
+      if (!data) return words.aPrint;
       if (isPrintDrag(data)) return prints.get(data.printId)?.title ?? words.aPrint;
       return words.mat(matLabels(doc.mats).get(data.matId) ?? '');
     };
@@ -138,27 +147,21 @@ export function useComposeDrag(perInch: number) {
       if (!drop) return words.nothing;
       return drop.type === 'table' ? words.theTable : words.mat(matLabels(store.getState().doc.mats).get(drop.matId) ?? '');
     };
+    const isPrintInHand = (): boolean => isPrintDrag(inHand.current ?? undefined);
     const matNow = (matId: string): string => {
       const mat = store.getState().doc.mats.find((m) => m.id === matId);
       return mat ? words.cells(mat) : '';
     };
     return {
       onDragStart: ({ active }) => words.pickedUp(nameOf(active.data.current as DragData)),
-      onDragOver: ({ active, over }) => {
-        const data = active.data.current as DragData;
-        return isPrintDrag(data) ? words.over(placeOf(over?.data.current as DropData | undefined)) : undefined;
+      onDragOver: ({ over }) => (isPrintInHand() ? words.over(placeOf(over?.data.current as DropData | undefined)) : undefined),
+      onDragMove: () => {
+        const data = inHand.current;
+        return data?.type === 'mat' || data?.type === 'resize' ? matNow(data.matId) : undefined;
       },
-      onDragMove: ({ active }) => {
-        const data = active.data.current as DragData;
-        return data.type === 'mat' || data.type === 'resize' ? matNow(data.matId) : undefined;
-      },
-      onDragEnd: ({ active, over }) => {
-        const data = active.data.current as DragData;
-        return isPrintDrag(data)
-          ? words.placed(nameOf(data), placeOf(over?.data.current as DropData | undefined))
-          : words.putDown(nameOf(data));
-      },
-      onDragCancel: ({ active }) => words.putBack(nameOf(active.data.current as DragData)),
+      onDragEnd: ({ over }) =>
+        isPrintInHand() ? words.placed(nameOf(inHand.current), placeOf(over?.data.current as DropData | undefined)) : words.putDown(nameOf(inHand.current)),
+      onDragCancel: () => words.putBack(nameOf(inHand.current)),
     };
   }, [store]);
 
@@ -177,7 +180,7 @@ export function useComposeDrag(perInch: number) {
   };
 }
 
-function callOf(data: DragData, begun: Start, delta: { x: number; y: number }, perInch: number, doc: Parameters<typeof moveCall>[0]): CommandCall | null {
+function callOf({ data, ...begun }: Start, delta: { x: number; y: number }, perInch: number, doc: Parameters<typeof moveCall>[0]): CommandCall | null {
   switch (data.type) {
     case 'mat':
       return begun.mat ? moveCall(doc, begun.mat, delta, perInch) : null;
