@@ -34,6 +34,7 @@ export default defineConfig({
         test: {
           name: 'e2e',
           include: ['tests/e2e/**/*.test.ts'],
+          globalSetup: ['tests/support/e2e/running-product.ts'],
           testTimeout: 120_000,
           hookTimeout: 180_000,
           fileParallelism: false,

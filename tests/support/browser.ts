@@ -21,6 +21,9 @@ export function openBrowser(extraFlags: readonly string[] = []): Promise<Browser
   return chromium.launch({ executablePath, args: [...FLAGS, ...extraFlags] });
 }
 
+/** How long a person would wait for something to answer, on two busy cores. */
+const ACTION_WAIT_MS = 15_000;
+
 export interface WatchedPage {
   readonly page: Page;
   /** Errors that scripts threw or the console got, and requests to any other host; empty when all is well. */
@@ -31,6 +34,7 @@ export interface WatchedPage {
 export async function openPage(browser: Browser, baseUrl: string, options: BrowserContextOptions = {}): Promise<WatchedPage> {
   const context = await browser.newContext({ baseURL: baseUrl, viewport: { width: 1440, height: 900 }, ...options });
   const page = await context.newPage();
+  page.setDefaultTimeout(ACTION_WAIT_MS);
   const faults: string[] = [];
   page.on('pageerror', (error) => faults.push(String(error)));
   page.on('console', (message) => {
