@@ -29,7 +29,7 @@ export function TopBar({ crumbs = [], title, stages, children }: TopBarProps) {
       {(title !== undefined || crumbs.length > 0) && (
         <nav aria-label="Where you are" className="bar-where max-sm:ml-2 max-sm:pl-3">
           {crumbs.map(({ label, to }) => (
-            <span key={to} className="flex min-w-0 items-center gap-[9px] max-sm:hidden">
+            <span key={to} className={`flex min-w-0 items-center gap-[9px] ${stages === undefined ? 'max-sm:hidden' : 'max-xl:hidden'}`}>
               <Link to={to} className="truncate text-ink-2 no-underline hover:text-ink hover:underline">
                 {label}
               </Link>

@@ -8,5 +8,5 @@ import { pilesQuery } from '@/features/prints/api/print-queries';
 export function Component() {
   const detail = useOutletContext<SpreadDetail>();
   const piles = useQuery(pilesQuery(detail.studioId));
-  return <ComposeScreen piles={piles.data ?? []} mayEdit={detail.may.edit} sortHref={`/spreads/${detail.id}/sort`} />;
+  return <ComposeScreen title={detail.title} piles={piles.data ?? []} mayEdit={detail.may.edit} sortHref={`/spreads/${detail.id}/sort`} />;
 }

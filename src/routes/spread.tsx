@@ -1,5 +1,5 @@
 import { useQuery } from '@tanstack/react-query';
-import { useEffect, useState } from 'react';
+import { lazy, Suspense, useEffect, useState } from 'react';
 import { Outlet, useLocation, useParams } from 'react-router-dom';
 import type { SpreadDetail } from '#shared/contracts/albums';
 import { IconButton, Button } from '@/components/button';
@@ -8,14 +8,16 @@ import { StageBar, type Stage } from '@/components/stage-bar';
 import { TopBar } from '@/components/top-bar';
 import { spreadQuery } from '@/features/composer/api/spread-queries';
 import '@/features/composer/compose.css';
-import { ConflictDialog } from '@/features/composer/components/conflict-dialog';
 import { DraftOffer } from '@/features/composer/components/draft-offer';
-import { ExportDialog } from '@/features/composer/components/export-dialog';
 import { SaveState } from '@/features/composer/components/save-state';
 import { ComposerProvider, useComposer, useComposerStore } from '@/features/composer/hooks/composer-context';
 import { openComposer } from '@/features/composer/api/open-composer';
 import type { ComposerStore } from '@/features/composer/model/composer-store';
 import { commandLabel } from '#shared/words/en/commands';
+
+// Loaded when they are first needed, so that the spread can be worked on sooner.
+const ConflictDialog = lazy(async () => ({ default: (await import('@/features/composer/components/conflict-dialog')).ConflictDialog }));
+const ExportDialog = lazy(async () => ({ default: (await import('@/features/composer/components/export-dialog')).ExportDialog }));
 
 /** One spread: its bar and stages, with one editor store under all of them. */
 export function Component() {
@@ -41,10 +43,15 @@ function Loaded({ detail }: { detail: SpreadDetail }) {
     <ComposerProvider value={store}>
       <SpreadBar detail={detail} />
       <DraftOffer />
-      <ConflictDialog />
+      <OnConflict />
       <Outlet context={detail} />
     </ComposerProvider>
   );
+}
+
+function OnConflict() {
+  const isConflict = useComposer((state) => state.save.status === 'conflict');
+  return <Suspense fallback={null}>{isConflict && <ConflictDialog />}</Suspense>;
 }
 
 function SpreadBar({ detail }: { detail: SpreadDetail }) {
@@ -72,7 +79,7 @@ function SpreadBar({ detail }: { detail: SpreadDetail }) {
           </Button>
         )}
       </TopBar>
-      {isExporting && <ExportDialog spreadId={detail.id} onClose={() => setIsExporting(false)} />}
+      <Suspense fallback={null}>{isExporting && <ExportDialog spreadId={detail.id} onClose={() => setIsExporting(false)} />}</Suspense>
     </>
   );
 }

@@ -2,10 +2,8 @@ import { useState } from 'react';
 import { parseColor } from '#shared/colour/css-color';
 import { colorName } from '#shared/colour/name';
 import type { Hex } from '#shared/model/ids';
-import type { Print } from '#shared/model/print';
-import type { SpreadDocument } from '#shared/model/spread';
 
-interface ColorSheetProps {
+export interface ColorSheetProps {
   readonly heading: string;
   readonly value: Hex | null;
   readonly groups: readonly { readonly name: string; readonly colors: readonly Hex[] }[];
@@ -68,17 +66,4 @@ export function ColorSheet({ heading, value, groups, onChoose }: ColorSheetProps
       <p className="color-words">{parsed ? colorName(parsed) : HOW_TO_TYPE}</p>
     </div>
   );
-}
-
-/** The colours at hand: the scheme's, those already on the spread, those of its prints. */
-export function colorGroups(doc: SpreadDocument, prints: ReadonlyMap<string, Print>): { name: string; colors: Hex[] }[] {
-  const unique = (colors: Hex[], max: number): Hex[] => [...new Set(colors)].slice(0, max);
-  const onSpread = [...doc.mats.flatMap((mat) => [mat.color, ...(mat.inner ? [mat.inner.color] : [])]), doc.pages.left?.color, doc.pages.right?.color];
-  const shown = new Set([...doc.mats.flatMap((mat) => (mat.content.kind === 'print' ? [mat.content.printId] : [])), ...doc.table]);
-  const fromPrints = [...shown].flatMap((id) => prints.get(id)?.palette ?? []).sort((a, b) => b.share - a.share);
-  return [
-    { name: 'Scheme', colors: doc.scheme ? unique(Object.values(doc.scheme.colors).map((color) => color.hex), 4) : [] },
-    { name: 'On this spread', colors: unique(onSpread.filter((color): color is Hex => color !== undefined), 12) },
-    { name: 'In the photos', colors: unique(fromPrints.map((swatch) => swatch.hex), 18) },
-  ];
 }

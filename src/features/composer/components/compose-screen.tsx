@@ -1,5 +1,5 @@
 import { DndContext } from '@dnd-kit/core';
-import { useEffect, useMemo, useState } from 'react';
+import { lazy, Suspense, useEffect, useMemo, useState } from 'react';
 import type { Pile } from '#shared/contracts/prints';
 import type { PrintId } from '#shared/model/ids';
 import { formatSize, type Unit } from '#shared/words/measure';
@@ -13,8 +13,10 @@ import { useViewport } from '@/features/composer/hooks/use-viewport';
 import { HeldPrint, type DropWords } from './held-print';
 import { NoteText } from './notes-margin';
 import { PileEdge } from './pile-edge';
-import { SchemeFan } from './scheme-fan';
 import { SpreadTable } from './spread-table';
+
+// The schemes' colour work comes after the pages: dragging does not wait for it.
+const SchemeFan = lazy(async () => ({ default: (await import('./scheme-fan')).SchemeFan }));
 
 const COMPOSE_MIN_WIDTH = 1024;
 const WIDE = 1280;
@@ -24,13 +26,14 @@ const MARGIN_NARROW = 148;
 const VERTICAL_SURROUND = 372;
 
 interface ComposeScreenProps {
+  readonly title: string;
   readonly piles: readonly Pile[];
   readonly mayEdit: boolean;
   readonly sortHref: string;
 }
 
 /** Compose: pages, piles, schemes, notes. Under 1024 px the spread is shown read-only with its notes below. */
-export function ComposeScreen({ piles, mayEdit, sortHref }: ComposeScreenProps) {
+export function ComposeScreen({ title, piles, mayEdit, sortHref }: ComposeScreenProps) {
   const viewport = useViewport();
   const doc = useComposer((state) => state.doc);
   const prints = useComposer((state) => state.prints);
@@ -52,6 +55,7 @@ export function ComposeScreen({ piles, mayEdit, sortHref }: ComposeScreenProps) 
     <RefusalProvider>
       <DndContext {...contextProps}>
       <main className={`compose ${isSmall ? 'is-small' : ''}`}>
+        <h1 className="sr-only">Compose {title}</h1>
         <RefusalLine />
         <SpreadTable judgement={isSmall ? { ...judgement, notes: [] } : judgement} held={held} perInch={perInch} margin={margin} isEditable={isEditable} sources={sources} />
         {isSmall ? (
@@ -67,7 +71,9 @@ export function ComposeScreen({ piles, mayEdit, sortHref }: ComposeScreenProps) 
           </section>
         ) : (
           <div className="table-edge">
-            <SchemeFan isEditable={isEditable} onSources={setSources} />
+            <Suspense fallback={<div aria-busy="true" />}>
+              <SchemeFan isEditable={isEditable} onSources={setSources} />
+            </Suspense>
             <PileEdge piles={piles} heldPrintId={held?.data.type === 'print' ? held.data.printId : null} isEditable={isEditable} sortHref={sortHref} marked={marked} />
           </div>
         )}

@@ -5,7 +5,8 @@ import { hexToOklab } from '#shared/colour/convert';
 import { formatLength, type Unit } from '#shared/words/measure';
 import { useComposer } from '@/features/composer/hooks/composer-context';
 import { useRun } from '@/features/composer/hooks/use-run';
-import { ColorSheet, colorGroups } from './color-sheet';
+import { colorGroups } from '@/features/composer/model/color-groups';
+import { LazyColorSheet } from './lazy-color-sheet';
 import { ContentSheet } from './content-sheet';
 import { ActionPopover } from './popover';
 
@@ -32,7 +33,7 @@ export function MatActions({ mats, unit, onDone }: MatActionsProps) {
   return (
     <div className="mat-actions" role="toolbar" aria-label={isOne ? 'Mat' : `${mats.length} mats`}>
       <ActionPopover label={<i className="action-swatch" style={{ background: first.color }} />} name="Colour">
-        <ColorSheet heading="Mat colour" value={first.color} groups={colorGroups(doc, prints)} onChoose={(color) => run({ id: 'mats.setColor', args: { matIds, color } })} />
+        <LazyColorSheet heading="Mat colour" value={first.color} groups={colorGroups(doc, prints)} onChoose={(color) => run({ id: 'mats.setColor', args: { matIds, color } })} />
       </ActionPopover>
       {isOne && !group && (
         <ActionPopover label="Carry">

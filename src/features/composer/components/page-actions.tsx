@@ -4,7 +4,8 @@ import type { SpreadDocument } from '#shared/model/spread';
 import { overlaps } from '#shared/geometry/rects';
 import { useComposer } from '@/features/composer/hooks/composer-context';
 import { useRun } from '@/features/composer/hooks/use-run';
-import { ColorSheet, colorGroups } from './color-sheet';
+import { colorGroups } from '@/features/composer/model/color-groups';
+import { LazyColorSheet } from './lazy-color-sheet';
 import { ActionPopover } from './popover';
 
 const WANTED_STEPS = 6;
@@ -47,7 +48,7 @@ export function PageActions({ side }: { side: Side }) {
         Add mat
       </button>
       <ActionPopover label={<i className="action-swatch" style={{ background: page.color }} />} name={`Colour of the ${side} page`}>
-        <ColorSheet heading="Page colour" value={page.color} groups={colorGroups(doc, prints)} onChoose={(color) => run({ id: 'pages.setColor', args: { pages: [side], color } })} />
+        <LazyColorSheet heading="Page colour" value={page.color} groups={colorGroups(doc, prints)} onChoose={(color) => run({ id: 'pages.setColor', args: { pages: [side], color } })} />
       </ActionPopover>
       <button type="button" className="mat-action" disabled={isBare} title={isBare ? 'This page has no mats' : 'Mirror this page left to right; pictures are never mirrored'} onClick={() => run({ id: 'pages.mirror', args: { page: side, axis: 'horizontal' } })}>
         Mirror across

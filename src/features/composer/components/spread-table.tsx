@@ -1,4 +1,4 @@
-import { memo, useCallback, useMemo, useState, type MouseEvent } from 'react';
+import { lazy, memo, Suspense, useCallback, useMemo, useState, type MouseEvent } from 'react';
 import type { Note } from '#shared/checks/check';
 import { BALANCE_LIMIT } from '#shared/checks/pages-unequal';
 import { CHECKS } from '#shared/checks/registry';
@@ -18,13 +18,15 @@ import { isPrintDrag } from '@/features/composer/hooks/drag-data';
 import type { Held } from '@/features/composer/hooks/use-compose-drag';
 import { stopOn, type Judgement } from '@/features/composer/hooks/use-judgement';
 import { BalanceBeam } from './balance-beam';
-import { MatActions } from './mat-actions';
 import { MatControl } from './mat-control';
 import { NotesMargin } from './notes-margin';
-import { PageActions } from './page-actions';
 import { PageGrid } from './page-grid';
 import { PageRuler } from './page-ruler';
 import { SelectedMat } from './selected-mat';
+
+// The tools come after the pages: prints can be dragged while these are still fetched.
+const MatActions = lazy(async () => ({ default: (await import('./mat-actions')).MatActions }));
+const PageActions = lazy(async () => ({ default: (await import('./page-actions')).PageActions }));
 
 interface SpreadTableProps {
   readonly judgement: Judgement;
@@ -111,7 +113,9 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
         )}
         {isEditable && selected.length > 0 && !held && (
           <div className="mat-actions-place" style={actionsPlace(selected.flatMap((mat) => rects.get(mat.id) ?? []), size)}>
-            <MatActions mats={selected} unit={unit} onDone={() => store.getState().select([])} />
+            <Suspense fallback={null}>
+              <MatActions mats={selected} unit={unit} onDone={() => store.getState().select([])} />
+            </Suspense>
           </div>
         )}
         {SIDES.map((side) => (
@@ -135,9 +139,11 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
       </p>
       {isEditable && (
         <div className="table-foot">
-          {SIDES.map((side) => (
-            <PageActions key={side} side={side} />
-          ))}
+          <Suspense fallback={null}>
+            {SIDES.map((side) => (
+              <PageActions key={side} side={side} />
+            ))}
+          </Suspense>
         </div>
       )}
     </div>
