@@ -32,7 +32,7 @@ export const DEMO_PRINTS: readonly DemoPrint[] = [
   { file: 'headland.jpg', title: 'Headland and line', widthIn: 6, heightIn: 4, pile: 'The light', keepZone: box(1035, 165, 1190, 440), horizon: level(470) },
   { file: 'arrival.jpg', title: 'The train comes in', widthIn: 6, heightIn: 4, pile: 'The line', keepZone: box(35, 300, 1290, 990) },
   { file: 'tower.jpg', title: 'Skerrow Light', widthIn: 5, heightIn: 7, pile: 'The light', keepZone: box(215, 150, 640, 1040), marks: { oneOfAKind: true } },
-  { file: 'nora.jpg', title: 'Nora in the wind', widthIn: 4, heightIn: 4, pile: 'Us', keepZone: box(150, 235, 880, 900), faces: [ahead(255, 400, 745, 875)] },
+  { file: 'nora.jpg', title: 'Nora in the wind', widthIn: 4, heightIn: 4, pile: 'Us', keepZone: box(150, 235, 880, 900), faces: [ahead(255, 400, 745, 875)], copies: 2 },
   {
     file: 'window.jpg',
     title: 'Gran and Ivo, third class',
@@ -51,7 +51,7 @@ export const DEMO_PRINTS: readonly DemoPrint[] = [
   { file: 'station.jpg', title: 'Skerrow Quay', widthIn: 6, heightIn: 4, pile: 'The line', keepZone: box(315, 200, 1230, 860) },
   { file: 'signal.jpg', title: 'Signal at dusk', widthIn: 3.5, heightIn: 5, pile: 'The line', keepZone: box(470, 110, 890, 490) },
   { file: 'gulls.jpg', title: 'Three gulls', widthIn: 6, heightIn: 4, pile: 'From a relative', keepZone: box(110, 460, 1460, 830), horizon: level(478) },
-  { file: 'brick.jpg', title: 'Shed number 4', widthIn: 4, heightIn: 4, pile: 'The line', keepZone: box(375, 390, 620, 735) },
+  { file: 'brick.jpg', title: 'Shed number 4', widthIn: 4, heightIn: 4, pile: 'The line', keepZone: box(375, 390, 620, 735), copies: 2 },
   {
     file: 'family.jpg',
     title: 'All of us at the wall',
@@ -72,8 +72,8 @@ export const DEMO_PRINTS: readonly DemoPrint[] = [
     faces: [ahead(535, 420, 645, 545), ahead(790, 455, 890, 550)],
     horizon: level(400),
   },
-  { file: 'lens.jpg', title: 'The lens', widthIn: 4, heightIn: 4, pile: 'The light', keepZone: box(150, 150, 850, 850), marks: { noUp: true } },
-  { file: 'stair.jpg', title: '112 steps', widthIn: 4, heightIn: 6, pile: 'The light', keepZone: box(370, 540, 680, 880), marks: { noUp: true } },
+  { file: 'lens.jpg', title: 'The lens', widthIn: 4, heightIn: 4, pile: 'The light', keepZone: box(150, 150, 850, 850), marks: { noUp: true }, copies: 2 },
+  { file: 'stair.jpg', title: '112 steps', widthIn: 4, heightIn: 6, pile: 'The light', keepZone: box(370, 540, 680, 880), marks: { noUp: true }, copies: 2 },
   { file: 'seawindow.jpg', title: 'Home again', widthIn: 6, heightIn: 4, pile: 'The line', keepZone: box(570, 310, 1460, 960), horizon: level(487) },
   {
     file: 'scone.jpg',

@@ -70,7 +70,10 @@ const GRASS_LEFT: readonly DemoMat[] = [
   { cells: [13, 5, 9, 4] },
   { cells: [0, 9, 8, 8], print: 'rope.jpg' },
   { cells: [8, 9, 6, 8], print: 'thrift.jpg' },
-  { cells: [14, 9, 8, 13] },
+  {
+    cells: [14, 9, 8, 13],
+    content: { kind: 'journaling', text: 'Sunday. Two apples, three sandwiches and a hand that was not ours.', color: '#fdfcf8', lineHeight: inches(3 / 8) },
+  },
   { cells: [0, 17, 7, 5], print: 'ticket.jpg' },
   { cells: [7, 17, 7, 5] },
 ];
@@ -124,7 +127,7 @@ export function buildDemoSpreads(printByFile: ReadonlyMap<string, Print>, newId:
 
   const all = [...printByFile.keys()];
   const out = inScheme(spreadPanes(layOut(layOut(withTable(all), 'left', OUT_LEFT), 'right', OUT_RIGHT)), 0);
-  const grassPrints = ['picnic.jpg', 'rope.jpg', 'thrift.jpg', 'ticket.jpg', 'beach.jpg', 'gulls.jpg', 'pim.jpg', 'seawindow.jpg', 'cliff.jpg', 'scone.jpg', 'station.jpg', 'tower.jpg'];
+  const grassPrints = ['picnic.jpg', 'rope.jpg', 'thrift.jpg', 'ticket.jpg', 'beach.jpg', 'gulls.jpg', 'pim.jpg', 'seawindow.jpg', 'cliff.jpg', 'scone.jpg', 'tower.jpg', 'nora.jpg', 'lens.jpg', 'stair.jpg', 'brick.jpg'];
   const grass = layOut(layOut(withTable(grassPrints), 'left', GRASS_LEFT), 'right', GRASS_RIGHT);
   return [
     { title: 'Out to the light', document: out },
