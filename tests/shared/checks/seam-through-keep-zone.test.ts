@@ -47,6 +47,7 @@ describe('seam-through-keep-zone', () => {
   });
 
   it('leaves a zone outside the window to keep-zone-cut', () => {
+    expect(seamThroughKeepZone.run(viewOf('behind', zone(400, 100)))).toEqual([]);
     const notes = runChecks(viewOf('behind', zone(400, 100))).filter((note) => note.severity === 'stop');
     expect(notes.map((note) => note.checkId)).toEqual(['keep-zone-cut']);
   });
