@@ -42,6 +42,16 @@ export class ComposePage {
     return this.page.locator('.save-state');
   }
 
+  /** Gives a mat a colour by its code. */
+  async colorMat(label: string, color: string): Promise<void> {
+    await this.mat(label).click();
+    await this.page.getByRole('toolbar', { name: 'Mat' }).getByRole('button', { name: 'Colour', exact: true }).click();
+    const sheet = this.page.getByRole('dialog');
+    await sheet.getByLabel('Colour code').fill(color);
+    await sheet.getByRole('button', { name: 'Use' }).click();
+    await this.page.keyboard.press('Escape');
+  }
+
   /** The document as the server has it, once the bar says that it has everything. */
   async savedDocument(): Promise<SpreadDocument> {
     await this.page.locator('.save-state[data-status="saved"]').waitFor();
