@@ -11,7 +11,10 @@ const limitsSchema = z.object({
   SIGN_IN_PER_ADDRESS: z.coerce.number().int().positive().default(60),
   SIGN_UP_PER_ADDRESS: z.coerce.number().int().positive().default(20),
   RATE_WINDOW_MS: z.coerce.number().int().positive().default(15 * 60_000),
+  /** Originals that all members of a studio may keep in it together. */
   STUDIO_QUOTA_BYTES: z.coerce.number().int().positive().default(20 * GIBIBYTE),
+  /** Originals that one account may keep, in whatever studios. */
+  ACCOUNT_QUOTA_BYTES: z.coerce.number().int().positive().default(40 * GIBIBYTE),
   /** Uploads are refused while the data folder's disk has less than this free. */
   FREE_DISK_BYTES: z.coerce.number().int().nonnegative().default(512 * MEBIBYTE),
 });
@@ -37,6 +40,7 @@ export interface Limits {
   readonly signUpPerAddress: number;
   readonly rateWindowMs: number;
   readonly studioQuotaBytes: number;
+  readonly accountQuotaBytes: number;
   readonly freeDiskBytes: number;
 }
 
@@ -89,6 +93,7 @@ export function readConfig(env: Readonly<Record<string, string | undefined>> = p
       signUpPerAddress: values.SIGN_UP_PER_ADDRESS,
       rateWindowMs: values.RATE_WINDOW_MS,
       studioQuotaBytes: values.STUDIO_QUOTA_BYTES,
+      accountQuotaBytes: values.ACCOUNT_QUOTA_BYTES,
       freeDiskBytes: values.FREE_DISK_BYTES,
     },
   };

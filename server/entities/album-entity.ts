@@ -1,6 +1,6 @@
 import { Column, Entity, JoinColumn, ManyToOne, PrimaryColumn } from 'typeorm';
 import type { Binding, PageFormat } from '../../shared/model/page-format';
-import { instant } from './columns';
+import { instant, optionalInstant } from './columns';
 import { StudioEntity } from './studio-entity';
 
 @Entity('albums')
@@ -24,6 +24,10 @@ export class AlbumEntity {
 
   @Column({ type: 'json' })
   binding!: Binding;
+
+  /** While it is set, no spread of the album is live. */
+  @Column(optionalInstant('binned_at'))
+  binnedAt!: Date | null;
 
   @Column(instant('created_at'))
   createdAt!: Date;

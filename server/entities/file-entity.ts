@@ -1,6 +1,7 @@
 import { Column, Entity, Index, JoinColumn, ManyToOne, PrimaryColumn } from 'typeorm';
 import { bytes, instant, sha256 } from './columns';
 import { StudioEntity } from './studio-entity';
+import { UserEntity } from './user-entity';
 
 /** An original, untouched, known by its content within its studio and never across studios. MODEL.md 12. */
 @Entity('files')
@@ -32,6 +33,14 @@ export class FileEntity {
 
   @Column({ type: 'int', unsigned: true })
   height!: number;
+
+  /** Whose quota it counts against beside the studio's: the first who sent it. */
+  @Column({ name: 'added_by', type: 'uuid', nullable: true })
+  addedBy!: string | null;
+
+  @ManyToOne(() => UserEntity, { onDelete: 'SET NULL' })
+  @JoinColumn({ name: 'added_by', foreignKeyConstraintName: 'fk_files_adder' })
+  adder?: UserEntity | null;
 
   @Column(instant('created_at'))
   createdAt!: Date;

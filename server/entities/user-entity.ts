@@ -1,5 +1,5 @@
 import { Column, Entity, Index, PrimaryColumn } from 'typeorm';
-import { instant } from './columns';
+import { bytes, instant } from './columns';
 
 @Entity('users')
 export class UserEntity {
@@ -17,6 +17,13 @@ export class UserEntity {
   /** argon2id in its encoded form, parameters and salt included. */
   @Column({ name: 'password_hash', type: 'varchar', length: 255 })
   passwordHash!: string;
+
+  /** Originals that this person added, in whatever studio. */
+  @Column(bytes('bytes_used'))
+  bytesUsed!: number;
+
+  @Column(bytes('bytes_quota'))
+  bytesQuota!: number;
 
   @Column(instant('created_at'))
   createdAt!: Date;

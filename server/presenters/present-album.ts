@@ -10,6 +10,7 @@ interface AlbumAnswer {
   readonly format: PageFormat;
   readonly binding: Binding;
   readonly spreadCount: number;
+  readonly binned: boolean;
 }
 
 export const presentAlbum = ({ album, spreadCount }: CountedAlbum): AlbumAnswer => ({
@@ -19,6 +20,7 @@ export const presentAlbum = ({ album, spreadCount }: CountedAlbum): AlbumAnswer 
   format: album.format,
   binding: album.binding,
   spreadCount,
+  binned: album.binnedAt !== null,
 });
 
 export const presentCutSize = (cutSize: CutSizeEntity): CutSize => ({

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { albumListSchema, albumSchema, createAlbumSchema, updateAlbumSchema } from '../../shared/contracts/albums';
+import { albumListSchema, albumSchema, binQuerySchema, createAlbumSchema, updateAlbumSchema } from '../../shared/contracts/albums';
 import { idSchema } from '../../shared/contracts/common';
 import { presentAlbum } from '../presenters/present-album';
 import type { Services } from '../services/services';
@@ -16,10 +16,11 @@ export function albumRoutes({ albums, studios }: Services): Route[] {
       path: '/studios/:studioId/albums',
       summary: 'A studio’s albums',
       params: studioParamsSchema,
+      query: binQuerySchema,
       needs: 'album:see',
       on: ({ studioId }) => studios.locate(studioId),
       answer: { status: 200, schema: albumListSchema },
-      handle: async ({ subject }) => ({ albums: (await albums.list(subject.id)).map(presentAlbum) }),
+      handle: async ({ subject, query }) => ({ albums: (await albums.list(subject.id, query)).map(presentAlbum) }),
     }),
     guardedRoute({
       method: 'post',
@@ -46,7 +47,7 @@ export function albumRoutes({ albums, studios }: Services): Route[] {
     guardedRoute({
       method: 'patch',
       path: '/albums/:albumId',
-      summary: 'Change an album’s title or binding',
+      summary: 'Change an album’s title or binding, or put it into the bin and take it out',
       params: albumParamsSchema,
       body: updateAlbumSchema,
       needs: 'album:edit',

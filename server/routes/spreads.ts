@@ -1,9 +1,9 @@
 import { z } from 'zod';
 import {
+  binQuerySchema,
   createSpreadSchema,
   spreadDetailSchema,
   spreadListSchema,
-  spreadQuerySchema,
   spreadSummarySchema,
   updateSpreadSchema,
 } from '../../shared/contracts/albums';
@@ -26,7 +26,7 @@ export function spreadRoutes({ dataSource, services: { albums, spreads } }: AppD
       path: '/albums/:albumId/spreads',
       summary: 'An album’s spreads in their order, with every print that they show',
       params: albumParamsSchema,
-      query: spreadQuerySchema,
+      query: binQuerySchema,
       needs: 'album:see',
       on: ({ albumId }) => albums.locate(albumId),
       answer: { status: 200, schema: spreadListSchema },

@@ -1,7 +1,9 @@
 import { randomUUID } from 'node:crypto';
-import type { DataSource } from 'typeorm';
+import type { DataSource, EntityManager } from 'typeorm';
 import type { SignUp } from '../../shared/contracts/accounts';
 import { AppError } from '../../shared/errors';
+import type { StudioId } from '../../shared/model/ids';
+import type { Role } from '../../shared/model/people';
 import { TRIM_SETTINGS_INCH } from '../../shared/model/trim-settings';
 import { MembershipEntity } from '../entities/membership-entity';
 import { StudioEntity } from '../entities/studio-entity';
@@ -13,7 +15,10 @@ interface Deps {
   readonly dataSource: DataSource;
   readonly now: () => Date;
   readonly studioQuotaBytes: number;
+  readonly accountQuotaBytes: number;
 }
+
+type NewAccount = Pick<SignUp, 'email' | 'password' | 'name'>;
 
 export class AccountService {
   constructor(private readonly deps: Deps) {}
@@ -25,14 +30,8 @@ export class AccountService {
    */
   async signUp({ email, password, name, studioName }: SignUp): Promise<UserEntity> {
     const { dataSource, now, studioQuotaBytes } = this.deps;
+    const user = await this.build({ email, password, name });
     const createdAt = now();
-    const user = dataSource.manager.create(UserEntity, {
-      id: randomUUID(),
-      email,
-      name,
-      passwordHash: await hashPassword(password),
-      createdAt,
-    });
     const studio = {
       id: randomUUID(),
       name: studioName,
@@ -44,17 +43,35 @@ export class AccountService {
       bytesQuota: studioQuotaBytes,
       createdAt,
     };
-    try {
-      await dataSource.transaction(async (manager) => {
-        await manager.insert(UserEntity, user);
-        await manager.insert(StudioEntity, studio);
-        await manager.insert(MembershipEntity, { studioId: studio.id, userId: user.id, role: 'owner', createdAt });
-      });
-    } catch (error) {
-      if (isDuplicateKey(error)) throw new AppError('already-exists', { what: 'account' });
-      throw error;
-    }
+    await dataSource.transaction(async (manager) => {
+      await insertAccount(manager, user);
+      await manager.insert(StudioEntity, studio);
+      await manager.insert(MembershipEntity, { studioId: studio.id, userId: user.id, role: 'owner', createdAt });
+    });
     return user;
+  }
+
+  /** Makes an account as a member of a studio that is there. @throws AppError('already-exists'). */
+  async addMember(studioId: StudioId, role: Role, account: NewAccount): Promise<UserEntity> {
+    const user = await this.build(account);
+    await this.deps.dataSource.transaction(async (manager) => {
+      await insertAccount(manager, user);
+      await manager.insert(MembershipEntity, { studioId, userId: user.id, role, createdAt: user.createdAt });
+    });
+    return user;
+  }
+
+  private async build({ email, password, name }: NewAccount): Promise<UserEntity> {
+    const { dataSource, now, accountQuotaBytes } = this.deps;
+    return dataSource.manager.create(UserEntity, {
+      id: randomUUID(),
+      email,
+      name,
+      passwordHash: await hashPassword(password),
+      bytesUsed: 0,
+      bytesQuota: accountQuotaBytes,
+      createdAt: now(),
+    });
   }
 
   /** The account that both belong to, or null; takes the same time either way. */
@@ -73,5 +90,15 @@ export class AccountService {
     const user = await this.find(id);
     if (!user) throw new AppError('unauthenticated');
     return user;
+  }
+}
+
+/** @throws AppError('already-exists') for an address that has an account. */
+async function insertAccount(manager: EntityManager, user: UserEntity): Promise<void> {
+  try {
+    await manager.insert(UserEntity, user);
+  } catch (error) {
+    if (isDuplicateKey(error)) throw new AppError('already-exists', { what: 'account' });
+    throw error;
   }
 }

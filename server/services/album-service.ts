@@ -1,6 +1,5 @@
-import { IsNull, type DataSource } from 'typeorm';
-import type { z } from 'zod';
-import type { CreateAlbum, updateAlbumSchema } from '../../shared/contracts/albums';
+import { IsNull, Not, type DataSource } from 'typeorm';
+import type { CreateAlbum, UpdateAlbum } from '../../shared/contracts/albums';
 import { AppError } from '../../shared/errors';
 import { DEFAULT_BINDING } from '../../shared/model/page-format';
 import type { Actor, Target } from '../../shared/model/people';
@@ -36,8 +35,12 @@ export class AlbumService {
     return { target: { studioId: subject.studioId, albumId: id }, subject };
   }
 
-  async list(studioId: string): Promise<CountedAlbum[]> {
-    const albums = await this.dataSource.manager.find(AlbumEntity, { where: { studioId }, order: { createdAt: 'ASC', id: 'ASC' } });
+  /** A studio's albums, oldest first: those in use, or those in the bin. */
+  async list(studioId: string, { binned }: { readonly binned: boolean }): Promise<CountedAlbum[]> {
+    const albums = await this.dataSource.manager.find(AlbumEntity, {
+      where: { studioId, binnedAt: binned ? Not(IsNull()) : IsNull() },
+      order: { createdAt: 'ASC', id: 'ASC' },
+    });
     const counts = await this.dataSource.manager
       .createQueryBuilder(SpreadEntity, 'spread')
       .select('spread.albumId', 'albumId')
@@ -58,13 +61,14 @@ export class AlbumService {
   async create(studioId: string, { id, title, formatId }: CreateAlbum): Promise<CountedAlbum> {
     const format = await this.formats.find(studioId, formatId);
     if (!format) throw invalidField('formatId', 'the studio has no such page format');
-    const row = { id, studioId, title, format, binding: DEFAULT_BINDING, createdAt: this.now() };
+    const row = { id, studioId, title, format, binding: DEFAULT_BINDING, binnedAt: null, createdAt: this.now() };
     const made = await createOnce(this.dataSource.manager, AlbumEntity, row, 'album', (existing) => existing.studioId === studioId);
     return this.count(made.row);
   }
 
   /** A changed binding is copied into spreads that are begun after it. */
-  async update({ id }: AlbumEntity, changes: z.output<typeof updateAlbumSchema>): Promise<CountedAlbum> {
+  async update({ id, binnedAt }: AlbumEntity, { binned, ...rest }: UpdateAlbum): Promise<CountedAlbum> {
+    const changes = { ...rest, ...(binned !== undefined && { binnedAt: binned ? (binnedAt ?? this.now()) : null }) };
     if (Object.keys(changes).length > 0) await this.dataSource.manager.update(AlbumEntity, { id }, changes);
     return this.count(await this.get(id));
   }

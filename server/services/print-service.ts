@@ -8,6 +8,7 @@ import { PileEntity } from '../entities/pile-entity';
 import { PrintEntity } from '../entities/print-entity';
 import { SpreadEntity } from '../entities/spread-entity';
 import { StudioEntity } from '../entities/studio-entity';
+import { UserEntity } from '../entities/user-entity';
 import { presentPrint } from '../presenters/present-print';
 import type { Storage } from '../storage/storage';
 import { recordAudit } from './audit';
@@ -143,6 +144,7 @@ export class PrintService {
     const file = await manager.findOneByOrFail(FileEntity, { id: print.fileId });
     await manager.delete(FileEntity, { id: file.id });
     await manager.update(StudioEntity, { id: studio.id }, { bytesUsed: Math.max(0, studio.bytesUsed - file.bytes) });
+    if (file.addedBy !== null) await refundAccount(manager, file.addedBy, file.bytes);
     return file;
   }
 }
@@ -153,3 +155,12 @@ export const targetOfPrint = (print: PrintEntity): Target => ({
   pileId: print.pileId,
   contributedBy: print.contributedBy,
 });
+
+async function refundAccount(manager: EntityManager, userId: string, bytes: number): Promise<void> {
+  await manager
+    .createQueryBuilder()
+    .update(UserEntity)
+    .set({ bytesUsed: () => 'GREATEST(0, bytes_used - :bytes)' })
+    .where('id = :userId', { userId, bytes })
+    .execute();
+}

@@ -49,11 +49,11 @@ export interface ServiceDeps {
 }
 
 export function createServices({ config, dataSource, storage, incoming, intakePool, exportPool, now }: ServiceDeps): Services {
-  const { freeDiskBytes, studioQuotaBytes } = config.limits;
+  const { freeDiskBytes, studioQuotaBytes, accountQuotaBytes } = config.limits;
   const jobs = new JobService(dataSource, now);
   const formats = new FormatService(dataSource, now);
   return {
-    accounts: new AccountService({ dataSource, now, studioQuotaBytes }),
+    accounts: new AccountService({ dataSource, now, studioQuotaBytes, accountQuotaBytes }),
     studios: new StudioService(dataSource),
     grants: new GrantService(dataSource, now),
     formats,

@@ -12,6 +12,7 @@ import { UNTITLED_PRINT } from '../../shared/words/en/pictures';
 import { FileEntity } from '../entities/file-entity';
 import { PrintEntity } from '../entities/print-entity';
 import { StudioEntity } from '../entities/studio-entity';
+import { UserEntity } from '../entities/user-entity';
 import type { IntakeResult } from '../images/intake';
 import type { IntakePool } from '../images/pools';
 import { Refusal } from '../images/worker-messages';
@@ -61,7 +62,7 @@ export class UploadService {
       await uploader.mayAdd();
       const before = await this.findBefore(upload, uploader);
       if (before) return before;
-      await this.requireRoom(upload, uploader.studioId);
+      await this.requireRoom(upload, uploader);
       return await this.deps.incoming.withFolder(async (outputFolder) => {
         const result = await this.read(upload.path, outputFolder);
         return this.store(upload, uploader, result);
@@ -93,10 +94,11 @@ export class UploadService {
   }
 
   /** Checked again when storing; here only so that no work is done in vain. */
-  private async requireRoom(upload: ReceivedUpload, studioId: StudioId): Promise<void> {
-    await requireFreeDisk(this.deps.storage, upload.bytes, this.deps.freeDiskBytes);
-    const studio = await this.deps.dataSource.manager.findOneByOrFail(StudioEntity, { id: studioId });
-    requireQuota(studio, upload.bytes);
+  private async requireRoom({ bytes }: ReceivedUpload, { studioId, userId }: Uploader): Promise<void> {
+    const { dataSource, storage, freeDiskBytes } = this.deps;
+    await requireFreeDisk(storage, bytes, freeDiskBytes);
+    requireQuota('studio', await dataSource.manager.findOneByOrFail(StudioEntity, { id: studioId }), bytes);
+    if (userId !== null) requireQuota('account', await dataSource.manager.findOneByOrFail(UserEntity, { id: userId }), bytes);
   }
 
   private async read(sourcePath: string, outputFolder: string): Promise<IntakeResult> {
@@ -125,11 +127,12 @@ export class UploadService {
           if (before) return before;
           let file = await manager.findOneBy(FileEntity, content);
           if (!file) {
-            requireQuota(studio, upload.bytes);
+            requireQuota('studio', studio, upload.bytes);
             await storage.put(originalKey(studioId, upload.sha256), upload.path);
             for (const size of SIZES) await storage.put(pictureKey(studioId, upload.sha256, size), result.pictures[size]);
-            file = await this.insertFile(manager, upload, studioId, result);
+            file = await this.insertFile(manager, upload, uploader, result);
             await manager.update(StudioEntity, { id: studioId }, { bytesUsed: studio.bytesUsed + upload.bytes });
+            if (uploader.userId !== null) await chargeAccount(manager, uploader.userId, upload.bytes);
           }
           return { print: await this.insertPrint(manager, upload, uploader, result, file, studio.unit), known: false };
         }),
@@ -137,7 +140,7 @@ export class UploadService {
     );
   }
 
-  private insertFile(manager: EntityManager, upload: ReceivedUpload, studioId: StudioId, result: IntakeResult): Promise<FileEntity> {
+  private insertFile(manager: EntityManager, upload: ReceivedUpload, { studioId, userId }: Uploader, result: IntakeResult): Promise<FileEntity> {
     return manager.save(
       manager.create(FileEntity, {
         id: randomUUID(),
@@ -147,6 +150,7 @@ export class UploadService {
         mediaType: result.mediaType,
         width: result.width,
         height: result.height,
+        addedBy: userId,
         createdAt: this.deps.now(),
       }),
     );
@@ -199,8 +203,25 @@ export class UploadService {
   }
 }
 
-function requireQuota(studio: StudioEntity, bytes: number): void {
-  if (studio.bytesUsed + bytes > studio.bytesQuota) {
-    throw new AppError('quota-exceeded', { usedBytes: studio.bytesUsed, quotaBytes: studio.bytesQuota });
-  }
+type Quota = Pick<StudioEntity | UserEntity, 'bytesUsed' | 'bytesQuota'>;
+
+function requireQuota(whose: 'studio' | 'account', quota: Quota, bytes: number): void {
+  if (quota.bytesUsed + bytes > quota.bytesQuota) throw quotaExceeded(whose, quota);
+}
+
+const quotaExceeded = (whose: 'studio' | 'account', { bytesUsed, bytesQuota }: Quota): AppError =>
+  new AppError('quota-exceeded', { whose, usedBytes: bytesUsed, quotaBytes: bytesQuota });
+
+/** In one statement, since the same person may be sending to two studios at once. */
+async function chargeAccount(manager: EntityManager, userId: UserId, bytes: number): Promise<void> {
+  const { affected } = await manager
+    .createQueryBuilder()
+    .update(UserEntity)
+    .set({ bytesUsed: () => 'bytes_used + :bytes' })
+    .where('id = :userId AND bytes_used + :bytes <= bytes_quota', { userId, bytes })
+    .execute();
+  if (affected === 1) return;
+  // A locking read: the transaction's own view of the row may be older than what the statement met.
+  const user = await manager.findOneOrFail(UserEntity, { where: { id: userId }, lock: { mode: 'pessimistic_read' } });
+  throw quotaExceeded('account', user);
 }

@@ -15,7 +15,13 @@ export const createAlbumSchema = z.strictObject({
 });
 export type CreateAlbum = z.infer<typeof createAlbumSchema>;
 
-export const updateAlbumSchema = z.strictObject({ title: lineSchema(120).optional(), binding: bindingSchema.optional() });
+export const updateAlbumSchema = z.strictObject({
+  title: lineSchema(120).optional(),
+  binding: bindingSchema.optional(),
+  /** True puts the album with its spreads in the bin, false takes it out. */
+  binned: z.boolean().optional(),
+});
+export type UpdateAlbum = z.infer<typeof updateAlbumSchema>;
 
 export const albumSchema = z.object({
   id: idSchema,
@@ -24,6 +30,7 @@ export const albumSchema = z.object({
   format: pageFormatSchema,
   binding: bindingSchema,
   spreadCount: z.int(),
+  binned: z.boolean(),
 });
 export type Album = z.infer<typeof albumSchema>;
 
@@ -78,8 +85,8 @@ export const spreadDetailSchema = spreadSummarySchema.extend({
 });
 export type SpreadDetail = z.infer<typeof spreadDetailSchema>;
 
-/** Spreads in the bin are listed on their own. */
-export const spreadQuerySchema = z.strictObject({ binned: z.stringbool().default(false) });
+/** Albums and spreads in the bin are listed on their own. */
+export const binQuerySchema = z.strictObject({ binned: z.stringbool().default(false) });
 
 export const albumListSchema = z.object({ albums: z.array(albumSchema) });
 /** The shipped page formats first, then the studio's own. */

@@ -61,8 +61,11 @@ const WORDS: Record<ErrorCode, Words> = {
     sentence: () => 'There were too many attempts in a short time: wait a few minutes and try again.',
   },
   'quota-exceeded': {
-    title: 'The studio is full',
-    sentence: () => 'The studio has no room left for this: delete prints that you no longer need, or ask for more room.',
+    title: 'No room left',
+    sentence: ({ whose }) =>
+      whose === 'account'
+        ? 'Your account has no room left for this: delete prints that you added and no longer need, or ask for more room.'
+        : 'The studio has no room left for this: delete prints that you no longer need, or ask for more room.',
   },
   'disk-full': {
     title: 'The server is full',

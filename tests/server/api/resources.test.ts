@@ -76,6 +76,20 @@ describe('a studio’s things', () => {
     expect(first).toMatchObject({ albumTitle: 'Order', studioName: 'Salt & Card', may: { edit: true, comment: true, export: true } });
   });
 
+  it('albums: leave their list for the bin, and come back out of it', async () => {
+    const body = { id: randomUUID(), title: 'Put away', formatId: 'a4' };
+    await owner.agent.post(inStudio('albums')).send(body).expect(201);
+    const designer = await app().join(owner.studioId, 'designer');
+    const titles = async (query = '') =>
+      ((await owner.agent.get(inStudio(`albums${query}`)).expect(200)).body.albums as { title: string }[]).map(({ title }) => title);
+    await designer.agent.patch(`/api/albums/${body.id}`).send({ binned: true }).expect(200).expect(({ body: album }) => expect(album.binned).toBe(true));
+    expect(await titles()).not.toContain('Put away');
+    expect(await titles('?binned=true')).toEqual(['Put away']);
+    await designer.agent.delete(`/api/albums/${body.id}`).expect(403);
+    await designer.agent.patch(`/api/albums/${body.id}`).send({ binned: false }).expect(200);
+    expect(await titles()).toContain('Put away');
+  });
+
   it('spreads: deleting an album takes them along', async () => {
     const spread = await beginSpread(owner);
     await owner.agent.delete(`/api/albums/${spread.albumId}`).expect(204);

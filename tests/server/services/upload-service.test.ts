@@ -8,6 +8,7 @@ import { FileEntity } from '#server/entities/file-entity';
 import { PileEntity } from '#server/entities/pile-entity';
 import { PrintEntity } from '#server/entities/print-entity';
 import { StudioEntity } from '#server/entities/studio-entity';
+import { UserEntity } from '#server/entities/user-entity';
 import { createIntakePool, type IntakePool } from '#server/images/pools';
 import type { ReceivedUpload } from '#server/services/receive-upload';
 import { removeUnlessKnown } from '#server/services/stored-pictures';
@@ -56,6 +57,15 @@ async function studio(values: Partial<StudioEntity> = {}): Promise<string> {
   });
   return id;
 }
+
+async function account(bytesQuota: number): Promise<string> {
+  const id = randomUUID();
+  const values = { id, email: `${id}@example.org`, name: 'Ada', passwordHash: 'none', bytesUsed: 0, bytesQuota, createdAt: new Date() };
+  await database().dataSource.manager.insert(UserEntity, values);
+  return id;
+}
+
+const usedBy = async (id: string) => (await database().dataSource.manager.findOneByOrFail(UserEntity, { id })).bytesUsed;
 
 function service(parts: { storage?: Storage; pool?: IntakePool; freeDiskBytes?: number } = {}): UploadService {
   return new UploadService({
@@ -176,6 +186,26 @@ describe('an upload', () => {
     }
     expect(positions).toEqual([[pileId, 0], [pileId, 1]]);
   });
+
+  it('is refused when the account is full, over all its studios', async () => {
+    const bytes = await jpeg(20);
+    const userId = await account(bytes.length + 10);
+    await service().take(await received(bytes), uploader({ userId }));
+    expect(await usedBy(userId)).toBe(bytes.length);
+    studioId = await studio();
+    await expect(service().take(await received(bytes), uploader({ userId }))).rejects.toMatchObject({ code: 'quota-exceeded', data: { whose: 'account' } });
+    expect(await rows()).toEqual({ files: 0, prints: 0, bytesUsed: 0 });
+  });
+
+  it('is taken once when one person sends to two studios at once and has room for one', async () => {
+    const bytes = await jpeg(21);
+    const userId = await account(bytes.length + 10);
+    const other = await studio();
+    const both = [uploader({ userId }), uploader({ userId, studioId: other })];
+    const ends = await Promise.allSettled(both.map(async (to) => service().take(await received(bytes), to)));
+    expect(ends.map(({ status }) => status).sort()).toEqual(['fulfilled', 'rejected']);
+    expect(await usedBy(userId)).toBe(bytes.length);
+  });
 });
 
 describe('an upload that cannot be taken leaves nothing', () => {
@@ -192,7 +222,7 @@ describe('an upload that cannot be taken leaves nothing', () => {
   it('when the studio is full', async () => {
     studioId = await studio({ bytesQuota: 1000 });
     const upload = await received(await jpeg(10));
-    await expect(service().take(upload, uploader())).rejects.toMatchObject({ code: 'quota-exceeded' });
+    await expect(service().take(upload, uploader())).rejects.toMatchObject({ code: 'quota-exceeded', data: { whose: 'studio' } });
   });
 
   it('when the disk is full', async () => {

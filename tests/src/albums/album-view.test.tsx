@@ -25,7 +25,7 @@ const spread = (n: number, title: string, binned = false) => ({
 function setUp({ role = 'owner' as Role, refuse = false } = {}) {
   const spreads = [spread(1, 'Setting off'), spread(2, 'Out to the light'), spread(3, 'Spoiled', true)];
   const calls = fakeApi({
-    'GET /albums/:id': [200, { id: ALBUM, studioId: STUDIO_ID, title: 'Long Weekends', format: formatOf('12x12in'), binding: DEFAULT_BINDING, spreadCount: 2 }],
+    'GET /albums/:id': [200, { id: ALBUM, studioId: STUDIO_ID, title: 'Long Weekends', format: formatOf('12x12in'), binding: DEFAULT_BINDING, spreadCount: 2, binned: false }],
     'GET /albums/:id/spreads': [200, { spreads, prints: [] }],
     'PATCH /spreads/:id': ({ path, body }) =>
       refuse ? problem('unavailable', 503, 'The database is away: try again.') : [200, { ...spreads.find(({ id }) => path.endsWith(id))!, ...(body as object) }],
