@@ -34,7 +34,7 @@ export const editRoutes = ({ dataSource, services: { spreads, edits } }: AppDeps
     needs: 'spread:edit',
     on: ({ spreadId }) => spreads.locate(spreadId),
     answer: { status: 200, schema: postEditsResponseSchema },
-    errors: ['stale-revision', 'document-refused', 'too-large'],
+    errors: ['stale-revision', 'document-refused', 'already-exists', 'too-large'],
     handle: async ({ actor, subject, body }) => {
       const { revision, missed } = await edits.post(subject.id, body, actor);
       return { revision, missed: missed.map(presentEdit) };

@@ -36,7 +36,7 @@ export class EditService {
    *
    * @throws AppError `stale-revision` (`staleSpreadSchema`) where a touched key changed since the base, or is not what the edit says it was.
    *   `document-refused` naming every fault of the result, `invalid-input` for a base that is not
-   *   reached yet or a value that no document can hold.
+   *   reached yet or a value that no document can hold, `already-exists` for an id under which another edit is saved.
    */
   post(spreadId: string, posted: PostEdits, actor: Actor): Promise<Applied> {
     return this.dataSource.transaction(async (manager) => {
@@ -49,6 +49,7 @@ export class EditService {
       const ids = posted.edits.map(({ id }) => id);
       const known = await manager.findBy(SpreadEditEntity, { spreadId, id: In(ids) });
       const knownIds = new Set(known.map(({ id }) => id));
+      refuseOtherEdits(posted.edits, known);
       const log = await readLog(manager, spreadId, { after: posted.baseRevision });
       const foreign = log.filter(({ id }) => !ids.includes(id));
       const fresh = posted.edits.filter(({ id }) => !knownIds.has(id));
@@ -83,6 +84,15 @@ export class EditService {
     return { doc, logged, snapshots };
   }
 }
+
+/** Taking another edit for a repeat would tell its maker that it is saved. */
+function refuseOtherEdits(edits: readonly Edit[], known: readonly SpreadEditEntity[]): void {
+  const saved = new Map(known.map(({ id, patch }) => [id, patch]));
+  const other = edits.find(({ id, patch }) => saved.has(id) && !isDeepStrictEqual(asStored(patch), saved.get(id)));
+  if (other) throw new AppError('already-exists', { what: 'saved edit', id: other.id });
+}
+
+const asStored = (patch: Patch): unknown => JSON.parse(JSON.stringify(patch));
 
 function refuseConflicts(spread: SpreadEntity, fresh: readonly Edit[], foreign: readonly SpreadEditEntity[]): void {
   const touchedByOthers = new Set(foreign.flatMap(({ patch }) => Object.keys(patch)));

@@ -1,4 +1,5 @@
 import type { DataSource } from 'typeorm';
+import { MAX_STEPS } from '../../shared/contracts/document';
 import { gridOf } from '../../shared/geometry/grid';
 import { AppError } from '../../shared/errors';
 import { PAGE_FORMATS, type PageFormat } from '../../shared/model/page-format';
@@ -23,12 +24,13 @@ export class FormatService {
   }
 
   /**
-   * @throws AppError `invalid-input` for a format whose grid holds no step, `already-exists` for an id that is taken
-   *   by another format.
+   * @throws AppError `invalid-input` for a format whose grid holds no step or more than a mat can be placed on,
+   *   `already-exists` for an id that is taken by another format.
    */
   async create(studioId: string, format: PageFormat): Promise<PageFormat> {
     const grid = gridOf(format);
     if (grid.columns < 1 || grid.rows < 1) throw invalidField('step', 'not one whole step fits between the margins');
+    if (Math.max(grid.columns, grid.rows) > MAX_STEPS) throw invalidField('step', `a page has at most ${MAX_STEPS} steps along a side`);
     if (format.gap >= format.step) throw invalidField('gap', 'the gap must be smaller than a step');
     const taken = new AppError('already-exists', { what: 'page format', id: format.id });
     if (PAGE_FORMATS.some(({ id }) => id === format.id)) throw taken;

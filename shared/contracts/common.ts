@@ -13,22 +13,30 @@ export const sideSchema = z.enum(['left', 'right']);
 export const dateSchema = z.iso.date();
 export const instantSchema = z.iso.datetime();
 export const revisionSchema = z.int().nonnegative();
+/** A place in a list that people put in order; a list is never this long. */
+export const positionSchema = z.int().nonnegative().max(1_000_000);
 
 /**
- * A line of text as people type it: trimmed, in Unicode's composed form, without control characters and
- * without the marks that turn the reading direction (they can disguise a name).
+ * What no text keeps: halves of characters, which no database and no file name takes, and marks that turn the
+ * reading direction, which can disguise a name.
+ */
+const UNFIT = /[\p{Cs}\u200e\u200f\u202a-\u202e\u2066-\u2069]/gu;
+
+/**
+ * A line of text as people type it: trimmed, in Unicode's composed form, without control characters. Reading a
+ * result once more changes nothing: an edit is held against the text that was stored.
  */
 export const lineSchema = (max: number) =>
   z
     .string()
-    .transform((text) => text.normalize('NFC').replace(/[\p{Cc}\u200e\u200f\u202a-\u202e\u2066-\u2069]/gu, '').trim())
+    .transform((text) => text.replace(UNFIT, '').replace(/\p{Cc}/gu, '').normalize('NFC').trim())
     .pipe(z.string().min(1).max(max));
 
 /** Several lines of text; may be empty. */
 export const textSchema = (max: number) =>
   z
     .string()
-    .transform((text) => text.normalize('NFC').replace(/[\u200e\u200f\u202a-\u202e\u2066-\u2069]/gu, '').replace(/(?!\n)\p{Cc}/gu, ''))
+    .transform((text) => text.replace(UNFIT, '').replace(/(?!\n)\p{Cc}/gu, '').normalize('NFC'))
     .pipe(z.string().max(max));
 
 /** RFC 9457 problem details; `code` is what a client reads, `fields` names every field that did not fit. */

@@ -5,9 +5,11 @@ import { hexSchema, idSchema, lineSchema, offsetSchema, sideSchema, sizeSchema, 
 
 export const JOURNALING_MAX = 4000;
 export const LETTERING_MAX = 200;
+/** Steps along either side of a page. */
+export const MAX_STEPS = 400;
 
 export const pageFormatSchema = z.strictObject({
-  id: z.string().min(1).max(60),
+  id: lineSchema(60),
   name: lineSchema(60),
   width: sizeSchema,
   height: sizeSchema,
@@ -34,6 +36,7 @@ const placementShape = {
   y: offsetSchema,
   turn: turnsSchema,
   scaledWidth: sizeSchema.nullable(),
+  detailId: idSchema.nullable(),
 };
 
 export const contentSchema = z.discriminatedUnion('kind', [
@@ -56,15 +59,15 @@ export const contentSchema = z.discriminatedUnion('kind', [
 ]);
 
 const revealSchema = z.int().nonnegative().max(40_640);
-const stepsSchema = z.int().nonnegative().max(400);
+const stepsSchema = z.int().nonnegative().max(MAX_STEPS);
 
 export const matSchema = z.strictObject({
   id: idSchema,
   page: sideSchema,
   x: stepsSchema,
   y: stepsSchema,
-  w: z.int().positive().max(400),
-  h: z.int().positive().max(400),
+  w: z.int().positive().max(MAX_STEPS),
+  h: z.int().positive().max(MAX_STEPS),
   z: z.int().min(-1_000_000).max(1_000_000),
   color: hexSchema,
   reveal: revealSchema.nullable(),

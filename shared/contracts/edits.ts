@@ -53,7 +53,16 @@ export type Edit = z.infer<typeof editSchema>;
 
 export const postEditsSchema = z.strictObject({
   baseRevision: revisionSchema,
-  edits: z.array(editSchema).min(1).max(100),
+  edits: z
+    .array(editSchema)
+    .min(1)
+    .max(100)
+    .check(({ value, issues }) => {
+      const ids = value.map(({ id }) => id);
+      ids.forEach((id, i) => {
+        if (ids.indexOf(id) < i) issues.push({ code: 'custom', input: id, path: [i, 'id'], message: 'each edit needs an id of its own' });
+      });
+    }),
 });
 export type PostEdits = z.infer<typeof postEditsSchema>;
 

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import type { Print } from '../model/print';
-import { dateSchema, hexSchema, idSchema, lineSchema, pageQuerySchema, revisionSchema, sizeSchema, turnsSchema } from './common';
+import { dateSchema, hexSchema, idSchema, lineSchema, pageQuerySchema, positionSchema, revisionSchema, sizeSchema, turnsSchema } from './common';
 
 export const MAX_UPLOAD_BYTES = 50 * 1024 * 1024;
 export const MAX_PIXELS = 100_000_000;
@@ -39,7 +39,7 @@ export const updatePrintSchema = z.strictObject({
   baseRevision: revisionSchema,
   title: lineSchema(TITLE_MAX).optional(),
   pileId: idSchema.nullable().optional(),
-  position: z.int().nonnegative().optional(),
+  position: positionSchema.optional(),
   paperWidth: sizeSchema.optional(),
   paperHeight: sizeSchema.optional(),
   turns: turnsSchema.optional(),
@@ -105,7 +105,7 @@ export const pileListSchema = z.object({ piles: z.array(pileSchema) });
 export const createPileSchema = z.strictObject({ id: idSchema, name: lineSchema(80) });
 export const updatePileSchema = z.strictObject({
   name: lineSchema(80).optional(),
-  position: z.int().nonnegative().optional(),
+  position: positionSchema.optional(),
   sharedWithContributors: z.boolean().optional(),
 });
 

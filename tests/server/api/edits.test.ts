@@ -48,6 +48,33 @@ describe('saving edits', () => {
     expect((await current()).document.mats).toHaveLength(2);
   });
 
+  it('takes no other edit for a repeat because it has the same id', async () => {
+    await begin();
+    const [first, other] = [edits.add(buildMat({ id: randomUUID() })), edits.add(buildMat({ id: randomUUID(), x: 8 }))];
+    await post({ baseRevision: 0, edits: [first] }).expect(200);
+    const answer = await post({ baseRevision: 1, edits: [{ ...other, id: first.id }] }).expect(409);
+    expect(answer.body).toMatchObject({ code: 'already-exists', data: { id: first.id } });
+    expect((await current()).revision).toBe(1);
+  });
+
+  it('names the edit whose id another of the list has', async () => {
+    await begin();
+    const [first, second] = [edits.add(buildMat({ id: randomUUID() })), edits.add(buildMat({ id: randomUUID(), x: 8 }))];
+    const answer = await post({ baseRevision: 0, edits: [first, { ...second, id: first.id }] }).expect(400);
+    expect(answer.body.fields).toEqual([{ path: 'edits.1.id', message: 'each edit needs an id of its own' }]);
+    expect((await current()).revision).toBe(0);
+  });
+
+  it('takes text with half a character in it, which the database does not, and can change it again', async () => {
+    await begin();
+    const typed = buildMat({ id: randomUUID(), content: { kind: 'lettering', text: 'low\ud83d tide', color: '#000000', letterHeight: 4064 } });
+    await post({ baseRevision: 0, edits: [edits.add(typed)] }).expect(200);
+    await post({ baseRevision: 1, edits: [edits.change({ ...typed, color: '#aa3322' }, typed)] }).expect(200);
+    const [stored] = (await current()).document.mats;
+    expect(stored!.content).toMatchObject({ text: 'low tide' });
+    await post({ baseRevision: 2, edits: [edits.change({ ...stored!, color: '#00aa22' }, stored!)] }).expect(200);
+  });
+
   it('goes on where a repeat brings new edits along', async () => {
     await begin();
     const first = edits.add(buildMat({ id: randomUUID() }));
