@@ -73,7 +73,7 @@ export class ComposePage {
   async carryTo(place: Locator | Point): Promise<void> {
     const { x, y } = 'x' in place ? place : await middleOf(place);
     await this.page.mouse.move(x, y, { steps: 6 });
-    await this.page.evaluate(() => new Promise((resolve) => requestAnimationFrame(() => requestAnimationFrame(resolve))));
+    await twoFrames(this.page);
   }
 
   letGo(): Promise<void> {
@@ -102,6 +102,10 @@ export class ComposePage {
     return presses;
   }
 }
+
+/** Long enough for the page to have drawn what was done last; a hand is slower. */
+export const twoFrames = (page: Page): Promise<unknown> =>
+  page.evaluate(() => new Promise((resolve) => requestAnimationFrame(() => requestAnimationFrame(resolve))));
 
 export async function middleOf(locator: Locator): Promise<Point> {
   const box = await locator.boundingBox();

@@ -47,7 +47,7 @@ export function ComposeScreen({ title, piles, mayEdit, sortHref }: ComposeScreen
     ? Math.max(4, (viewport.width - 24) / ((2 * doc.format.width + doc.binding.gap) / 4064))
     : pixelsPerInch(viewport, doc, { sides: 2 * margin, vertical: VERTICAL_SURROUND });
   const { held, contextProps } = useComposeDrag(perInch);
-  useComposeKeys(isEditable);
+  useComposeKeys(isEditable, held !== null);
 
   const heldPrint = held && isPrintDrag(held.data) ? (prints.get(held.data.printId) ?? null) : null;
   const marked = useMemo(() => new Set(sources ?? []), [sources]);
@@ -96,13 +96,22 @@ function dropWords({ view, notes }: Judgement, matId: string, unit: Unit): DropW
 }
 
 /** Undo, redo, duplicate, delete and let go, from the keyboard, while no field has the focus. */
-function useComposeKeys(isEditable: boolean): void {
+function useComposeKeys(isEditable: boolean, isHolding: boolean): void {
   const store = useComposerStore();
+  useEffect(() => {
+    if (!isHolding) return undefined;
+    // With something in the hand, Escape puts it back, and no more: the selection stays.
+    const claimEscape = (event: KeyboardEvent): void => {
+      if (event.key === 'Escape') event.preventDefault();
+    };
+    window.addEventListener('keydown', claimEscape, { capture: true });
+    return () => window.removeEventListener('keydown', claimEscape, { capture: true });
+  }, [isHolding]);
   useEffect(() => {
     if (!isEditable) return undefined;
     const handleKeyDown = (event: KeyboardEvent): void => {
       const target = event.target as HTMLElement;
-      if (target.closest('input, textarea, select, [contenteditable], [role="dialog"]')) return;
+      if (event.defaultPrevented || target.closest('input, textarea, select, [contenteditable], [role="dialog"]')) return;
       const { undo, redo, run, select, selection } = store.getState();
       const isCommand = event.ctrlKey || event.metaKey;
       const key = event.key.toLowerCase();

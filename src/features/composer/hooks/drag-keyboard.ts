@@ -41,6 +41,9 @@ export const keyboardCoordinates =
     return target && { x: target.x - held.width / 2, y: target.y - held.height / 2 };
   };
 
+/** px from the table's edges to where a print is held over it. */
+const TABLE_INSET = 40;
+
 type Context = Parameters<KeyboardCoordinateGetter>[1]['context'];
 
 function nearest(context: Context, from: { x: number; y: number }, dx: number, dy: number, overId: unknown): { x: number; y: number } | undefined {
@@ -48,9 +51,11 @@ function nearest(context: Context, from: { x: number; y: number }, dx: number, d
   for (const container of context.droppableContainers.getEnabled()) {
     const rect = context.droppableRects.get(container.id);
     if (!rect || container.id === overId) continue;
+    // The table is as wide as the screen nearly: straight down to it, or to the end of it that is nearer.
     const isTable = (container.data.current as DropData | undefined)?.type === 'table';
-    const x = isTable ? from.x : rect.left + rect.width / 2;
-    const y = isTable ? rect.top + Math.min(rect.height / 2, 40) : rect.top + rect.height / 2;
+    const inset = Math.min(rect.width / 2, rect.height / 2, TABLE_INSET);
+    const x = isTable ? Math.min(Math.max(from.x, rect.left + inset), rect.right - inset) : rect.left + rect.width / 2;
+    const y = isTable ? rect.top + inset : rect.top + rect.height / 2;
     const along = (x - from.x) * dx + (y - from.y) * dy;
     if (along < 2) continue;
     const across = Math.abs((x - from.x) * dy) + Math.abs((y - from.y) * dx);

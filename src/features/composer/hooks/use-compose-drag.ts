@@ -6,6 +6,8 @@ import {
   useSensor,
   useSensors,
   type Announcements,
+  type ClientRect,
+  type Collision,
   type CollisionDetection,
   type DragEndEvent,
   type DragMoveEvent,
@@ -38,9 +40,14 @@ interface Start {
   readonly photo: PlacedPhoto | undefined;
 }
 
-/** The pointer's topmost target; the nearest one when the hand is a keyboard. */
+/** The pointer's topmost target. When the hand is a keyboard, what lies under the middle of the print, then the nearest. */
 const findTargets: CollisionDetection = (args) => {
-  if (!args.pointerCoordinates) return closestCenter(args);
+  if (!args.pointerCoordinates) {
+    // Distance alone would never lead to the table: it is so wide that the mats' middles are nearer than its own.
+    const isUnder = ({ id }: Collision): boolean => isMiddleIn(args.collisionRect, args.droppableRects.get(id));
+    const nearest = closestCenter(args);
+    return [...nearest.filter(isUnder), ...nearest.filter((hit) => !isUnder(hit))];
+  }
   const zOf = (hit: (typeof hits)[number]): number => {
     const data = hit.data?.droppableContainer.data.current as DropData | undefined;
     return data?.type === 'mat' ? data.z : -Infinity;
@@ -59,6 +66,7 @@ export function useComposeDrag(perInch: number) {
   // As it was picked up, also once it is let go. The draggable's own data changes in mid-drag: while its print is
   // previewed elsewhere, the mat that it was taken from is bare.
   const inHand = useRef<DragData | null>(null);
+  const hasLeft = useRef(false);
   const [held, setHeld] = useState<Held | null>(null);
   const perInchRef = useRef(perInch);
   perInchRef.current = perInch;
@@ -88,6 +96,7 @@ export function useComposeDrag(perInch: number) {
     const mat = state.doc.mats.find((m) => m.id === matId);
     const photo = placedPhotos(state.doc, (id) => state.prints.get(id)).find((p) => p.matId === matId);
     inHand.current = data;
+    hasLeft.current = false;
     start.current = { data, gesture: state.beginGesture(), mat, photo };
     setHeld({ data, overMatId: null });
   };
@@ -154,7 +163,12 @@ export function useComposeDrag(perInch: number) {
     };
     return {
       onDragStart: ({ active }) => words.pickedUp(nameOf(active.data.current as DragData)),
-      onDragOver: ({ over }) => (isPrintInHand() ? words.over(placeOf(over?.data.current as DropData | undefined)) : undefined),
+      onDragOver: ({ over }) => {
+        const drop = over?.data.current as DropData | undefined;
+        hasLeft.current ||= !isHome(inHand.current, drop);
+        // Where it was picked up, "picked up" is the last word until it leaves.
+        return isPrintInHand() && hasLeft.current ? words.over(placeOf(drop)) : undefined;
+      },
       onDragMove: () => {
         const data = inHand.current;
         return data?.type === 'mat' || data?.type === 'resize' ? matNow(data.matId) : undefined;
@@ -179,6 +193,17 @@ export function useComposeDrag(perInch: number) {
     },
   };
 }
+
+function isMiddleIn(held: ClientRect, target: ClientRect | undefined): boolean {
+  if (!target) return false;
+  const x = held.left + held.width / 2;
+  const y = held.top + held.height / 2;
+  return target.left <= x && x <= target.right && target.top <= y && y <= target.bottom;
+}
+
+/** True for the place that a print was picked up from. */
+const isHome = (data: DragData | null, drop: DropData | undefined): boolean =>
+  drop?.type === 'mat' ? data?.type === 'carried' && data.matId === drop.matId : drop?.type === 'table' && data?.type === 'print';
 
 function callOf({ data, ...begun }: Start, delta: { x: number; y: number }, perInch: number, doc: Parameters<typeof moveCall>[0]): CommandCall | null {
   switch (data.type) {
