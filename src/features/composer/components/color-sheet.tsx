@@ -18,12 +18,12 @@ export function ColorSheet({ heading, value, groups, onChoose }: ColorSheetProps
   const parsed = parseColor(typed);
   return (
     <div className="color-sheet">
-      <h3>{heading}</h3>
+      <h2>{heading}</h2>
       {groups
         .filter((group) => group.colors.length > 0)
         .map((group) => (
           <section key={group.name} aria-label={group.name}>
-            <h4>{group.name}</h4>
+            <h3>{group.name}</h3>
             <ul>
               {group.colors.map((color) => (
                 <li key={color}>

@@ -30,7 +30,7 @@ export function ContentSheet({ mat, unit, ink, onChange }: ContentSheetProps) {
   const { content } = mat;
   return (
     <div className="content-sheet">
-      <h3>This mat carries</h3>
+      <h2>This mat carries</h2>
       <div className="content-choices" role="group" aria-label="What the mat carries">
         {CHOICES.map(({ kind, label }) => (
           <button key={kind} type="button" className="opt" aria-pressed={content.kind === kind} onClick={() => onChange(startOf(kind, ink, mat.color))}>

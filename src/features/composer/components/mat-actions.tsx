@@ -114,7 +114,7 @@ function RevealSheet({ mats, doc, unit, onRun }: SheetProps & { mats: readonly M
   const inner = first.inner ?? { color: '#f7f4ea', reveal: inches(1 / 16) };
   return (
     <div className="content-sheet">
-      <h3>Reveal</h3>
+      <h2>Reveal</h2>
       <p className="content-hint">The border of mat left visible round what it carries.</p>
       <div className="content-choices" role="group" aria-label="Reveal">
         <button type="button" className="opt" aria-pressed={first.reveal === null} onClick={() => onRun({ id: 'mats.setReveal', args: { matIds, reveal: null } })}>
@@ -126,7 +126,7 @@ function RevealSheet({ mats, doc, unit, onRun }: SheetProps & { mats: readonly M
           </button>
         ))}
       </div>
-      <h3>Inner mat</h3>
+      <h2>Inner mat</h2>
       <div className="content-choices">
         <button type="button" className="opt" aria-pressed={first.inner === null} onClick={() => onRun({ id: 'mats.setInner', args: { matIds, inner: null } })}>
           None
@@ -161,7 +161,7 @@ function SplitSheet({ mat, onRun }: SheetProps & { mat: Mat }) {
   const isPrint = mat.content.kind === 'print';
   return (
     <div className="content-sheet">
-      <h3>Split</h3>
+      <h2>Split</h2>
       <p className="content-hint">{isPrint ? 'The print is cut into panes, one on each small mat.' : 'Into equal small mats.'}</p>
       <div className="content-choices" role="group" aria-label="Columns and rows">
         {options.map(([columns, rows]) => {

@@ -113,10 +113,10 @@ function NoteItem({ place: { note, top }, x, width, unit, isEditable, onRemedy, 
 export function NoteText({ note, unit }: { note: Note; unit: Unit }) {
   return (
     <>
-      <h3 className="note-severity">
+      <h2 className="note-severity">
         <SeverityMark severity={note.severity} />
         {SEVERITY_WORDS[note.severity]}
-      </h3>
+      </h2>
       <p>{noteSentence(note, unit)}</p>
     </>
   );

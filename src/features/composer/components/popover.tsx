@@ -3,7 +3,7 @@ import type { ReactNode } from 'react';
 
 interface PopoverProps {
   readonly label: ReactNode;
-  /** Said when the label is only a picture. */
+  /** Said of the button and of the sheet; needed where the label is only a picture. */
   readonly name?: string;
   readonly children: ReactNode;
   readonly disabled?: boolean;
@@ -21,7 +21,7 @@ export function ActionPopover({ label, name, children, disabled = false, title, 
         </button>
       </Radix.Trigger>
       <Radix.Portal>
-        <Radix.Content className="action-sheet" align={align} sideOffset={6} collisionPadding={12}>
+        <Radix.Content className="action-sheet" aria-label={name ?? (typeof label === 'string' ? label : undefined)} align={align} sideOffset={6} collisionPadding={12}>
           {children}
         </Radix.Content>
       </Radix.Portal>

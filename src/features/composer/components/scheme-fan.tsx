@@ -68,7 +68,7 @@ function SchemeBlock({ suggestion: { scheme, shares }, isInUse, isEditable, onAp
     ids.length === 0 ? 'in none of the photos' : `from ${ids.slice(0, 3).map((id) => titles.get(id)?.title ?? 'a print').join(', ')}`;
   return (
     <div className={`scheme is-${character} ${isInUse ? 'is-in-use' : ''}`}>
-      <h3>
+      <h2>
         {NAMES[character]} <span>{CHARACTER_WORDS[character]}</span>
         {isInUse ? (
           <em>in use</em>
@@ -79,7 +79,7 @@ function SchemeBlock({ suggestion: { scheme, shares }, isInUse, isEditable, onAp
             </button>
           )
         )}
-      </h3>
+      </h2>
       <ul className="scheme-chips">
         {ROLES.map((role, i) => {
           const color = scheme.colors[role];
