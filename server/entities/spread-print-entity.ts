@@ -2,7 +2,7 @@ import { Column, Entity, JoinColumn, ManyToOne, PrimaryColumn } from 'typeorm';
 import { PrintEntity } from './print-entity';
 import { SpreadEntity } from './spread-entity';
 
-/** Every print that a spread's document names. Deleting such a print is refused. MODEL.md 5. */
+/** Every print that is chosen for a spread. Deleting such a print is refused. MODEL.md 5. */
 @Entity('spread_prints')
 export class SpreadPrintEntity {
   @PrimaryColumn({ name: 'spread_id', type: 'uuid' })
@@ -19,7 +19,7 @@ export class SpreadPrintEntity {
   @JoinColumn({ name: 'print_id', foreignKeyConstraintName: 'fk_spread_prints_print' })
   print?: PrintEntity;
 
-  /** Copies that are placed on mats; 0 for a print that only lies ready or gave a colour. */
+  /** Copies that the spread needs, at the studio's tolerance when it was saved; 0 for a print that only lies ready. */
   @Column({ type: 'int', unsigned: true })
   copies!: number;
 }

@@ -7,13 +7,14 @@ import { AppError } from '../../shared/errors';
 import { findDocumentFaults } from '../../shared/model/document-faults';
 import { applyPatch, readKey, type Patch } from '../../shared/model/patch';
 import type { Actor } from '../../shared/model/people';
-import { namedPrints, printUse } from '../../shared/model/print-use';
+import { copiesUsed, namedPrints } from '../../shared/model/print-use';
 import { SCHEMA_VERSION, type SpreadDocument } from '../../shared/model/spread';
 import { PrintEntity } from '../entities/print-entity';
 import { SpreadEditEntity } from '../entities/spread-edit-entity';
 import { SpreadEntity } from '../entities/spread-entity';
 import { SpreadPrintEntity } from '../entities/spread-print-entity';
 import { SpreadSnapshotEntity } from '../entities/spread-snapshot-entity';
+import { StudioEntity } from '../entities/studio-entity';
 import { presentEdit } from '../presenters/present-edit';
 import { readLog, SNAPSHOT_EVERY } from './history';
 import { readDocument } from './spread-service';
@@ -134,7 +135,8 @@ async function write(manager: EntityManager, spread: SpreadEntity, doc: SpreadDo
   );
   if (affected !== 1) throw stale(spread, [], []);
   await manager.delete(SpreadPrintEntity, { spreadId: spread.id });
-  const rows = [...printUse(doc)].map(([printId, copies]) => ({ spreadId: spread.id, printId, copies }));
+  const { tolerance } = await manager.findOneByOrFail(StudioEntity, { id: spread.studioId });
+  const rows = [...copiesUsed(doc, tolerance)].map(([printId, copies]) => ({ spreadId: spread.id, printId, copies }));
   if (rows.length > 0) await manager.insert(SpreadPrintEntity, rows);
 }
 

@@ -11,7 +11,7 @@ import { AppError } from '../../shared/errors';
 import { toInches } from '../../shared/model/length';
 import type { UserId } from '../../shared/model/ids';
 import type { Print } from '../../shared/model/print';
-import { printUse } from '../../shared/model/print-use';
+import { printUses } from '../../shared/model/print-use';
 import type { SpreadDocument } from '../../shared/model/spread';
 import { buildScene } from '../../shared/scene/build-scene';
 import type { Scene } from '../../shared/scene/scene';
@@ -148,7 +148,7 @@ export class ExportService {
   }
 
   private async printsOf(spread: SpreadEntity, doc: SpreadDocument): Promise<{ print: Print; sha256: string }[]> {
-    const ids = [...printUse(doc).keys()];
+    const ids = [...printUses(doc).keys()];
     if (ids.length === 0) return [];
     const rows = await this.deps.dataSource.manager.find(PrintEntity, {
       where: { studioId: spread.studioId, id: In(ids) },

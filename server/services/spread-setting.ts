@@ -13,7 +13,7 @@ export interface SpreadSetting {
   readonly album: AlbumEntity;
   readonly studio: StudioEntity;
   readonly prints: readonly PrintEntity[];
-  /** Copies of the named prints that other live spreads of the studio use. */
+  /** Copies of each of the studio's prints that its other live spreads use. */
   readonly usedElsewhere: Readonly<Record<string, number>>;
 }
 
@@ -23,7 +23,7 @@ export async function loadSpreadSetting(dataSource: DataSource, spread: SpreadEn
     dataSource.manager.findOneByOrFail(StudioEntity, { id: spread.studioId }),
     loadNamedPrints(dataSource, spread.studioId, [readDocument(spread)]),
   ]);
-  return { album, studio, prints, usedElsewhere: await countElsewhere(dataSource, spread, prints) };
+  return { album, studio, prints, usedElsewhere: await countElsewhere(dataSource, spread) };
 }
 
 /** Every print of the studio that one of the documents names, oldest first. */
@@ -33,17 +33,16 @@ export async function loadNamedPrints(dataSource: DataSource, studioId: string, 
   return dataSource.manager.find(PrintEntity, { where: { studioId, id: In([...ids]) }, order: { createdAt: 'ASC', id: 'ASC' } });
 }
 
-/** Spreads in the bin use nothing. */
-async function countElsewhere(dataSource: DataSource, spread: SpreadEntity, prints: readonly PrintEntity[]): Promise<Record<string, number>> {
-  if (prints.length === 0) return {};
+/** Spreads in the bin use nothing, nor do those of an album in the bin. */
+async function countElsewhere(dataSource: DataSource, spread: SpreadEntity): Promise<Record<string, number>> {
   const rows = await dataSource.manager
     .createQueryBuilder(SpreadPrintEntity, 'use')
     .innerJoin('use.spread', 'spread')
+    .innerJoin('spread.album', 'album')
     .select('use.printId', 'printId')
     .addSelect('SUM(use.copies)', 'copies')
-    .where('use.printId IN (:...ids)', { ids: prints.map(({ id }) => id) })
-    .andWhere('use.spreadId <> :spreadId', { spreadId: spread.id })
-    .andWhere('spread.binnedAt IS NULL')
+    .where('spread.studioId = :studioId AND spread.id <> :spreadId', { studioId: spread.studioId, spreadId: spread.id })
+    .andWhere('spread.binnedAt IS NULL AND album.binnedAt IS NULL')
     .groupBy('use.printId')
     .having('SUM(use.copies) > 0')
     .getRawMany<{ printId: string; copies: string }>();

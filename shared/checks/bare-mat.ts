@@ -1,12 +1,14 @@
 import { contentRect } from '../geometry/grid';
+import { neededOf, paperOf } from '../geometry/keep-zone';
 import { turnedSize } from '../geometry/paper';
 import { area } from '../geometry/rects';
-import { mustStayWhole } from '../geometry/smallest-mat';
-import type { PrintId } from '../model/ids';
+import { canHold } from '../geometry/window';
+import { mustStayWhole } from '../model/must-stay-whole';
 import type { Print } from '../model/print';
+import { copiesUsed } from '../model/print-use';
 import type { Size } from '../model/rect';
+import type { TrimSettings } from '../model/spread';
 import { defineCheck, type Finding, type SpreadView } from './check';
-import { keepZoneOf, paperOf, withSpare } from './keep-zones';
 
 /** A mat that carries nothing, once the pages are filled otherwise. Says how many prints of the table fit it. */
 export const bareMat = defineCheck({
@@ -20,7 +22,7 @@ export const bareMat = defineCheck({
     return view.doc.mats.flatMap((mat): Finding[] => {
       if (mat.content.kind !== 'bare') return [];
       const photo = contentRect(view.doc.format, view.doc.reveal, mat);
-      const fitting = ready.filter((print) => fits(print, photo, view.trim.tolerance));
+      const fitting = ready.filter((print) => fits(print, photo, view.trim));
       return [
         {
           messageId: 'bare-mat',
@@ -39,12 +41,8 @@ export const bareMat = defineCheck({
 });
 
 /** Prints of the table of which a copy is left, in the table's order. */
-function readyPrints({ doc, prints, usedElsewhere }: SpreadView): Print[] {
-  const used = new Map<PrintId, number>();
-  const placements = [...doc.mats.map((mat) => mat.content), ...doc.panes.map((group) => group.content)];
-  for (const placement of placements) {
-    if (placement && 'printId' in placement) used.set(placement.printId, (used.get(placement.printId) ?? 0) + 1);
-  }
+function readyPrints({ doc, prints, trim, usedElsewhere }: SpreadView): Print[] {
+  const used = copiesUsed(doc, trim.tolerance);
   return doc.table.flatMap((id) => {
     const print = prints.get(id);
     return print && (used.get(id) ?? 0) + (usedElsewhere[id] ?? 0) < print.copies ? [print] : [];
@@ -52,17 +50,15 @@ function readyPrints({ doc, prints, usedElsewhere }: SpreadView): Print[] {
 }
 
 /** True where the print's keep zone, or all of a print that must not be cut, fits the photo's place; turned only if it has no up. */
-function fits(print: Print, photo: Size, tolerance: number): boolean {
+function fits(print: Print, photo: Size, trim: TrimSettings): boolean {
   if (print.marks.digital) return true;
-  const paper = paperOf(print, { scaledWidth: null });
-  const keep = keepZoneOf(print, { scaledWidth: null });
-  const least = mustStayWhole(print) ? paper : keep && withSpare(keep, paper, tolerance);
+  const paper = paperOf(print, AT_OWN_SIZE);
+  const needed = mustStayWhole(print) ? paper : neededOf(print, AT_OWN_SIZE, trim.tolerance);
   const turns = print.marks.noUp ? ([0, 1] as const) : ([0] as const);
-  return turns.some((turn) => {
-    const needed = turnedSize(least ?? { width: 1, height: 1 }, turn);
-    return needed.width <= photo.width && needed.height <= photo.height;
-  });
+  return turns.some((turn) => !needed || canHold(needed, turnedSize(photo, turn), paper, trim.finestMark));
 }
+
+const AT_OWN_SIZE = { scaledWidth: null, detailId: null };
 
 /** The print of which the least is lost first: nearest in size to the photo; ties keep the table's order. */
 function bestFirst(prints: readonly Print[], photo: Size): Print[] {

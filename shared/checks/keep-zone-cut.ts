@@ -1,16 +1,16 @@
+import { holdsZone, isUncut, onPiece, paperOf, withSpare, zoneOf } from '../geometry/keep-zone';
 import { turnedSize } from '../geometry/paper';
 import { bottom, right } from '../geometry/rects';
 import type { Rect, Size } from '../model/rect';
 import { defineCheck, type Finding, type Message, type SpreadView } from './check';
-import { holdsSubject, isUncut, keepZoneOf, onPiece, paperOf, withSpare } from './keep-zones';
 import { keepZoneRemedies } from './keep-zone-remedies';
 import type { Edge } from './messages';
 import { piecesOf, type Piece } from './pieces';
 
 /**
- * A trimmed print whose window does not hold its keep zone with the cutting tolerance to spare. The paper's
- * own edge is not cut and needs nothing to spare. A window that holds a detail instead is a small piece of
- * its own and is left alone. For a split print the window is the one over all panes; what the seams take
+ * A trimmed print whose window does not hold its keep zone with the cutting tolerance to spare; for a small piece
+ * that was placed for one of the print's details, that detail. The paper's own edge is not cut and needs nothing to
+ * spare. For a split print the window is the one over all panes; what the seams take
  * belongs to `seam-through-keep-zone`.
  */
 export const keepZoneCut = defineCheck({
@@ -23,7 +23,7 @@ export const keepZoneCut = defineCheck({
   find: (view) =>
     piecesOf(view).flatMap((piece): Finding[] => {
       const paper = paperOf(piece.print, piece.placement);
-      if (isUncut(piece, paper) || holdsSubject(piece.window, piece.print, piece.placement, view.trim.tolerance)) return [];
+      if (isUncut(piece.window, paper) || holdsZone(piece.window, piece.print, piece.placement, view.trim.tolerance)) return [];
       return [{ ...explain(view, piece, paper), matIds: piece.matIds, remedies: () => keepZoneRemedies(view, piece) }];
     }),
 });
@@ -31,7 +31,7 @@ export const keepZoneCut = defineCheck({
 /** What to say: that the zone does not fit at all, how much of it is lost, or how little is left to spare. */
 function explain(view: SpreadView, piece: Piece, paper: Rect): Message {
   const { title } = piece.print;
-  const keep = keepZoneOf(piece.print, piece.placement)!;
+  const keep = zoneOf(piece.print, piece.placement)!;
   const photo = turnedSize(piece.window, piece.placement.turn);
   const zone = onPiece(keep, piece.window, piece.placement.turn);
   const wider = zone.width - photo.width;

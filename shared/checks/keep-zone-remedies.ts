@@ -1,11 +1,11 @@
 import { innerMatRect, matRect, revealOf } from '../geometry/grid';
+import { neededOf, paperOf } from '../geometry/keep-zone';
 import { turnedSize } from '../geometry/paper';
 import type { Length } from '../model/length';
 import type { Rect, Size } from '../model/rect';
 import type { Mat } from '../model/spread';
 import { MIN_REVEAL } from '../model/trim-settings';
 import type { Remedy, SpreadView } from './check';
-import { keepZoneOf, paperOf, withSpare } from './keep-zones';
 import { growMat } from './resize-mat';
 import { motifsOf } from './motifs';
 import type { Piece } from './pieces';
@@ -16,10 +16,8 @@ import type { Piece } from './pieces';
  * turn out not to help; `safeRemedy` tries them.
  */
 export function keepZoneRemedies(view: SpreadView, piece: Piece): readonly Remedy[] {
-  const keep = keepZoneOf(piece.print, piece.placement);
-  if (!keep) return [];
-  const paper = paperOf(piece.print, piece.placement);
-  const needed = withSpare(keep, paper, view.trim.tolerance);
+  const needed = neededOf(piece.print, piece.placement, view.trim.tolerance);
+  if (!needed) return [];
   return [...slide(piece, needed, view.trim.finestMark), ...mountWhole(view, piece), ...largerMat(view, piece, needed), ...lessReveal(view, piece, needed)];
 }
 

@@ -1,7 +1,6 @@
-import type { PrintId } from '../model/ids';
+import { copiesNeeded } from '../geometry/copies';
+import { printUses, type PrintUse } from '../model/print-use';
 import { defineCheck, type Finding } from './check';
-import { copiesNeeded, type CopyUse } from './copies';
-import { piecesOf, type Piece } from './pieces';
 
 /**
  * More placements of a print than copies of it, the studio's other live spreads included. How placements
@@ -13,43 +12,35 @@ export const morePlacementsThanCopies = defineCheck({
   basis: { kind: 'common-practice' },
   needsFilledPages: false,
   thresholds: {},
-  find: (view) => {
-    const byPrint = new Map<PrintId, Piece[]>();
-    for (const piece of piecesOf(view)) {
-      const others = byPrint.get(piece.print.id);
-      if (others) others.push(piece);
-      else byPrint.set(piece.print.id, [piece]);
-    }
-    return [...byPrint.values()].flatMap((pieces): Finding[] => {
-      const { print } = pieces[0]!;
-      const elsewhere = view.usedElsewhere[print.id] ?? 0;
+  find: (view) =>
+    [...printUses(view.doc)].flatMap(([id, uses]): Finding[] => {
+      const print = view.prints.get(id);
+      const elsewhere = view.usedElsewhere[id] ?? 0;
       // Never fewer copies are needed than 1, nor more than there are placements.
-      if (print.marks.digital || pieces.length + elsewhere <= print.copies) return [];
-      const needed = copiesNeeded(pieces.map(useOf), view.trim.tolerance);
+      if (!print || print.marks.digital || uses.length === 0 || uses.length + elsewhere <= print.copies) return [];
+      const needed = copiesFor(uses, view.trim.tolerance);
       if (needed + elsewhere <= print.copies) return [];
       return [
         {
           messageId: 'more-placements',
           data: { title: print.title, needed: needed + elsewhere, copies: print.copies, elsewhere },
           // The last one placed is the one too many.
-          matIds: [...pieces].reverse().flatMap((piece) => piece.matIds),
+          matIds: [...uses].reverse().flatMap(({ matIds }) => matIds),
           remedies: () => {
-            const surplus = surplusOf(pieces, print.copies - elsewhere, view.trim.tolerance).flatMap((piece) => piece.matIds);
+            const surplus = surplusOf(uses, print.copies - elsewhere, view.trim.tolerance).flatMap(({ matIds }) => matIds);
             return [{ messageId: 'back-to-table', data: {}, call: { id: 'prints.lift', args: { matIds: surplus } } }];
           },
         },
       ];
-    });
-  },
+    }),
 });
 
-const useOf = (piece: Piece): CopyUse =>
-  piece.groupId !== null || piece.placement.mode === 'whole' ? { kind: 'all' } : { kind: 'piece', window: piece.window };
+const copiesFor = (uses: readonly PrintUse[], tolerance: number): number => copiesNeeded(uses.map(({ asked }) => asked), tolerance);
 
-/** The last pieces without which the copies suffice. */
-function surplusOf(pieces: readonly Piece[], copies: number, tolerance: number): readonly Piece[] {
-  for (let kept = pieces.length - 1; kept > 0; kept -= 1) {
-    if (copiesNeeded(pieces.slice(0, kept).map(useOf), tolerance) <= copies) return pieces.slice(kept);
+/** The last uses without which the copies suffice. */
+function surplusOf(uses: readonly PrintUse[], copies: number, tolerance: number): readonly PrintUse[] {
+  for (let kept = uses.length - 1; kept > 0; kept -= 1) {
+    if (copiesFor(uses.slice(0, kept), tolerance) <= copies) return uses.slice(kept);
   }
-  return pieces;
+  return uses;
 }

@@ -2,7 +2,7 @@ import { contains } from '../geometry/rects';
 import { turnedSize } from '../geometry/paper';
 import { defineCheck, type Finding } from './check';
 import { mountWhole } from './keep-zone-remedies';
-import { paperOf } from './keep-zones';
+import { paperOf } from '../geometry/keep-zone';
 import { offPaper } from './off-paper';
 import { piecesOf } from './pieces';
 import { shrinkMat } from './resize-mat';

@@ -1,8 +1,8 @@
+import { neededOf, paperOf } from '../geometry/keep-zone';
 import { contains } from '../geometry/rects';
 import type { Rect } from '../model/rect';
 import { defineCheck, type Finding, type Remedy, type SpreadView } from './check';
 import { slideBy } from './keep-zone-remedies';
-import { keepZoneOf, paperOf, withSpare } from './keep-zones';
 import { piecesOf, type Piece } from './pieces';
 import { otherRun } from './window-off-paper';
 
@@ -21,9 +21,8 @@ export const seamThroughKeepZone = defineCheck({
   find: (view) =>
     piecesOf(view).flatMap((piece): Finding[] => {
       if (piece.groupId === null) return [];
-      const keep = keepZoneOf(piece.print, piece.placement);
-      if (!keep) return [];
-      const needed = withSpare(keep, paperOf(piece.print, piece.placement), view.trim.tolerance);
+      const needed = neededOf(piece.print, piece.placement, view.trim.tolerance);
+      if (!needed) return [];
       const isHeld = piece.photos.some((photo) => contains(photo.window, needed));
       if (isHeld || !contains(piece.window, needed)) return [];
       const isBehind = view.doc.panes.some((group) => group.id === piece.groupId && group.content?.run === 'behind');

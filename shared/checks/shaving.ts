@@ -1,9 +1,9 @@
+import { holdsZone, paperOf } from '../geometry/keep-zone';
 import { bottom, right } from '../geometry/rects';
-import { slideWindow } from '../geometry/window';
+import { SHAVING, slideWindow } from '../geometry/window';
 import { inches } from '../model/length';
 import type { Rect, Size } from '../model/rect';
 import { defineCheck, type Finding } from './check';
-import { holdsSubject, paperOf } from './keep-zones';
 import type { Edge } from './messages';
 import { piecesOf } from './pieces';
 
@@ -17,7 +17,7 @@ export const shaving = defineCheck({
   basis: { kind: 'common-practice' },
   needsFilledPages: false,
   yieldsTo: ['never-cut', 'keep-zone-cut', 'window-off-paper', 'print-smaller-than-photo', 'seam-through-keep-zone'],
-  thresholds: { width: { default: inches(1 / 4), min: inches(1 / 16), max: inches(1), unit: 'length' } },
+  thresholds: { width: { default: SHAVING, min: inches(1 / 16), max: inches(1), unit: 'length' } },
   find: (view, { width }) =>
     piecesOf(view).flatMap((piece): Finding[] => {
       const { placement, print, window } = piece;
@@ -27,7 +27,7 @@ export const shaving = defineCheck({
         if (strip <= 0 || strip >= width || strip + opposite < width) return false;
         const at = slideWindow(flush.x, flush.y, window, paper, view.trim.finestMark);
         const isReachable = at.x === flush.x && at.y === flush.y;
-        return isReachable && holdsSubject({ ...window, ...flush }, print, placement, view.trim.tolerance);
+        return isReachable && holdsZone({ ...window, ...flush }, print, placement, view.trim.tolerance);
       });
       if (!thin) return [];
       const args = { matId: piece.matIds[0]!, ...thin.flush };

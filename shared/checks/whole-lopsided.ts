@@ -2,7 +2,7 @@ import { turnedSize } from '../geometry/paper';
 import { inches } from '../model/length';
 import { defineCheck, type Finding } from './check';
 import { cardOf } from './keep-zone-remedies';
-import { paperOf } from './keep-zones';
+import { paperOf } from '../geometry/keep-zone';
 import { piecesOf } from './pieces';
 
 /** A whole print whose card shows much more beside it than above it, or the other way round. */

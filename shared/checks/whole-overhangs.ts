@@ -1,7 +1,7 @@
 import { turnedSize } from '../geometry/paper';
 import { defineCheck, type Finding, type Remedy } from './check';
 import { cardOf } from './keep-zone-remedies';
-import { paperOf } from './keep-zones';
+import { paperOf } from '../geometry/keep-zone';
 import { growMat } from './resize-mat';
 import { piecesOf } from './pieces';
 import { lift } from './window-off-paper';

@@ -2,7 +2,7 @@ import { gridOf } from '../geometry/grid';
 import { contains } from '../geometry/rects';
 import { slideWindow } from '../geometry/window';
 import { defineCheck, type Finding, type Remedy, type SpreadView } from './check';
-import { paperOf } from './keep-zones';
+import { paperOf } from '../geometry/keep-zone';
 import { offPaper } from './off-paper';
 import { piecesOf, type Piece } from './pieces';
 

@@ -1,4 +1,4 @@
-import type { Hex, MatId, PaneGroupId, PrintId, Side, Turns } from '../model/ids';
+import type { DetailId, Hex, MatId, PaneGroupId, PrintId, Side, Turns } from '../model/ids';
 import type { Content, Mat, Scheme } from '../model/spread';
 
 /** A sketch's mats, without ids: what `pages.useSketch` lays out. */
@@ -14,8 +14,8 @@ export interface SketchMat {
 
 /** Every editor command with its arguments: what a button, a key, a gesture or a note's remedy asks for. */
 export interface CommandArgs {
-  /** Puts a print on a mat, its window centred on the keep zone; what lay there goes back to the table. */
-  'prints.place': { printId: PrintId; matId: MatId };
+  /** Puts a print on a mat, its window centred on the keep zone or on one of its details; what lay there goes back to the table. */
+  'prints.place': { printId: PrintId; matId: MatId; detailId?: DetailId };
   /** Moves what one mat carries to another; the two swap. */
   'prints.move': { fromMatId: MatId; toMatId: MatId };
   /** Takes the print off a mat, back to the table. */

@@ -17,6 +17,7 @@ export const REASONS = [
   'no-such-mat',
   'no-such-page',
   'no-such-print',
+  'no-such-detail',
   'no-such-group',
   'off-page',
   'onto-another-mat',

@@ -69,6 +69,3 @@ export function mirrored<T extends Cells>(cells: T, box: Cells, axis: 'horizonta
     ? { ...cells, x: 2 * box.x + box.w - cells.x - cells.w }
     : { ...cells, y: 2 * box.y + box.h - cells.y - cells.h };
 }
-
-/** `value` kept between two limits; the lower one wins where they cross. */
-export const clamp = (value: number, least: number, most: number): number => Math.max(least, Math.min(value, most));

@@ -1,12 +1,14 @@
+import { clamp } from '../geometry/clamp';
 import { contentRect, innerMatRect, matRect } from '../geometry/grid';
 import { paneWindow } from '../geometry/panes';
-import { toPaper, turnedSize } from '../geometry/paper';
-import { contains, intersection, inset } from '../geometry/rects';
-import { mustStayWhole } from '../geometry/smallest-mat';
+import { holdsZone, neededOf, paperOf, zoneOf } from '../geometry/keep-zone';
+import { turnedSize } from '../geometry/paper';
+import { intersection } from '../geometry/rects';
 import { centreWindow, placedPaper, slideWindow, spareShavings, windowOnPaper } from '../geometry/window';
-import type { Turns } from '../model/ids';
+import type { DetailId, Turns } from '../model/ids';
+import { mustStayWhole } from '../model/must-stay-whole';
 import type { Print } from '../model/print';
-import type { Rect, Size } from '../model/rect';
+import type { Size } from '../model/rect';
 import type { Mat, PaneGroup, Placement, SpreadDocument, TrimSettings } from '../model/spread';
 
 /** The place that waits for a print. */
@@ -47,32 +49,29 @@ function containWidth(print: Print, window: Size): number {
   return Math.max(1, Math.min(window.width, Math.floor((window.height * print.paperWidth) / print.paperHeight)));
 }
 
-/** Keep zone on the paper as it is placed, in Lengths; null where the print has none. */
-function keepZoneOn(print: Print, paper: Size): Rect | null {
-  return print.keepZone && toPaper({ ...print, paperWidth: paper.width, paperHeight: paper.height }, print.keepZone);
-}
+/** How a print is wanted on its mat: which way round, and for which of its details (null for its keep zone). */
+type Wish = Pick<Placement, 'turn' | 'detailId'>;
 
-/** The print trimmed to the photo, its window centred on the keep zone and leaving no shavings, for one turn. */
-function fitWindow(print: Print, photo: Size, turn: Turns, trim: TrimSettings): Placement {
+/** The print trimmed to the photo, its window centred on the zone that it is for and leaving no shavings. */
+function fitWindow(print: Print, photo: Size, { turn, detailId }: Wish, trim: TrimSettings): Placement {
   const window = turnedSize(photo, turn);
   const scaledWidth = print.marks.digital ? coverWidth(print, window) : null;
-  const paper = placedPaper(print, { scaledWidth });
-  const keep = keepZoneOn(print, paper);
-  const centred = centreWindow(window, paper, trim.finestMark, keep);
-  const spared = keep && intersection(inset(keep, -trim.tolerance), { x: 0, y: 0, ...paper });
-  const at = print.marks.digital ? centred : spareShavings(centred, window, paper, spared, trim.finestMark);
-  return { printId: print.id, mode: 'window', ...at, turn, scaledWidth };
+  const placed = { scaledWidth, detailId };
+  const paper = placedPaper(print, placed);
+  const centred = centreWindow(window, paper, trim.finestMark, zoneOf(print, placed));
+  const at = print.marks.digital ? centred : spareShavings(centred, window, paper, neededOf(print, placed, trim.tolerance), trim.finestMark);
+  return { printId: print.id, mode: 'window', ...at, turn, scaledWidth, detailId };
 }
 
-export function fitWhole(print: Print, frame: Frame, turn: Turns, trim: TrimSettings): Placement {
-  const trimmed = fitWindow(print, frame.photo, turn, trim);
-  const scaledWidth = print.marks.digital ? containWidth(print, turnedSize(frame.photo, turn)) : null;
+export function fitWhole(print: Print, frame: Frame, wish: Wish, trim: TrimSettings): Placement {
+  const trimmed = fitWindow(print, frame.photo, wish, trim);
+  const scaledWidth = print.marks.digital ? containWidth(print, turnedSize(frame.photo, wish.turn)) : null;
   return { ...trimmed, mode: 'whole', scaledWidth };
 }
 
 /** How a print is mounted by default, for one turn: uncut where a cut would spoil it or there is nothing to cut. */
-function fitTurned(print: Print, frame: Frame, turn: Turns, trim: TrimSettings): Placement {
-  return staysWhole(print, frame, turn) ? fitWhole(print, frame, turn, trim) : fitWindow(print, frame.photo, turn, trim);
+function fitTurned(print: Print, frame: Frame, wish: Wish, trim: TrimSettings): Placement {
+  return staysWhole(print, frame, wish.turn) ? fitWhole(print, frame, wish, trim) : fitWindow(print, frame.photo, wish, trim);
 }
 
 function staysWhole(print: Print, frame: Frame, turn: Turns): boolean {
@@ -84,25 +83,24 @@ function staysWhole(print: Print, frame: Frame, turn: Turns): boolean {
  * How a print is mounted when it is dropped: window centred on the keep zone, on the trimmer's finest
  * mark and on the paper; whole where a cut would spoil it or where it is smaller than the photo; a digital
  * photo scaled to cover. A print with no up is quarter-turned where it suits the place better so.
+ *
+ * @param detailId - the detail that it is cut out for, which then counts in the keep zone's stead.
  */
-export function fitPrint(print: Print, frame: Frame, trim: TrimSettings): Placement {
-  const upright = fitTurned(print, frame, 0, trim);
+export function fitPrint(print: Print, frame: Frame, trim: TrimSettings, detailId: DetailId | null): Placement {
+  const upright = fitTurned(print, frame, { turn: 0, detailId }, trim);
   if (!print.marks.noUp) return upright;
-  const turned = fitTurned(print, frame, 1, trim);
+  const turned = fitTurned(print, frame, { turn: 1, detailId }, trim);
   return isBetter(suits(print, frame, turned, trim), suits(print, frame, upright, trim)) ? turned : upright;
 }
 
 /** What speaks for a placement, the weightiest first: spared from a cut, keep zone held, paper shown, same orientation. */
 function suits(print: Print, frame: Frame, placement: Placement, trim: TrimSettings): readonly number[] {
-  const paper = placedPaper(print, placement);
-  const onPaper = { x: 0, y: 0, ...paper };
-  const window = placement.mode === 'whole' ? onPaper : windowOnPaper(placement, frame.photo);
-  const shown = intersection(window, onPaper) ?? { width: 0, height: 0 };
-  const keep = keepZoneOn(print, paper);
-  const spared = keep && intersection(inset(keep, -trim.tolerance), onPaper);
+  const paper = paperOf(print, placement);
+  const window = placement.mode === 'whole' ? paper : windowOnPaper(placement, frame.photo);
+  const shown = intersection(window, paper) ?? { width: 0, height: 0 };
   return [
     Number(mustStayWhole(print) && placement.mode === 'whole'),
-    Number(!spared || contains(window, spared)),
+    Number(holdsZone(window, print, placement, trim.tolerance)),
     // A digital photo is scaled to cover, so what it shows is a share of its picture.
     (shown.width * shown.height) / (print.marks.digital ? paper.width * paper.height : 1),
     Number(isUpright(turnedSize(paper, placement.turn)) === isUpright(frame.photo)),
@@ -125,9 +123,9 @@ function isBetter(a: readonly number[], b: readonly number[]): boolean {
 export function refitPlacement(placement: Placement, print: Print, photo: Size, frame: Frame, trim: TrimSettings): Placement {
   const { turn } = placement;
   if (placement.mode === 'whole') {
-    return fitsWhole(print, frame, turn) ? { ...fitWhole(print, frame, turn, trim), x: placement.x, y: placement.y } : fitWindow(print, frame.photo, turn, trim);
+    return fitsWhole(print, frame, turn) ? { ...fitWhole(print, frame, placement, trim), x: placement.x, y: placement.y } : fitWindow(print, frame.photo, placement, trim);
   }
-  const fresh = fitTurned(print, frame, turn, trim);
+  const fresh = fitTurned(print, frame, placement, trim);
   if (fresh.mode === 'whole' || isCentred(placement, print, photo, trim)) return fresh;
   return keepCentre(placement, print, photo, { ...fresh, scaledWidth: keptScale(placement, print, photo, fresh) }, frame.photo, trim);
 }
@@ -140,7 +138,7 @@ function keptScale(placement: Placement, print: Print, photo: Size, fresh: Place
 }
 
 function isCentred(placement: Placement, print: Print, photo: Size, trim: TrimSettings): boolean {
-  const fresh = fitWindow(print, photo, placement.turn, trim);
+  const fresh = fitWindow(print, photo, placement, trim);
   return fresh.x === placement.x && fresh.y === placement.y && fresh.scaledWidth === placement.scaledWidth;
 }
 
@@ -165,8 +163,8 @@ function keepCentre(placement: Placement, print: Print, photo: Size, next: Place
  * the person had slid keeps its centre, and a print which they had left whole stays whole where it fits.
  */
 export function carryPrint(placement: Placement, print: Print, photo: Size, frame: Frame, trim: TrimSettings): Placement {
-  const fresh = fitPrint(print, frame, trim);
-  if (placement.mode === 'whole') return fitsWhole(print, frame, fresh.turn) ? fitWhole(print, frame, fresh.turn, trim) : fresh;
+  const fresh = fitPrint(print, frame, trim, placement.detailId);
+  if (placement.mode === 'whole') return fitsWhole(print, frame, fresh.turn) ? fitWhole(print, frame, fresh, trim) : fresh;
   if (fresh.mode === 'whole' || isCentred(placement, print, photo, trim)) return fresh;
   return keepCentre(placement, print, photo, fresh, frame.photo, trim);
 }
@@ -184,13 +182,13 @@ const MAX_PAPER = 1_600_000;
 export function scalePlacement(placement: Placement, print: Print, frame: Frame, width: number, trim: TrimSettings): Placement {
   const least = coverWidth(print, turnedSize(frame.photo, placement.turn));
   const most = Math.floor(Math.min(MAX_PAPER, (MAX_PAPER * print.paperWidth) / print.paperHeight));
-  const scaledWidth = Math.max(least, Math.min(Math.round(width), most));
+  const scaledWidth = clamp(Math.round(width), least, most);
   return keepCentre(placement, print, frame.photo, { ...placement, mode: 'window', scaledWidth }, frame.photo, trim);
 }
 
 /** The piece turned on the page to `turn`, its centre kept. */
 export function turnPlacement(placement: Placement, print: Print, frame: Frame, turn: Turns, trim: TrimSettings): Placement {
-  const fresh = fitTurned(print, frame, turn, trim);
+  const fresh = fitTurned(print, frame, { turn, detailId: placement.detailId }, trim);
   if (fresh.mode === 'whole' || placement.mode === 'whole') return fresh;
   return keepCentre(placement, print, frame.photo, fresh, frame.photo, trim);
 }

@@ -1,8 +1,9 @@
+import { clamp } from '../geometry/clamp';
 import { cellRect, gridOf } from '../geometry/grid';
 import { SIDES, type MatId, type Side } from '../model/ids';
 import type { Mat, SpreadDocument } from '../model/spread';
 import { refuse, type CommandRun } from './command';
-import { cellBox, changeMats, clamp, groupOf, matOf, matsOf, mirrored } from './edit-mats';
+import { cellBox, changeMats, groupOf, matOf, matsOf, mirrored } from './edit-mats';
 import { frameOfMat } from './fit-print';
 import { carryPicture, pictureAt, placeAt } from './pictures';
 

@@ -1,4 +1,4 @@
-import type { MatId, PaneGroupId } from '../model/ids';
+import type { DetailId, MatId, PaneGroupId } from '../model/ids';
 import type { Print } from '../model/print';
 import type { Size } from '../model/rect';
 import type { Mat, PaneGroup, Placement, SpreadDocument } from '../model/spread';
@@ -55,9 +55,9 @@ export function putPicture(doc: SpreadDocument, place: Place, placement: Placeme
   }));
 }
 
-/** Puts a print there as if it had just been dropped. */
-export const dropPrint = (doc: SpreadDocument, place: Place, print: Print, context: CommandContext): SpreadDocument =>
-  putPicture(doc, place, fitPrint(print, frameAt(doc, place), context.trim));
+/** Puts a print there as if it had just been dropped, or one of its details. */
+export const dropPrint = (doc: SpreadDocument, place: Place, print: Print, context: CommandContext, detailId: DetailId | null = null): SpreadDocument =>
+  putPicture(doc, place, fitPrint(print, frameAt(doc, place), context.trim, detailId));
 
 /**
  * Puts there what lay in another frame. A print that the context does not know cannot be measured and is

@@ -29,7 +29,7 @@ export const setWhole: CommandRun<'placement.setWhole'> = (doc, { matId, whole }
     if (!frame.card) return refuse('whole-panes');
     if ((placement.mode === 'whole') === whole) return placement;
     if (whole && !fitsWhole(print, frame, placement.turn)) return refuse('does-not-fit-whole');
-    if (whole) return { ...fitWhole(print, frame, placement.turn, context.trim), x: placement.x, y: placement.y };
+    if (whole) return { ...fitWhole(print, frame, placement, context.trim), x: placement.x, y: placement.y };
     // Without a card to lie on, the print is cut: the fit that a frame of panes would give it.
     return refitPlacement(placement, print, frame.photo, { ...frame, card: null }, context.trim);
   });

@@ -2,11 +2,13 @@ import { isRefusal, refuse, type CommandRun, type Outcome } from './command';
 import { carryPicture, dropPrint, frameAt, pictureAt, placeAt, placeId, putPicture } from './pictures';
 import { changeMats } from './edit-mats';
 
-export const placePrint: CommandRun<'prints.place'> = (doc, { printId, matId }, context) => {
+export const placePrint: CommandRun<'prints.place'> = (doc, { printId, matId, detailId = null }, context) => {
   const place = placeAt(doc, matId);
   if (!place) return refuse('no-such-mat');
   const print = context.prints.get(printId);
-  return print ? dropPrint(doc, place, print, context) : refuse('no-such-print');
+  if (!print) return refuse('no-such-print');
+  if (detailId !== null && !print.details.some(({ id }) => id === detailId)) return refuse('no-such-detail');
+  return dropPrint(doc, place, print, context, detailId);
 };
 
 /** Whatever the mats carry changes places; a split print's panes take or give a picture as one. */

@@ -86,7 +86,7 @@ function refitGroups(before: SpreadDocument, next: SpreadDocument, context: Comm
 type GroupContent = NonNullable<PaneGroup['content']>;
 
 const samePlacement = (a: GroupContent, b: GroupContent): boolean =>
-  a === b || (a.printId === b.printId && a.x === b.x && a.y === b.y && a.turn === b.turn && a.scaledWidth === b.scaledWidth);
+  a === b || (a.printId === b.printId && a.x === b.x && a.y === b.y && a.turn === b.turn && a.scaledWidth === b.scaledWidth && a.detailId === b.detailId);
 
 /** A mat that comes to a page with a focal of its own gives its mark up. */
 function settleFocals(before: SpreadDocument, next: SpreadDocument): SpreadDocument {

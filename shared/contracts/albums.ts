@@ -79,7 +79,7 @@ export const spreadDetailSchema = spreadSummarySchema.extend({
   trim: trimSettingsSchema,
   /** Every print that the document names. */
   prints: z.array(printSchema),
-  /** Copies of each of these prints that other live spreads of the studio use. */
+  /** Copies of each of the studio's prints that its other live spreads use; prints that none uses are left out. */
   usedElsewhere: z.record(z.string(), z.int()),
   may: z.object({ edit: z.boolean(), comment: z.boolean(), export: z.boolean() }),
 });

@@ -3,7 +3,7 @@ import type { Print } from '../model/print';
 import type { Rect } from '../model/rect';
 import type { Mat, Placement, SpreadDocument } from '../model/spread';
 import { contentRect } from './grid';
-import { turnedSize, turnInBox } from './paper';
+import { inverseTurn, turnedSize, turnInBox } from './paper';
 import { paneWindow } from './panes';
 import { placedPaper, windowOnPaper } from './window';
 
@@ -78,7 +78,7 @@ function paneParts(doc: SpreadDocument): Map<MatId, PanePart> {
     const { content } = group;
     mats.forEach((mat, i) => {
       // A part lies in the turned window; turning it back gives its place on the upright paper.
-      const back = turnInBox(windows[i]!, size, ((4 - content.turn) % 4) as 0 | 1 | 2 | 3);
+      const back = turnInBox(windows[i]!, size, inverseTurn(content.turn));
       parts.set(mat.id, {
         groupId: group.id,
         placement: content,

@@ -43,6 +43,18 @@ function slideAxis(at: number, window: number, paper: number, mark: number): num
   return Math.min(Math.max(snapTo(at, mark), 0), last);
 }
 
+/** True where some place of a window of that size, on the mark and on the paper, holds all of `needed`, a part of the paper. */
+export const canHold = (needed: Rect, window: Size, paper: Size, finestMark: number): boolean =>
+  canHoldAxis(needed.x, needed.width, window.width, paper.width, finestMark) && canHoldAxis(needed.y, needed.height, window.height, paper.height, finestMark);
+
+function canHoldAxis(start: number, length: number, window: number, paper: number, mark: number): boolean {
+  // A window as large as the paper is centred over all of it.
+  if (window >= paper) return true;
+  const last = Math.floor((paper - window) / mark) * mark;
+  const corner = Math.min(Math.floor(start / mark) * mark, last);
+  return corner + window >= start + length;
+}
+
 /** The window centred on a rectangle of the paper (a keep zone), or on the paper itself. */
 export function centreWindow(window: Size, paper: Size, finestMark: number, on?: Rect | null): { x: number; y: number } {
   const target = on ?? { x: 0, y: 0, width: paper.width, height: paper.height };

@@ -1,4 +1,4 @@
-import type { Hex, MatId, PaneGroupId, PrintId, Side, Turns } from './ids';
+import type { DetailId, Hex, MatId, PaneGroupId, PrintId, Side, Turns } from './ids';
 import type { Length } from './length';
 import type { Binding, PageFormat } from './page-format';
 
@@ -21,6 +21,8 @@ export interface Placement {
   readonly turn: Turns;
   /** Only a digital photo: the width at which its whole paper would be printed. Null for a print. */
   readonly scaledWidth: Length | null;
+  /** The detail of the print that this piece is for; null for the keep zone. A detail that is gone counts as null. */
+  readonly detailId: DetailId | null;
 }
 
 export type Pattern = 'stripe' | 'dot' | 'check' | 'plain';

@@ -116,7 +116,7 @@ export function buildMat(parts: Partial<Mat> = {}): Mat {
 /** A print's place on a mat: its window at the paper's top-left corner. */
 export function buildPlacement(print: Print | PrintId, parts: Partial<Placement> = {}): Placement {
   const printId = typeof print === 'string' ? print : print.id;
-  return { printId, mode: 'window', x: 0, y: 0, turn: 0, scaledWidth: null, ...parts };
+  return { printId, mode: 'window', x: 0, y: 0, turn: 0, scaledWidth: null, detailId: null, ...parts };
 }
 
 /** What a mat carries when it carries this print. */

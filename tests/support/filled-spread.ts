@@ -44,7 +44,7 @@ export function splitOver(filled: Filled, matNumbers: readonly number[], printNu
   const group: PaneGroup = {
     id: groupId,
     matIds: ids,
-    content: { printId: printIdOf(printNumber), mode: 'window', x: 0, y: 0, turn: 0, scaledWidth: null, run: 'behind' },
+    content: { printId: printIdOf(printNumber), mode: 'window', x: 0, y: 0, turn: 0, scaledWidth: null, detailId: null, run: 'behind' },
   };
   const mats = filled.doc.mats.map((mat): Mat => (ids.includes(mat.id) ? { ...mat, content: { kind: 'pane', groupId } } : mat));
   return { ...filled, doc: buildSpread({ ...filled.doc, mats, panes: [...filled.doc.panes, group] }) };

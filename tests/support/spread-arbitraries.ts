@@ -38,6 +38,7 @@ const placement = fc.record({
   y: fc.integer({ min: 0, max: 20_000 }),
   turn: fc.constant<0>(0),
   scaledWidth: fc.constant(null),
+  detailId: fc.constant(null),
 });
 
 const cell = fc.integer({ min: 0, max: 23 });

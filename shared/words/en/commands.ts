@@ -50,6 +50,7 @@ const SENTENCES: Readonly<Record<Reason, string>> = {
   'no-such-mat': 'That mat is no longer on the spread.',
   'no-such-page': 'This spread has no page on that side.',
   'no-such-print': 'That print is no longer in the studio: choose another.',
+  'no-such-detail': 'That print has no such detail any more: place the print itself, or mark the detail again.',
   'no-such-group': 'Those panes are no longer a group.',
   'off-page': 'That would leave the page: use a smaller mat, or another place.',
   'onto-another-mat': 'Another mat lies there: move it first, or mark this one as laid over.',

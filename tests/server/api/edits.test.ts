@@ -5,6 +5,7 @@ import { SpreadPrintEntity } from '#server/entities/spread-print-entity';
 import { SpreadSnapshotEntity } from '#server/entities/spread-snapshot-entity';
 import { documentAt } from '#server/services/history';
 import type { SpreadDetail } from '#shared/contracts/albums';
+import { inches } from '#shared/model/length';
 import { PatchBuilder } from '../../support/patches';
 import { beginSpread, insertPrint, withApp, type Person } from '../../support/app';
 import { buildMat, printContent } from '../../support/builders';
@@ -165,19 +166,22 @@ describe('saving edits', () => {
   it('counts the copies that a spread uses, and forgets them with it', async () => {
     await begin();
     const print = await insertPrint(app().deps, owner.studioId, { copies: 3 });
-    const mats = [0, 6].map((x) => buildMat({ id: randomUUID(), x, content: printContent(print) }));
+    // Two windows that overlap need a copy each; a third beside them comes out of the same paper.
+    const mats = [0, 0, inches(3)].map((x, i) => buildMat({ id: randomUUID(), x: 6 * i, content: printContent(print, { x }) }));
     await post({ baseRevision: 0, edits: [...mats.map((mat) => edits.add(mat)), edits.table([print.id])] }).expect(200);
     const use = () => app().deps.dataSource.manager.findBy(SpreadPrintEntity, { spreadId: spread.id });
     expect(await use()).toMatchObject([{ printId: print.id, copies: 2 }]);
 
     const other = await beginSpread(owner);
     const elsewhere = async () => ((await owner.agent.get(`/api/spreads/${other.id}`)).body as SpreadDetail).usedElsewhere;
-    await owner.agent.post(`/api/spreads/${other.id}/edits`).send({ baseRevision: 0, edits: [new PatchBuilder().table([print.id])] }).expect(200);
+    // Also before the print is chosen for this spread.
     expect(await elsewhere()).toEqual({ [print.id]: 2 });
     await owner.agent.patch(`/api/spreads/${spread.id}`).send({ binned: true }).expect(200);
     expect(await elsewhere()).toEqual({});
     await owner.agent.patch(`/api/spreads/${spread.id}`).send({ binned: false }).expect(200);
     expect(await elsewhere()).toEqual({ [print.id]: 2 });
+    await owner.agent.patch(`/api/albums/${spread.albumId}`).send({ binned: true }).expect(200);
+    expect(await elsewhere()).toEqual({});
   });
 
   it('keeps a snapshot every fifty edits, from which any revision can be read again', async () => {

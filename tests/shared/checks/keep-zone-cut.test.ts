@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { keepZoneCut } from '#shared/checks/keep-zone-cut';
 import { runChecks } from '#shared/checks/run-checks';
 import { inches } from '#shared/model/length';
-import type { Mat } from '#shared/model/spread';
+import type { Mat, Placement } from '#shared/model/spread';
 import type { Print } from '#shared/model/print';
 import { buildMat, buildPrint, buildSpread, buildView, printContent } from '../../support/builders';
 
@@ -14,7 +14,7 @@ const CUT = { w: 7, h: 5 };
 const printWithZone = (width: number, height = 100, parts: Parameters<typeof buildPrint>[0] = {}): Print =>
   buildPrint({ keepZone: { x: 100, y: 100, width, height }, ...parts });
 
-function viewOf(print: Print, window: { x: number; y: number; turn?: 0 | 1 | 2 | 3; mode?: 'whole' | 'window' }, mat: Partial<Mat> = {}, more: readonly Mat[] = []) {
+function viewOf(print: Print, window: Partial<Placement> & { x: number; y: number }, mat: Partial<Mat> = {}, more: readonly Mat[] = []) {
   const placed = buildMat({ ...CUT, ...mat, content: printContent(print, window) });
   return buildView({ doc: buildSpread({ mats: [placed, ...more] }), prints: [print] });
 }
@@ -66,11 +66,15 @@ describe('keep-zone-cut', () => {
     expect(findings(buildPrint(), { x: inches(2), y: inches(2) })).toEqual([]);
   });
 
-  it('lets a window show a detail instead, with the same to spare', () => {
+  it('holds a piece that was placed for a detail to that detail, with the same to spare', () => {
     const detail = { id: 'd', name: 'The bell', rect: { x: 420, y: 120, width: 100, height: 100 } };
     const print = printWithZone(200, 100, { details: [detail] });
-    expect(findings(print, { x: inches(2.875), y: inches(1) })).toEqual([]);
-    expect(findings(print, { x: inches(4.25), y: inches(1) })).toHaveLength(1);
+    const bell = { x: inches(2.875), y: inches(1), detailId: 'd' };
+    expect(findings(print, bell)).toEqual([]);
+    expect(findings(print, { ...bell, x: inches(4.25) })).toHaveLength(1);
+    // The same window without the detail cuts the keep zone, though the bell is whole.
+    expect(findings(print, { ...bell, detailId: null })).toHaveLength(1);
+    expect(findings({ ...print, details: [] }, bell)).toHaveLength(1);
   });
 
   it('ignores the part of a keep zone that is not on the paper', () => {

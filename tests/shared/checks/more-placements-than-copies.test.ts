@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { copiesNeeded, type CopyUse } from '#shared/checks/copies';
+import { copiesNeeded, type CopyUse } from '#shared/geometry/copies';
 import { morePlacementsThanCopies } from '#shared/checks/more-placements-than-copies';
 import { runChecks } from '#shared/checks/run-checks';
 import { canSeparate } from '#shared/geometry/separable';

@@ -25,6 +25,19 @@ describe('placing a print', () => {
     expect(matIn(doc, A).content).toEqual(printContent(print, at));
   });
 
+  it('centres on a detail where it is placed for one, and remembers which', () => {
+    const bell = { id: 'd1', name: 'The bell', rect: { x: 420, y: 220, width: 100, height: 100 } };
+    const print = buildPrint({ keepZone: { x: 50, y: 50, width: 100, height: 100 }, details: [bell] });
+    const commands = commandsWith([print]);
+    const call = { id: 'prints.place' as const, args: { printId: print.id, matId: A, detailId: 'd1' } };
+    const doc = commands.after(oneMat({ w: 4, h: 4 }), call);
+    // The bell's middle is 4.7 × 2.7 in, the photo 1 5/8 in square.
+    expect(matIn(doc, A).content).toEqual(printContent(print, { x: 62 * MARK, y: 30 * MARK, detailId: 'd1' }));
+    expect(commands.whyNot(doc, { ...call, args: { ...call.args, detailId: 'gone' } })).toBe('no-such-detail');
+    const moved = commands.after(buildSpread({ ...doc, mats: [...doc.mats, buildMat({ id: B, x: 8, w: 6, h: 6 })] }), { id: 'prints.move', args: { fromMatId: A, toMatId: B } });
+    expect(matIn(moved, B).content).toMatchObject({ printId: print.id, detailId: 'd1' });
+  });
+
   it('chooses the print for the spread', () => {
     const print = buildPrint();
     const doc = commandsWith([print]).after(oneMat(), placeCall(print.id, A));

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { centreWindow, placedPaper, slideWindow, spareShavings, windowOnPaper } from '#shared/geometry/window';
+import { canHold, centreWindow, placedPaper, slideWindow, spareShavings, windowOnPaper } from '#shared/geometry/window';
 import { inches } from '#shared/model/length';
 
 const paper = { width: inches(6), height: inches(4) };
@@ -29,6 +29,20 @@ describe('a window', () => {
   it('is centred where the paper is too small, so that what is missing shows on both sides', () => {
     const at = slideWindow(0, 0, { width: inches(7), height: inches(3) }, paper, mark);
     expect(at).toEqual({ x: -inches(1 / 2), y: 0 });
+  });
+
+  it('can hold a part of the paper just where one of its places on the mark does', () => {
+    const length = fc.integer({ min: 1, max: 9000 });
+    fc.assert(
+      fc.property(length, length, length, fc.nat(), fc.integer({ min: 1, max: 400 }), (paperSide, side, zoneSide, at, step) => {
+        const size = { width: paperSide, height: 100 };
+        const zone = { x: at % paperSide, y: 0, width: Math.min(zoneSide, paperSide - (at % paperSide)), height: 100 };
+        const holds = (x: number): boolean => x <= zone.x && x + side >= zone.x + zone.width;
+        const places = Array.from({ length: Math.ceil(paperSide / step) + 1 }, (_, i) => slideWindow(i * step, 0, { width: side, height: 100 }, size, step).x);
+        expect(canHold(zone, { width: side, height: 100 }, size, step)).toBe(places.some(holds));
+      }),
+      { numRuns: 300 },
+    );
   });
 
   it('centres on a keep zone, as far as the paper goes', () => {

@@ -46,7 +46,7 @@ describe('sliding a window', () => {
     page: 'left' as const,
     printId: 'p',
     groupId: null,
-    placement: { printId: 'p', mode: 'window' as const, x: inches(1), y: inches(1), turn, scaledWidth: null },
+    placement: { printId: 'p', mode: 'window' as const, x: inches(1), y: inches(1), turn, scaledWidth: null, detailId: null },
     rect: { x: 0, y: 0, width: inches(2), height: inches(2) },
     window: { x: inches(1), y: inches(1), width: inches(2), height: inches(2) },
   });

@@ -2,10 +2,10 @@ import { useDraggable, useDroppable } from '@dnd-kit/core';
 import { memo } from 'react';
 import { Link } from 'react-router-dom';
 import type { Pile } from '#shared/contracts/prints';
-import { smallestMat } from '#shared/geometry/smallest-mat';
-import { placedPhotos } from '#shared/geometry/placed-photos';
+import { smallestCuts } from '#shared/geometry/smallest-cut';
 import type { PrintId } from '#shared/model/ids';
 import type { Print } from '#shared/model/print';
+import { copiesUsed } from '#shared/model/print-use';
 import type { SpreadDocument } from '#shared/model/spread';
 import { formatLength, type Unit } from '#shared/words/measure';
 import { PrintPicture } from '@/components/print-picture';
@@ -15,16 +15,6 @@ import { useComposer } from '@/features/composer/hooks/composer-context';
 
 /** px per inch of the prints along the table's edge: one scale for all, so that they compare. */
 const PILE_SCALE = 17;
-
-/** Copies of each print that this spread shows; the panes of one group are one copy. */
-export function copiesUsed(doc: SpreadDocument, prints: ReadonlyMap<PrintId, Print>): Map<PrintId, number> {
-  const used = new Map<PrintId, Set<string>>();
-  for (const photo of placedPhotos(doc, (id) => prints.get(id))) {
-    const pieces = used.get(photo.printId) ?? new Set();
-    used.set(photo.printId, pieces.add(photo.groupId ?? photo.matId));
-  }
-  return new Map([...used].map(([id, pieces]) => [id, pieces.size]));
-}
 
 interface PileEdgeProps {
   piles: readonly Pile[];
@@ -40,9 +30,10 @@ export function PileEdge({ piles, heldPrintId, isEditable, sortHref, marked }: P
   const prints = useComposer((state) => state.prints);
   const unit = useComposer((state) => state.unit);
   const usedElsewhere = useComposer((state) => state.usedElsewhere);
+  const trim = useComposer((state) => state.trim);
   const dropData: DropData = { type: 'table' };
   const { setNodeRef, isOver } = useDroppable({ id: TABLE_DROP_ID, data: dropData, disabled: !isEditable });
-  const used = copiesUsed(doc, prints);
+  const used = copiesUsed(doc, trim.tolerance);
   const onTable = doc.table.flatMap((id) => prints.get(id) ?? []);
   const isReady = (print: Print): boolean =>
     print.id === heldPrintId || (used.get(print.id) ?? 0) + (usedElsewhere[print.id] ?? 0) < print.copies;
@@ -54,7 +45,7 @@ export function PileEdge({ piles, heldPrintId, isEditable, sortHref, marked }: P
     .filter((pile) => pile.all > 0);
   return (
     <div ref={setNodeRef} className={`pile-edge ${isOver ? 'is-over' : ''}`}>
-      {groups.length > 0 && <p className="pile-key">Each tag is a print’s smallest mat</p>}
+      {groups.length > 0 && <p className="pile-key">Each tag is a print’s smallest cut</p>}
       <div className="piles" tabIndex={0} role="region" aria-label="Prints on the table">
         {groups.map((pile) => (
           <section key={pile.id ?? 'loose'} className="pile" aria-label={`${pile.name}, ${pile.ready.length} of ${pile.all} ready`}>
@@ -97,7 +88,7 @@ const TablePrint = memo(function TablePrint({ print, doc, unit, isHeld, isEditab
   const data: DragData = { type: 'print', printId: print.id };
   const { setNodeRef, attributes, listeners } = useDraggable({ id: `print/${print.id}`, data, disabled: !isEditable });
   const trim = useComposer((state) => state.trim);
-  const mat = smallestMat(print, doc.format, doc.reveal, trim);
+  const cuts = smallestCuts(print, doc.format, doc.reveal, trim);
   const size = `${formatLength(print.paperWidth, unit)} × ${formatLength(print.paperHeight, unit)} ${unit}`;
   return (
     <>
@@ -119,7 +110,7 @@ const TablePrint = memo(function TablePrint({ print, doc, unit, isHeld, isEditab
         <span className="tag" data-tone="stop">Do not cut</span>
       ) : (
         <span className="tag">
-          {formatLength(mat.width, unit)} × {formatLength(mat.height, unit)}
+          {cuts.map(({ width, height }) => `${formatLength(width, unit)} × ${formatLength(height, unit)}`).join(' or ')}
         </span>
       )}
     </>

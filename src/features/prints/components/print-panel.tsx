@@ -1,5 +1,5 @@
 import { useState } from 'react';
-import { smallestMat } from '#shared/geometry/smallest-mat';
+import { smallestCuts } from '#shared/geometry/smallest-cut';
 import type { Print } from '#shared/model/print';
 import { Button, IconButton } from '@/components/button';
 import { CloseIcon, FixMark, StopMark, TurnIcon } from '@/components/icons';
@@ -96,8 +96,13 @@ export function PrintPanel({ print, groups, sizing, mayEdit, mayDelete, onClose 
       </ul>
       <div className="facts">
         <SizeChoice print={print} unit={sizing.unit} mayEdit={mayEdit} onSave={save} />
-        <Fact label="Smallest mat">
-          <Measure of={smallestMat(print, sizing.format, sizing.reveal, sizing.trim)} unit={sizing.unit} />
+        <Fact label="Smallest cut">
+          {smallestCuts(print, sizing.format, sizing.reveal, sizing.trim).map((cut, i) => (
+            <span key={`${cut.width}/${cut.height}`}>
+              {i > 0 && 'or '}
+              <Measure of={cut} unit={sizing.unit} />
+            </span>
+          ))}
         </Fact>
         <Fact label="Picture">
           <Button variant="bare" disabled={!mayEdit} onClick={() => save(turnPrint(print))}>

@@ -18,7 +18,7 @@ export function SortHead({ unit, isForSpread, children }: SortHeadProps) {
         <span className="scale-bar" data-unit={unit} aria-hidden="true" />
         {unit === 'in' ? '2 in' : '5 cm'} on this table
       </span>
-      <span className="text-12 text-ink-2 max-sm:hidden">Each tag is a print’s smallest mat{isForSpread && '; a tick means it for this spread'}</span>
+      <span className="text-12 text-ink-2 max-sm:hidden">Each tag is a print’s smallest cut{isForSpread && '; a tick means it for this spread'}</span>
     </div>
   );
 }

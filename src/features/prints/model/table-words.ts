@@ -1,11 +1,11 @@
-import { smallestMat } from '#shared/geometry/smallest-mat';
+import { smallestCuts } from '#shared/geometry/smallest-cut';
 import type { Length } from '#shared/model/length';
 import type { PageFormat } from '#shared/model/page-format';
 import type { Print } from '#shared/model/print';
 import type { TrimSettings } from '#shared/model/spread';
 import { formatLength, formatSize, type Unit } from '#shared/words/measure';
 
-/** What the smallest mat of a print depends on. */
+/** What the smallest cut of a print depends on. */
 export interface Sizing {
   readonly format: PageFormat;
   readonly reveal: Length;
@@ -18,11 +18,11 @@ export interface PrintTag {
   readonly tone: 'plain' | 'stop' | 'quiet';
 }
 
-/** The tag under a print on the table: its smallest mat, or what must not happen to it. */
+/** The tag under a print on the table: its smallest cut, or what must not happen to it. */
 export function tagOf(print: Print, { format, reveal, trim, unit }: Sizing): PrintTag {
   if (print.marks.instantFilm) return { words: 'Do not cut', tone: 'stop' };
-  const mat = smallestMat(print, format, reveal, trim);
-  return { words: `${formatLength(mat.width, unit)} × ${formatLength(mat.height, unit)}`, tone: 'plain' };
+  const cuts = smallestCuts(print, format, reveal, trim);
+  return { words: cuts.map(({ width, height }) => `${formatLength(width, unit)} × ${formatLength(height, unit)}`).join(' or '), tone: 'plain' };
 }
 
 /** A print's name as a screen reader says it. */

@@ -1,5 +1,5 @@
-import { canSeparate } from '../geometry/separable';
-import { inset, overlaps } from '../geometry/rects';
+import { canSeparate } from './separable';
+import { inset, overlaps } from './rects';
 import type { Rect } from '../model/rect';
 
 /** More pieces than this are shared out first come, first served instead of by trying every way. */
