@@ -3,6 +3,7 @@ import { afterAll, afterEach, beforeAll, describe, expect, inject, it } from 'vi
 import { colorName } from '#shared/colour/name';
 import type { SpreadDetail } from '#shared/contracts/albums';
 import { openBrowser, openPage } from '../support/browser';
+import { axeFaults } from '../support/e2e/axe';
 import { ComposePage } from '../support/e2e/compose-page';
 import { demoPerson, laidSpread, newcomer, readSpread } from '../support/e2e/people';
 
@@ -96,6 +97,7 @@ describe('a tab that is behind', () => {
     const [, mine, theirs] = await row.locator('> *').allInnerTexts();
     expect([mine, theirs]).toEqual([expect.stringContaining(colorName(BRICK)), expect.stringContaining(colorName(DEEP_TEAL))]);
     expect(await words(behind)).toBe('Changed elsewhere');
+    expect(await axeFaults(behind.page)).toEqual([]);
     expect(await colorOnServer(behind)).toBe(DEEP_TEAL);
     await dialog(behind).getByRole('button', { name: 'Keep mine' }).click();
     await expect.poll(() => words(behind)).toMatch(/^Saved/);
