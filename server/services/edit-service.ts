@@ -5,7 +5,7 @@ import type { Edit, PostEdits, StaleSpread } from '../../shared/contracts/edits'
 import { fieldFaults } from '../../shared/contracts/field-faults';
 import { AppError } from '../../shared/errors';
 import { findDocumentFaults } from '../../shared/model/document-faults';
-import { applyPatch, readKey, type Patch } from '../../shared/model/patch';
+import { applyPatch, readKey, touchedByBoth, type Patch } from '../../shared/model/patch';
 import type { Actor } from '../../shared/model/people';
 import { copiesUsed, namedPrints } from '../../shared/model/print-use';
 import { SCHEMA_VERSION, type SpreadDocument } from '../../shared/model/spread';
@@ -96,9 +96,8 @@ function refuseOtherEdits(edits: readonly Edit[], known: readonly SpreadEditEnti
 const asStored = (patch: Patch): unknown => JSON.parse(JSON.stringify(patch));
 
 function refuseConflicts(spread: SpreadEntity, fresh: readonly Edit[], foreign: readonly SpreadEditEntity[]): void {
-  const touchedByOthers = new Set(foreign.flatMap(({ patch }) => Object.keys(patch)));
-  const keys = [...new Set(fresh.flatMap(({ patch }) => Object.keys(patch)))].filter((key) => touchedByOthers.has(key));
-  if (keys.length > 0) throw stale(spread, keys.sort(), foreign);
+  const keys = touchedByBoth(fresh, foreign);
+  if (keys.length > 0) throw stale(spread, keys, foreign);
 }
 
 /** A key names the id of its value; another id would let one key change two things. */

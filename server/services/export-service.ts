@@ -3,18 +3,16 @@ import { z } from 'zod';
 import {
   EXPORT_FORMATS,
   EXPORT_SIZES,
-  PRINT_PPI,
-  SCREEN_EXPORT_WIDTH_PX,
+  KEEP_EXPORTS_DAYS,
   type CreateExport,
 } from '../../shared/contracts/exports';
 import { AppError } from '../../shared/errors';
-import { toInches } from '../../shared/model/length';
 import type { UserId } from '../../shared/model/ids';
 import type { Print } from '../../shared/model/print';
 import { printUses } from '../../shared/model/print-use';
 import type { SpreadDocument } from '../../shared/model/spread';
 import { buildScene } from '../../shared/scene/build-scene';
-import type { Scene } from '../../shared/scene/scene';
+import { exportPixels } from '../../shared/scene/export-size';
 import { JobEntity } from '../entities/job-entity';
 import { PrintEntity } from '../entities/print-entity';
 import { SpreadEntity } from '../entities/spread-entity';
@@ -30,8 +28,7 @@ import { invalidField } from './invalid-field';
 import type { JobService } from './job-service';
 
 export const EXPORT_KIND = 'spread.export';
-/** A result can be fetched for a week. */
-export const KEEP_EXPORTS_MS = 7 * 24 * 60 * 60_000;
+const DAY_MS = 24 * 60 * 60_000;
 /** Three bytes for each are held while drawing: the largest that fits the worker's memory beside the photos. */
 const MAX_EXPORT_PIXELS = 120_000_000;
 /** More than any PNG of that many pixels takes. */
@@ -72,8 +69,8 @@ export class ExportService {
     if (payload.revision > spread.revision) throw invalidField('revision', `the spread is at revision ${spread.revision} only`);
     await requireFreeDisk(this.deps.storage, MAX_RESULT_BYTES, this.deps.freeDiskBytes);
     const scene = buildScene(await this.documentAt(spread, payload.revision), new Map());
-    const widthPx = exportWidthPx(scene, payload.size);
-    if (widthPx * widthPx * (scene.height / scene.width) > MAX_EXPORT_PIXELS) {
+    const pixels = exportPixels(scene, payload.size);
+    if (pixels.width * pixels.height > MAX_EXPORT_PIXELS) {
       throw invalidField('size', 'these pages are too large to be drawn at 300 ppi: choose the screen size');
     }
     return this.deps.jobs.enqueue({
@@ -104,7 +101,7 @@ export class ExportService {
       return await incoming.withFolder(async (folder) => {
         const outputPath = `${folder}/export.${extension}`;
         const picturePaths = Object.fromEntries([...originals].map(([id, { path }]) => [id, path]));
-        const task = { scene, widthPx: exportWidthPx(scene, size), format, picturePaths, outputPath };
+        const task = { scene, widthPx: exportPixels(scene, size).width, format, picturePaths, outputPath };
         const stop = (): void => void pool.close();
         signal.addEventListener('abort', stop, { once: true });
         // A lost claim shows when the job ends; a missed report is no reason to stop drawing.
@@ -132,7 +129,7 @@ export class ExportService {
   /** Deletes results that are older than they are kept. */
   async dropExpired(): Promise<void> {
     const { dataSource, storage, now } = this.deps;
-    const before = new Date(now().getTime() - KEEP_EXPORTS_MS);
+    const before = new Date(now().getTime() - KEEP_EXPORTS_DAYS * DAY_MS);
     const expired = await dataSource.manager.find(JobEntity, {
       where: { kind: EXPORT_KIND, state: 'done', finishedAt: LessThan(before), result: Not(IsNull()) },
     });
@@ -167,7 +164,3 @@ export class ExportService {
     return copies;
   }
 }
-
-/** `screen`: a fixed width. `print`: 300 pixels for every inch of the scene. */
-export const exportWidthPx = (scene: Scene, size: CreateExport['size']): number =>
-  size === 'screen' ? SCREEN_EXPORT_WIDTH_PX : Math.round(toInches(scene.width) * PRINT_PPI);

@@ -1,4 +1,5 @@
 import type { CommandCall } from '../commands/calls';
+import { clamp } from '../geometry/clamp';
 import type { PlacedPhoto } from '../geometry/placed-photos';
 import type { MatId, PrintId, Side } from '../model/ids';
 import type { Print } from '../model/print';
@@ -104,7 +105,7 @@ function thresholdValues<T extends Readonly<Record<string, Threshold>>>(threshol
   const values = Object.entries(thresholds).map(([name, threshold]) => {
     const value = set[name];
     const isUsable = value !== undefined && !Number.isNaN(value);
-    return [name, isUsable ? Math.min(threshold.max, Math.max(threshold.min, value)) : threshold.default];
+    return [name, isUsable ? clamp(value, threshold.min, threshold.max) : threshold.default];
   });
   return Object.fromEntries(values) as ThresholdValues<T>;
 }

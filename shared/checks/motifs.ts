@@ -1,3 +1,4 @@
+import { inReadingOrder } from '../geometry/cells';
 import type { Side } from '../model/ids';
 import type { Mat } from '../model/spread';
 import type { SpreadView } from './check';
@@ -85,9 +86,8 @@ function pinwheel(top: Mat, at: Lookup): Figure[] {
 
 /** A motif's shape and place as one comparable text: every member's cells, in reading order. */
 export function footprint(motif: Motif): string {
-  return motif.mats
-    .map(({ x, y, w, h }) => [y, x, w, h] as const)
-    .sort((p, q) => p[0] - q[0] || p[1] - q[1])
-    .map((cells) => cells.join(','))
+  return [...motif.mats]
+    .sort(inReadingOrder)
+    .map(({ x, y, w, h }) => `${y},${x},${w},${h}`)
     .join(' ');
 }

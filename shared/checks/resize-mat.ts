@@ -1,3 +1,4 @@
+import { shareCells } from '../geometry/cells';
 import { gridOf } from '../geometry/grid';
 import type { Size } from '../model/rect';
 import type { Mat } from '../model/spread';
@@ -47,7 +48,3 @@ function roomFor(view: SpreadView, mat: Mat, w: number, h: number): { x: number;
   }
   return best;
 }
-
-type Cells = Pick<Mat, 'x' | 'y' | 'w' | 'h'>;
-
-const shareCells = (a: Cells, b: Cells): boolean => a.x < b.x + b.w && b.x < a.x + a.w && a.y < b.y + b.h && b.y < a.y + a.h;

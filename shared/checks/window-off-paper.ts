@@ -5,6 +5,7 @@ import { defineCheck, type Finding, type Remedy, type SpreadView } from './check
 import { paperOf } from '../geometry/keep-zone';
 import { offPaper } from './off-paper';
 import { piecesOf, type Piece } from './pieces';
+import { cardUnder } from './rims';
 
 /**
  * A window that leaves the paper where it must be filled: over the panes of a split print, or on a mat
@@ -39,8 +40,7 @@ export function mustBeFilled({ doc, matById }: SpreadView, piece: Piece): boolea
   if (!mat || doc.format.edge !== 'bleed') return false;
   const grid = gridOf(doc.format);
   const onRim = mat.x === 0 || mat.y === 0 || mat.x + mat.w === grid.columns || mat.y + mat.h === grid.rows;
-  const cardShows = (mat.reveal ?? doc.reveal) + (mat.inner?.reveal ?? 0) > 0;
-  return onRim && !cardShows && mat.trueSize === null;
+  return onRim && cardUnder(mat, doc.reveal) === null && mat.trueSize === null;
 }
 
 /** The window back on the paper, where the paper is large enough for it. */

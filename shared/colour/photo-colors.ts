@@ -1,3 +1,4 @@
+import { clamp } from '../geometry/clamp';
 import { toPicture } from '../geometry/paper';
 import { placedPhotos, windowAtOwnSize } from '../geometry/placed-photos';
 import { area } from '../geometry/rects';
@@ -79,8 +80,8 @@ function gather(parts: readonly SeenPart[]): SeenColor[] {
     const pixels = decodeRaster(print.raster);
     const scaleX = pixels.width / print.imageWidth;
     const scaleY = pixels.height / print.imageHeight;
-    const left = clamp(Math.floor(source.x * scaleX), pixels.width);
-    const top = clamp(Math.floor(source.y * scaleY), pixels.height);
+    const left = clamp(Math.floor(source.x * scaleX), 0, pixels.width - 1);
+    const top = clamp(Math.floor(source.y * scaleY), 0, pixels.height - 1);
     const endX = Math.max(left + 1, Math.min(pixels.width, Math.ceil((source.x + source.width) * scaleX)));
     const endY = Math.max(top + 1, Math.min(pixels.height, Math.ceil((source.y + source.height) * scaleY)));
     const stride = Math.max(1, Math.ceil(Math.sqrt(((endX - left) * (endY - top)) / SAMPLES_PER_PHOTO)));
@@ -107,8 +108,6 @@ function gather(parts: readonly SeenPart[]): SeenColor[] {
     .filter(([, cube]) => cube.weight > 0)
     .map(([, { sum, weight, byPrint }]) => ({ oklab: sum.map((v) => v / weight / 254) as unknown as Oklab, weight, byPrint }));
 }
-
-const clamp = (pixel: number, size: number): number => Math.min(Math.max(pixel, 0), size - 1);
 
 /** The members by falling chroma; the first at which enough of the group's weight has gone by. */
 function vividOf(members: readonly SeenColor[]): Oklch {

@@ -2,6 +2,7 @@ import type { Hex, MatId, PrintId } from '../model/ids';
 import type { Print } from '../model/print';
 import type { Mat, Scheme, SchemeColor, SpreadDocument } from '../model/spread';
 import type { CommandArgs } from '../commands/calls';
+import { clamp } from '../geometry/clamp';
 import { assignCards, type CardRole } from './assign-cards';
 import { cardUnits } from './card-units';
 import type { Oklch } from './convert';
@@ -194,7 +195,7 @@ function strongest(colors: readonly PhotoColor[], score: (color: PhotoColor) => 
 /** Card is calmer than light on a screen: chroma is held where a sheet of cardstock is found. */
 const cardChroma = ({ oklch: [, chroma] }: PhotoColor): number => Math.min(chroma, 0.12);
 const choose = (from: PhotoColor, oklch: Oklch): Chosen => ({ color: { hex: oklchToHex(oklch), printIds: from.printIds }, oklch, from });
-const hold = (v: number, [least, most]: readonly [number, number]): number => Math.min(most, Math.max(least, v));
+const hold = (v: number, [least, most]: readonly [number, number]): number => clamp(v, least, most);
 const within = (v: number, [least, most]: readonly [number, number]): boolean => v >= least && v <= most;
 const radians = (degree: number): number => (degree * Math.PI) / 180;
 const degrees = (radian: number): number => (radian * 180) / Math.PI;

@@ -1,5 +1,6 @@
+import { inReadingOrder } from '../geometry/cells';
 import type { MatId } from '../model/ids';
-import { inDrawingOrder } from '../model/patch';
+import { inDrawingOrder, inIdOrder } from '../model/patch';
 import type { Mat, PaneGroup, SpreadDocument } from '../model/spread';
 
 export const matOf = (doc: SpreadDocument, id: MatId): Mat | undefined => doc.mats.find((mat) => mat.id === id);
@@ -29,11 +30,11 @@ export const withMats = (doc: SpreadDocument, mats: readonly Mat[]): SpreadDocum
 
 export const withGroup = (doc: SpreadDocument, group: PaneGroup): SpreadDocument => ({
   ...doc,
-  panes: [...doc.panes.filter((other) => other.id !== group.id), group].sort((a, b) => (a.id < b.id ? -1 : 1)),
+  panes: [...doc.panes.filter((other) => other.id !== group.id), group].sort(inIdOrder),
 });
 
-/** As people read: by rows, then from left to right. */
-export const inReadingOrder = (a: Mat, b: Mat): number => a.y - b.y || a.x - b.x || (a.id < b.id ? -1 : 1);
+/** In reading order; of two at one place, as where one is laid over the other, by id. */
+export const matsInReadingOrder = (a: Mat, b: Mat): number => inReadingOrder(a, b) || inIdOrder(a, b);
 
 /**
  * Drawing order for a new mat. One that is laid over goes on top of everything; any other goes under all
@@ -42,30 +43,4 @@ export const inReadingOrder = (a: Mat, b: Mat): number => a.y - b.y || a.x - b.x
 export function newZ(doc: SpreadDocument, laidOver: boolean): number {
   if (laidOver) return Math.max(0, ...doc.mats.map((mat) => mat.z)) + 1;
   return Math.min(0, ...doc.mats.filter((mat) => mat.laidOver).map((mat) => mat.z - 1));
-}
-
-interface Cells {
-  readonly x: number;
-  readonly y: number;
-  readonly w: number;
-  readonly h: number;
-}
-
-/** The smallest rectangle of cells round all of them. */
-export function cellBox(cells: readonly Cells[]): Cells {
-  const x = Math.min(...cells.map((c) => c.x));
-  const y = Math.min(...cells.map((c) => c.y));
-  return {
-    x,
-    y,
-    w: Math.max(...cells.map((c) => c.x + c.w)) - x,
-    h: Math.max(...cells.map((c) => c.y + c.h)) - y,
-  };
-}
-
-/** The cells mirrored within a box, left to right (`horizontal`) or top to bottom. */
-export function mirrored<T extends Cells>(cells: T, box: Cells, axis: 'horizontal' | 'vertical'): T {
-  return axis === 'horizontal'
-    ? { ...cells, x: 2 * box.x + box.w - cells.x - cells.w }
-    : { ...cells, y: 2 * box.y + box.h - cells.y - cells.h };
 }

@@ -1,9 +1,10 @@
+import { cellBox, mirrored } from '../geometry/cells';
 import { clamp } from '../geometry/clamp';
 import { cellRect, gridOf } from '../geometry/grid';
 import { SIDES, type MatId, type Side } from '../model/ids';
 import type { Mat, SpreadDocument } from '../model/spread';
 import { refuse, type CommandRun } from './command';
-import { cellBox, changeMats, groupOf, matOf, matsOf, mirrored } from './edit-mats';
+import { changeMats, groupOf, matOf, matsOf } from './edit-mats';
 import { frameOfMat } from './fit-print';
 import { carryPicture, pictureAt, placeAt } from './pictures';
 

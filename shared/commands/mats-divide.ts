@@ -1,6 +1,7 @@
+import { cellBox, type Cells } from '../geometry/cells';
 import type { Mat, PaneGroup, SpreadDocument } from '../model/spread';
 import { refuse, type CommandRun } from './command';
-import { cellBox, groupOf, inReadingOrder, matOf, matsOf, withGroup, withMats } from './edit-mats';
+import { groupOf, matOf, matsInReadingOrder, matsOf, withGroup, withMats } from './edit-mats';
 import { frameOfMat } from './fit-print';
 import { carryPicture, frameAt, pictureAt, type Place } from './pictures';
 
@@ -30,8 +31,6 @@ export const splitMat: CommandRun<'mats.split'> = (doc, { matId, columns, rows }
   return carryPicture(next, { mat: null, group: split }, pictureAt({ mat, group: null }), frameOfMat(doc, mat).photo, context);
 };
 
-type Cells = Pick<Mat, 'x' | 'y' | 'w' | 'h'>;
-
 /** Columns × rows rectangles that fill the cells, row by row; empty where a piece would have no step. */
 function divide(cells: Cells, columns: number, rows: number): Cells[] {
   if (!(columns >= 1 && rows >= 1 && columns <= cells.w && rows <= cells.h)) return [];
@@ -56,7 +55,7 @@ function divide(cells: Cells, columns: number, rows: number): Cells[] {
  * its print on one mat; prints on the others go back to the table.
  */
 export const mergeMats: CommandRun<'mats.merge'> = (doc, { matIds }, context) => {
-  const mats = matsOf(doc, matIds)?.sort(inReadingOrder);
+  const mats = matsOf(doc, matIds)?.sort(matsInReadingOrder);
   if (!mats) return refuse('no-such-mat');
   if (mats.length < 2) return refuse('too-few-mats');
   if (mats.some((mat) => mat.page !== mats[0]!.page)) return refuse('on-two-pages');
@@ -65,7 +64,7 @@ export const mergeMats: CommandRun<'mats.merge'> = (doc, { matIds }, context) =>
   // Mats that are laid over may overlap, so that equal areas alone would not prove a rectangle.
   if (mats.some((mat) => mat.laidOver) || cells !== box.w * box.h) return refuse('not-a-rectangle');
 
-  const keeper = [...mats].sort((a, b) => carries(b) - carries(a) || b.w * b.h - a.w * a.h || inReadingOrder(a, b))[0]!;
+  const keeper = [...mats].sort((a, b) => carries(b) - carries(a) || b.w * b.h - a.w * a.h || matsInReadingOrder(a, b))[0]!;
   const merged: Mat = { ...keeper, ...box, trueSize: null, focal: mats.some((mat) => mat.focal) };
   const others = doc.mats.filter((mat) => !mats.includes(mat));
   const group = groupOf(doc, keeper);

@@ -1,8 +1,10 @@
+import { mirrored } from '../geometry/cells';
 import { gridOf } from '../geometry/grid';
 import type { Side } from '../model/ids';
+import { inIdOrder } from '../model/patch';
 import type { Mat, PaneGroup } from '../model/spread';
 import { refuse, type CommandRun } from './command';
-import { mirrored, withMats } from './edit-mats';
+import { withMats } from './edit-mats';
 
 /** The places are mirrored about the page's middle, never the pictures. */
 export const mirrorPage: CommandRun<'pages.mirror'> = (doc, { page, axis }) => {
@@ -65,5 +67,5 @@ export const useSketch: CommandRun<'pages.useSketch'> = (doc, { page, mats, colo
     content: null,
   }));
   const kept = doc.mats.filter((mat) => mat.page !== page);
-  return withMats({ ...doc, panes: [...doc.panes, ...groups].sort((a, b) => (a.id < b.id ? -1 : 1)) }, [...kept, ...laid]);
+  return withMats({ ...doc, panes: [...doc.panes, ...groups].sort(inIdOrder) }, [...kept, ...laid]);
 };

@@ -1,6 +1,6 @@
 import type { Placement, SpreadDocument } from '../model/spread';
 import { refuse, type CommandRun } from './command';
-import { changeMats, groupOf, inReadingOrder, matsOf, withGroup } from './edit-mats';
+import { changeMats, groupOf, matsInReadingOrder, matsOf, withGroup } from './edit-mats';
 import { carryPicture, dropPrint, frameAt, pictureAt, type Place } from './pictures';
 
 /**
@@ -8,7 +8,7 @@ import { carryPicture, dropPrint, frameAt, pictureAt, type Place } from './pictu
  * them carries is kept and runs on over all. Panes of other groups leave those.
  */
 export const groupPanes: CommandRun<'panes.group'> = (doc, { matIds, printId }, context) => {
-  const mats = matsOf(doc, matIds)?.sort(inReadingOrder);
+  const mats = matsOf(doc, matIds)?.sort(matsInReadingOrder);
   if (!mats) return refuse('no-such-mat');
   if (mats.length < 2) return refuse('too-few-mats');
   if (mats.some((mat) => mat.page !== mats[0]!.page)) return refuse('on-two-pages');
@@ -46,7 +46,7 @@ export const ungroupPanes: CommandRun<'panes.ungroup'> = (doc, { groupId }, cont
   const group = doc.panes.find((candidate) => candidate.id === groupId);
   if (!group) return refuse('no-such-group');
   const panes: Place = { mat: null, group };
-  const largest = doc.mats.filter((mat) => group.matIds.includes(mat.id)).sort((a, b) => b.w * b.h - a.w * a.h || inReadingOrder(a, b))[0]!;
+  const largest = doc.mats.filter((mat) => group.matIds.includes(mat.id)).sort((a, b) => b.w * b.h - a.w * a.h || matsInReadingOrder(a, b))[0]!;
   const bared = changeMats({ ...doc, panes: doc.panes.filter((other) => other !== group) }, group.matIds, (mat) => ({ ...mat, content: { kind: 'bare' } }));
   const picture: Placement | null = pictureAt(panes);
   return carryPicture(bared, { mat: largest, group: null }, picture, frameAt(doc, panes).photo, context);

@@ -3,7 +3,7 @@ import { SIDES } from '../model/ids';
 import { inDrawingOrder } from '../model/patch';
 import type { Mat, PaneGroup, SpreadDocument } from '../model/spread';
 import type { CommandContext } from './command';
-import { changeMats, inReadingOrder, withGroup } from './edit-mats';
+import { changeMats, matsInReadingOrder, withGroup } from './edit-mats';
 import { carryPrint, frameOfGroup, frameOfMat, refitPlacement, type Frame } from './fit-print';
 import { shownPrints } from './pictures';
 
@@ -27,7 +27,7 @@ function settlePanes(before: SpreadDocument, next: SpreadDocument, context: Comm
   for (const group of next.panes) {
     const members = next.mats
       .filter(({ id, content }) => group.matIds.includes(id) && content.kind === 'pane' && content.groupId === group.id)
-      .sort(inReadingOrder);
+      .sort(matsInReadingOrder);
     const matIds = members.map((mat) => mat.id);
     if (matIds.length > 1) panes.push(sameList(matIds, group.matIds) ? group : { ...group, matIds });
     else if (members[0]) settled = dissolve(before, settled, group, members[0], context);

@@ -6,6 +6,8 @@ export const EXPORT_FORMATS = ['png', 'jpeg'] as const;
 export const EXPORT_SIZES = ['screen', 'print'] as const;
 export const SCREEN_EXPORT_WIDTH_PX = 2400;
 export const PRINT_PPI = 300;
+/** For so long an export's file can be fetched. */
+export const KEEP_EXPORTS_DAYS = 7;
 
 export const createExportSchema = z.strictObject({
   id: idSchema,

@@ -1,6 +1,7 @@
 import type { PageFormat } from '../model/page-format';
 import type { Rect } from '../model/rect';
 import type { Mat } from '../model/spread';
+import type { Cells } from './cells';
 import { inset } from './rects';
 
 export interface Grid {
@@ -22,8 +23,6 @@ export function gridOf(format: PageFormat): Grid {
     marginY: Math.floor((format.height - rows * format.step) / 2),
   };
 }
-
-type Cells = Pick<Mat, 'x' | 'y' | 'w' | 'h'>;
 
 /** The grid rectangle before any inset, in page space. */
 export function cellRect(format: PageFormat, cells: Cells): Rect {

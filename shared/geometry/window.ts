@@ -2,6 +2,7 @@ import { inches, snapTo } from '../model/length';
 import type { Print } from '../model/print';
 import type { Rect, Size } from '../model/rect';
 import type { Placement } from '../model/spread';
+import { clamp } from './clamp';
 import { turnedSize } from './paper';
 
 /** The size of a placed print's whole paper: its own, or for a digital photo the one it is scaled to. */
@@ -40,7 +41,7 @@ function slideAxis(at: number, window: number, paper: number, mark: number): num
   const room = paper - window;
   if (room < 0) return snapTo(room / 2, mark);
   const last = Math.floor(room / mark) * mark;
-  return Math.min(Math.max(snapTo(at, mark), 0), last);
+  return clamp(snapTo(at, mark), 0, last);
 }
 
 /** True where some place of a window of that size, on the mark and on the paper, holds all of `needed`, a part of the paper. */

@@ -1,3 +1,4 @@
+import { shareCells } from '../geometry/cells';
 import { cellRect, contentRect, gridOf, innerMatRect } from '../geometry/grid';
 import type { MatId, PaneGroupId, PrintId } from './ids';
 import { inDrawingOrder } from './patch';
@@ -110,8 +111,7 @@ function overlapFaults(mats: readonly Mat[]): DocumentFault[] {
 }
 
 /** True where two mats of one page share a cell of the grid. */
-export const cellsOverlap = (a: Mat, b: Mat): boolean =>
-  a.page === b.page && a.x < b.x + b.w && b.x < a.x + a.w && a.y < b.y + b.h && b.y < a.y + a.h;
+export const cellsOverlap = (a: Mat, b: Mat): boolean => a.page === b.page && shareCells(a, b);
 
 function paneFaults(doc: SpreadDocument): DocumentFault[] {
   const faults: DocumentFault[] = [];

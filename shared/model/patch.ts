@@ -1,9 +1,6 @@
 import type { Mat, Page, PaneGroup, Scheme, SpreadDocument } from './spread';
 import type { PrintId } from './ids';
 
-/** A document key. MODEL.md 6. */
-export type PatchKey = 'page/left' | 'page/right' | 'reveal' | 'table' | 'scheme' | `mat/${string}` | `panes/${string}`;
-
 export type PatchValue = Mat | Page | PaneGroup | Scheme | readonly PrintId[] | number | null;
 
 /** What an edit did to one key; `null` means absent. */
@@ -12,7 +9,10 @@ export interface Change {
   readonly after: PatchValue;
 }
 
-/** What one edit changed. Undo is the same data with each pair swapped. */
+/**
+ * What one edit changed, by document key: `page/left`, `page/right`, `reveal`, `table`, `scheme`, `mat/ID`, `panes/ID`.
+ * MODEL.md 6. Undo is the same data with each pair swapped.
+ */
 export type Patch = Readonly<Record<string, Change>>;
 
 /** The value at a key, or null where it is absent. @throws RangeError for a key that no document has. */
@@ -35,8 +35,11 @@ export function readKey(doc: SpreadDocument, key: string): PatchValue {
   }
 }
 
+type HasId = { readonly id: string };
+export const inIdOrder = (a: HasId, b: HasId): number => (a.id < b.id ? -1 : 1);
+
 /** Drawing order: by z, then by id so that every machine agrees. */
-export const inDrawingOrder = (a: Mat, b: Mat): number => a.z - b.z || (a.id < b.id ? -1 : 1);
+export const inDrawingOrder = (a: Mat, b: Mat): number => a.z - b.z || inIdOrder(a, b);
 
 /** The document with every `after` in place; mats stay in drawing order. Does not look at `before`. */
 export function applyPatch(doc: SpreadDocument, patch: Patch): SpreadDocument {
@@ -52,7 +55,7 @@ export function applyPatch(doc: SpreadDocument, patch: Patch): SpreadDocument {
     else next = writeKey(next, key, after);
   }
   if (mats.size > 0) next = { ...next, mats: merge(next.mats, mats).sort(inDrawingOrder) };
-  if (panes.size > 0) next = { ...next, panes: merge(next.panes, panes).sort((a, b) => (a.id < b.id ? -1 : 1)) };
+  if (panes.size > 0) next = { ...next, panes: merge(next.panes, panes).sort(inIdOrder) };
   return next;
 }
 
@@ -73,7 +76,7 @@ function writeKey(doc: SpreadDocument, key: string, after: PatchValue): SpreadDo
   }
 }
 
-function merge<T extends { readonly id: string }>(list: readonly T[], changes: Map<string, T | null>): T[] {
+function merge<T extends HasId>(list: readonly T[], changes: Map<string, T | null>): T[] {
   const kept = list.flatMap((item) => {
     const changed = changes.get(item.id);
     return changed === undefined ? [item] : changed === null ? [] : [changed];
@@ -118,9 +121,11 @@ export function composePatches(first: Patch, second: Patch): Patch {
   return out;
 }
 
-/** The keys that both touch, sorted. */
-export function sharedKeys(a: Patch, b: Patch): string[] {
-  return Object.keys(a)
-    .filter((key) => key in b)
-    .sort();
+/** Every key that one of these edits touches. */
+export const touchedKeys = (edits: readonly { readonly patch: Patch }[]): Set<string> => new Set(edits.flatMap(({ patch }) => Object.keys(patch)));
+
+/** The keys that edits on both sides touch, sorted. */
+export function touchedByBoth(some: readonly { readonly patch: Patch }[], others: readonly { readonly patch: Patch }[]): string[] {
+  const keys = touchedKeys(some);
+  return [...touchedKeys(others)].filter((key) => keys.has(key)).sort();
 }

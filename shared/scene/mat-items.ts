@@ -1,3 +1,4 @@
+import { inkOn } from '../colour/contrast';
 import { contentRect, innerMatRect, matRect } from '../geometry/grid';
 import { inset } from '../geometry/rects';
 import type { Hex } from '../model/ids';
@@ -17,8 +18,6 @@ const EDGE = { thickness: inches(1 / 96), fill: '#1b1d22', opacity: 0.2 } as con
 const RULE_OPACITY = 0.2;
 const KEEPSAKE = { fill: '#f4f2ea', ink: '#4a4d57', edge: inches(1 / 32) } as const;
 const MISSING_STROKE_EM = 1 / 24;
-const DARK_INK = '#1b1d22';
-const LIGHT_INK = '#fdfcf8';
 
 /** Everything that one mat shows, from its card upwards, in drawing order. */
 export function matItems(doc: SpreadDocument, mat: Mat, photo: PhotoItem | null, at: Rect): SceneItem[] {
@@ -120,13 +119,4 @@ function textItems(mat: Mat, font: FontId, size: number, fill: Hex, lines: reado
     const xs = line.xs.map((left) => x + left);
     return [{ kind: 'text', key: `${mat.id}/text/${i}`, matId: mat.id, font, size, fill, text: line.text, xs, baseline }, ...boxes];
   });
-}
-
-/** Dark or light ink, whichever stands out from a card; by relative luminance (WCAG 2.2), whose even point is near 0.18. */
-function inkOn(fill: Hex): Hex {
-  const [r = 0, g = 0, b = 0] = [1, 3, 5].map((at) => {
-    const value = Number.parseInt(fill.slice(at, at + 2), 16) / 255;
-    return value <= 0.04045 ? value / 12.92 : ((value + 0.055) / 1.055) ** 2.4;
-  });
-  return 0.2126 * r + 0.7152 * g + 0.0722 * b > 0.18 ? DARK_INK : LIGHT_INK;
 }

@@ -1,4 +1,5 @@
 import type { SketchMat } from '../commands/calls';
+import { inReadingOrder } from '../geometry/cells';
 import { gridOf } from '../geometry/grid';
 import type { PageFormat } from '../model/page-format';
 import { fingerprint } from './fingerprint';
@@ -18,9 +19,6 @@ export interface GridSize {
   readonly columns: number;
   readonly rows: number;
 }
-
-/** In reading order: by top edge, then by left edge. */
-const inReadingOrder = (a: SketchMat, b: SketchMat): number => a.y - b.y || a.x - b.x;
 
 /**
  * Mats out of their short notation: `x,y,w,h` in steps, one mat after the other, with `*` behind the focal

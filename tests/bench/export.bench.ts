@@ -4,7 +4,7 @@ import { join } from 'node:path';
 import sharp, { type OverlayOptions, type Sharp } from 'sharp';
 import { EXPORT_LIMITS } from '#server/images/pools';
 import { WorkerProcess } from '#server/images/worker-process';
-import { exportWidthPx } from '#server/services/export-service';
+import { exportPixels } from '#shared/scene/export-size';
 import { buildScene } from '#shared/scene/build-scene';
 import { toPixels } from '#shared/scene/pixels';
 import type { Scene } from '#shared/scene/scene';
@@ -53,7 +53,7 @@ async function spreadOfPhotos(): Promise<{ scene: Scene; picturePaths: Record<st
 
 /** The same layers by sharp alone: each photo cut and resized as it lies, two at a time, then one composite. */
 async function bare(scene: Scene, picturePaths: Record<string, string>, format: 'png' | 'jpeg', path: string): Promise<void> {
-  const widthPx = exportWidthPx(scene, 'print');
+  const widthPx = exportPixels(scene, 'print').width;
   const scale = widthPx / scene.width;
   const layers: Promise<OverlayOptions>[] = [];
   for (const item of [...scene.pages, ...scene.items]) {
@@ -83,7 +83,7 @@ export async function rows(): Promise<BenchRow[]> {
   try {
     const found: BenchRow[] = [];
     for (const format of ['png', 'jpeg'] as const) {
-      const task = { scene, widthPx: exportWidthPx(scene, 'print'), format, picturePaths, outputPath: join(folder, `ours.${format}`) };
+      const task = { scene, widthPx: exportPixels(scene, 'print').width, format, picturePaths, outputPath: join(folder, `ours.${format}`) };
       const medians = await medianOfBoth(ROUNDS, () => worker.run(task), () => bare(scene, picturePaths, format, join(folder, `bare.${format}`)));
       const ratio = medians.ours / medians.bare;
       found.push({ id: `export.300ppi.${format}`, value: medians.ours, floor: medians.bare, ratio, unit: 'ms', goal: 1.4, better: 'lower' });

@@ -7,7 +7,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { exportSpread, type ExportResult } from '#server/images/export-spread';
 import { EXPORT_LIMITS } from '#server/images/pools';
 import { WorkerProcess } from '#server/images/worker-process';
-import { exportWidthPx } from '#server/services/export-service';
+import { exportPixels } from '#shared/scene/export-size';
 import { buildScene } from '#shared/scene/build-scene';
 import { buildMat, buildPrint, buildSpread, formatOf, printContent, printsById } from '../../support/builders';
 import { patches, sharpOf } from '../../support/pictures';
@@ -37,7 +37,7 @@ async function exported(formatId: string, format: 'png' | 'jpeg', size: 'screen'
   const scene = sceneOn(formatId);
   const outputPath = join(folder, `out-${formatId}-${size}.${format}`);
   const picturePaths = { [print.id]: picturePath };
-  const result = await exportSpread({ scene, widthPx: exportWidthPx(scene, size), format, picturePaths, outputPath });
+  const result = await exportSpread({ scene, widthPx: exportPixels(scene, size).width, format, picturePaths, outputPath });
   return { file: await readFile(outputPath), result };
 }
 

@@ -7,9 +7,9 @@ import { beforeAll, describe, expect, it } from 'vitest';
 import { JobEntity } from '#server/entities/job-entity';
 import { EXPORT_LIMITS, type ExportPool } from '#server/images/pools';
 import { WorkerPool } from '#server/images/worker-pool';
-import { ExportService, KEEP_EXPORTS_MS } from '#server/services/export-service';
+import { ExportService } from '#server/services/export-service';
 import { problemSchema } from '#shared/contracts/common';
-import { jobSchema, type CreateExport, type Job } from '#shared/contracts/exports';
+import { jobSchema, KEEP_EXPORTS_DAYS, type CreateExport, type Job } from '#shared/contracts/exports';
 import { uploadedPrintSchema } from '#shared/contracts/prints';
 import { errorSentence } from '#shared/words/en/errors';
 import { EXPORT_TOO_HEAVY } from '#shared/words/en/exports';
@@ -126,7 +126,7 @@ describe('POST /spreads/:spreadId/exports', () => {
   it('keeps a file for a week, and says nothing of one after that', async () => {
     const job = await exported({ format: 'jpeg' });
     const { manager } = app().app.deps.dataSource;
-    await manager.update(JobEntity, { id: job.id }, { finishedAt: new Date(Date.now() - KEEP_EXPORTS_MS - 1000) });
+    await manager.update(JobEntity, { id: job.id }, { finishedAt: new Date(Date.now() - KEEP_EXPORTS_DAYS * 86_400_000 - 1000) });
     const folder = join(app().dataDir, 'files', owner.studioId, 'exports');
     expect(await readdir(folder)).toContain(`${job.id}.jpg`);
     await app().app.deps.services.exports.dropExpired();

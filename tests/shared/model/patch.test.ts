@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { applyPatch, composePatches, diffDocuments, invertPatch, readKey, sharedKeys } from '#shared/model/patch';
+import { applyPatch, composePatches, diffDocuments, invertPatch, readKey, touchedByBoth } from '#shared/model/patch';
 import { buildMat, buildSpread } from '../../support/builders';
 
 const a = buildMat({ x: 0, y: 0, w: 4, h: 4, z: 1 });
@@ -26,9 +26,13 @@ describe('a patch', () => {
     expect(composePatches(there, invertPatch(there))).toEqual({});
   });
 
-  it('names the keys that two edits both touch', () => {
-    const first = { 'page/left': { before: null, after: { color: '#111111' } }, table: { before: [], after: [] } };
-    expect(sharedKeys(first, { table: { before: [], after: [] } })).toEqual(['table']);
+  it('names the keys that edits on both sides touch', () => {
+    const change = { before: null, after: null };
+    const touching = (...keys: string[]) => ({ patch: Object.fromEntries(keys.map((key) => [key, change])) });
+    const mine = [touching('page/left', 'table'), touching('reveal')];
+    const theirs = [touching('table', 'scheme'), touching('reveal')];
+    expect(touchedByBoth(mine, theirs)).toEqual(['reveal', 'table']);
+    expect(touchedByBoth(mine, [])).toEqual([]);
   });
 
   it('refuses a key that no document has', () => {

@@ -2,6 +2,8 @@ import { DndContext } from '@dnd-kit/core';
 import { lazy, Suspense, useEffect, useMemo, useState } from 'react';
 import type { Pile } from '#shared/contracts/prints';
 import type { PrintId } from '#shared/model/ids';
+import { toInches } from '#shared/model/length';
+import { pageRects } from '#shared/scene/page-rects';
 import { formatSize, type Unit } from '#shared/words/measure';
 import { pixelsPerInch } from '@/features/composer/canvas/page-scale';
 import { useComposer, useComposerStore } from '@/features/composer/hooks/composer-context';
@@ -44,7 +46,7 @@ export function ComposeScreen({ title, piles, mayEdit, sortHref }: ComposeScreen
   const isEditable = mayEdit && !isSmall;
   const margin = isSmall ? 0 : viewport.width < WIDE ? MARGIN_NARROW : MARGIN_WIDE;
   const perInch = isSmall
-    ? Math.max(4, (viewport.width - 24) / ((2 * doc.format.width + doc.binding.gap) / 4064))
+    ? Math.max(4, (viewport.width - 24) / toInches(pageRects(doc).width))
     : pixelsPerInch(viewport, doc, { sides: 2 * margin, vertical: VERTICAL_SURROUND });
   const { held, contextProps } = useComposeDrag(perInch);
   useComposeKeys(isEditable, held !== null);

@@ -1,8 +1,8 @@
 import { useMutation, useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import { EXPORT_FORMATS, EXPORT_SIZES, PRINT_PPI, SCREEN_EXPORT_WIDTH_PX, type CreateExport } from '#shared/contracts/exports';
-import { toInches } from '#shared/model/length';
-import type { SpreadDocument } from '#shared/model/spread';
+import { EXPORT_FORMATS, EXPORT_SIZES, KEEP_EXPORTS_DAYS, PRINT_PPI, type CreateExport } from '#shared/contracts/exports';
+import { exportPixels } from '#shared/scene/export-size';
+import { pageRects } from '#shared/scene/page-rects';
 import { Button } from '@/components/button';
 import { Dialog } from '@/components/dialog';
 import { Notice } from '@/components/notice';
@@ -16,15 +16,6 @@ type Format = CreateExport['format'];
 
 const NOT_SAVED = 'Your latest changes could not be saved, and the server draws only what is saved. Try again when the bar says Saved.';
 const FORMAT_WORDS: Record<Format, string> = { png: 'PNG, exact', jpeg: 'JPEG, smaller file' };
-
-/** Pixel size of an export. */
-export function exportPixels(doc: SpreadDocument, size: Size): { width: number; height: number } {
-  const sides = (doc.pages.left ? 1 : 0) + (doc.pages.right ? 1 : 0);
-  const widthIn = toInches(doc.format.width * sides + (sides === 2 ? doc.binding.gap : 0));
-  const heightIn = toInches(doc.format.height);
-  const width = size === 'screen' ? SCREEN_EXPORT_WIDTH_PX : Math.round(widthIn * PRINT_PPI);
-  return { width, height: Math.round((width * heightIn) / widthIn) };
-}
 
 /** Takes the preview picture away: the server draws it from what is saved. */
 export function ExportDialog({ spreadId, onClose }: { spreadId: string; onClose: () => void }) {
@@ -49,7 +40,7 @@ export function ExportDialog({ spreadId, onClose }: { spreadId: string; onClose:
     <Dialog open onClose={onClose} title="Preview picture" description="The spread as it is planned, without grid, notes or marks.">
       <div className="export-choice" role="group" aria-label="Size">
         {EXPORT_SIZES.map((id) => {
-          const px = exportPixels(doc, id);
+          const px = exportPixels(pageRects(doc), id);
           return (
             <button key={id} type="button" className="opt" aria-pressed={size === id} onClick={() => choose(() => setSize(id))}>
               {id === 'screen' ? 'To look at' : `To print, ${PRINT_PPI} ppi`}
@@ -79,7 +70,7 @@ export function ExportDialog({ spreadId, onClose }: { spreadId: string; onClose:
         )}
         <p role="status">
           {isWorking && `The server draws it: ${Math.round((job?.progress ?? 0) * 100)}%.`}
-          {job?.state === 'done' && 'Ready. It is kept for a day.'}
+          {job?.state === 'done' && `Ready. It is kept for ${KEEP_EXPORTS_DAYS} days.`}
         </p>
       </div>
       {(start.isError || job?.state === 'failed') && (

@@ -1,7 +1,7 @@
 import { inches, millimetres } from '#shared/model/length';
 import type { Mat, SpreadDocument } from '#shared/model/spread';
 import type { CommandCall } from '#shared/commands/calls';
-import { hexToOklab } from '#shared/colour/convert';
+import { inkOn } from '#shared/colour/contrast';
 import { formatLength, type Unit } from '#shared/words/measure';
 import { useComposer } from '@/features/composer/hooks/composer-context';
 import { useRun } from '@/features/composer/hooks/use-run';
@@ -9,9 +9,6 @@ import { colorGroups } from '@/features/composer/model/color-groups';
 import { LazyColorSheet } from './lazy-color-sheet';
 import { ContentSheet } from './content-sheet';
 import { ActionPopover } from './popover';
-
-/** Ink or chalk, whichever reads on this card. */
-const inkOn = (color: string): string => (hexToOklab(color)[0] > 0.6 ? '#23272f' : '#fdfcf8');
 
 interface MatActionsProps {
   readonly mats: readonly Mat[];

@@ -3,6 +3,7 @@ import { inset, intersection } from '#shared/geometry/rects';
 import { toPaper, turnInBox } from '#shared/geometry/paper';
 import type { PlacedPhoto } from '#shared/geometry/placed-photos';
 import { placedPaper } from '#shared/geometry/window';
+import { UNITS_PER_INCH } from '#shared/model/length';
 import type { Rect } from '#shared/model/rect';
 import type { Print } from '#shared/model/print';
 import type { Mat, SpreadDocument, TrimSettings } from '#shared/model/spread';
@@ -61,8 +62,8 @@ export function SelectedMat({ doc, mat, matRect, label, photo, print, trim, unit
 }
 
 const matSize = (rect: Rect, perInch: number) => ({
-  width: Math.round((rect.width / perInch) * 4064),
-  height: Math.round((rect.height / perInch) * 4064),
+  width: Math.round((rect.width / perInch) * UNITS_PER_INCH),
+  height: Math.round((rect.height / perInch) * UNITS_PER_INCH),
 });
 
 /** The keep zone in page space, and the parts of it (with the cutting tolerance) that the window would cut away. */

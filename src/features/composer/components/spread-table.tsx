@@ -5,6 +5,7 @@ import { CHECKS } from '#shared/checks/registry';
 import { matRect } from '#shared/geometry/grid';
 import type { MatId, PrintId, Side } from '#shared/model/ids';
 import { SIDES } from '#shared/model/ids';
+import { UNITS_PER_INCH } from '#shared/model/length';
 import type { Rect } from '#shared/model/rect';
 import type { Mat, SpreadDocument } from '#shared/model/spread';
 import type { Print } from '#shared/model/print';
@@ -12,7 +13,7 @@ import { buildScene } from '#shared/scene/build-scene';
 import { formatSize, type Unit } from '#shared/words/measure';
 import { SceneDrawing } from '@/components/scene/scene-drawing';
 import { anchorOf, type Anchor } from '@/features/composer/canvas/note-layout';
-import { cellsAt, inReadingOrder, matLabels, pageLeft, toScreen } from '@/features/composer/canvas/page-scale';
+import { asRead, cellsAt, matLabels, pageAt, pageLeft, toScreen } from '@/features/composer/canvas/page-scale';
 import { useComposer, useComposerStore } from '@/features/composer/hooks/composer-context';
 import { isPrintDrag } from '@/features/composer/hooks/drag-data';
 import type { Held } from '@/features/composer/hooks/use-compose-drag';
@@ -53,7 +54,7 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
   const [marked, setMarked] = useState<readonly string[] | null>(null);
 
   const scene = useMemo(() => buildScene(doc, prints), [doc, prints]);
-  const scale = perInch / 4064;
+  const scale = perInch / UNITS_PER_INCH;
   const size = { width: scene.width * scale, height: scene.height * scale };
   const labels = useMemo(() => matLabels(doc.mats), [doc.mats]);
   const rects = useMemo(
@@ -82,7 +83,7 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
       </div>
       <div className="spread" style={size} onDoubleClick={(event) => isEditable && addMatAt(event, store.getState(), perInch)} onPointerDown={(event) => event.target === event.currentTarget && store.getState().select([])}>
         <SceneDrawing scene={scene} pictureSize={perInch * devicePixelRatio > 80 ? 'large' : 'medium'} underlay={<Grids doc={doc} />} />
-        {inReadingOrder(doc.mats).map((mat) => (
+        {asRead(doc.mats).map((mat) => (
           <MatControl
             key={mat.id}
             matId={mat.id}
@@ -199,9 +200,9 @@ function addMatAt(event: MouseEvent<HTMLDivElement>, state: StoreState, perInch:
   const box = event.currentTarget.getBoundingClientRect();
   const { doc } = state;
   const x = event.clientX - box.left;
-  const side: Side = x < (doc.format.width + doc.binding.gap / 2) * (perInch / 4064) ? 'left' : 'right';
-  if (!doc.pages[side]) return;
-  const cell = cellsAt(doc.format, x - pageLeft(doc, side) * (perInch / 4064), event.clientY - box.top, perInch);
+  const scale = perInch / UNITS_PER_INCH;
+  const side = pageAt(doc, x / scale);
+  const cell = cellsAt(doc.format, x - pageLeft(doc, side) * scale, event.clientY - box.top, perInch);
   for (const steps of [4, 3, 2]) {
     if (state.run({ id: 'mats.add', args: { page: side, ...cell, w: steps, h: steps, color: doc.scheme?.colors.main.hex } })) return;
   }

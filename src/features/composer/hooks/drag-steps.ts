@@ -1,11 +1,11 @@
 import type { CommandCall } from '#shared/commands/calls';
+import { clamp } from '#shared/geometry/clamp';
 import { gridOf } from '#shared/geometry/grid';
 import { inverseTurn } from '#shared/geometry/paper';
 import type { PlacedPhoto } from '#shared/geometry/placed-photos';
-import type { Side } from '#shared/model/ids';
 import { UNITS_PER_INCH } from '#shared/model/length';
 import type { Mat, SpreadDocument } from '#shared/model/spread';
-import { pageLeft } from '@/features/composer/canvas/page-scale';
+import { pageAt, pageLeft } from '@/features/composer/canvas/page-scale';
 import type { Edge } from './drag-data';
 
 interface Delta {
@@ -19,13 +19,9 @@ export function moveCall(doc: SpreadDocument, mat: Mat, delta: Delta, perInch: n
   const scale = UNITS_PER_INCH / perInch;
   const grid = gridOf(format);
   const left = pageLeft(doc, mat.page) + grid.marginX + mat.x * format.step + delta.x * scale;
-  const centre = left + (mat.w * format.step) / 2;
-  const middle = format.width + doc.binding.gap / 2;
-  const over: Side = centre < middle ? 'left' : 'right';
-  const page = doc.pages[over] ? over : mat.page;
-  const clamp = (value: number, max: number): number => Math.min(Math.max(value, 0), max);
-  const x = clamp(Math.round((left - pageLeft(doc, page) - grid.marginX) / format.step), grid.columns - mat.w);
-  const y = clamp(Math.round(mat.y + (delta.y * scale) / format.step), grid.rows - mat.h);
+  const page = pageAt(doc, left + (mat.w * format.step) / 2);
+  const x = clamp(Math.round((left - pageLeft(doc, page) - grid.marginX) / format.step), 0, grid.columns - mat.w);
+  const y = clamp(Math.round(mat.y + (delta.y * scale) / format.step), 0, grid.rows - mat.h);
   return { id: 'mats.move', args: { matIds: [mat.id], dx: x - mat.x, dy: y - mat.y, page } };
 }
 
@@ -33,7 +29,6 @@ export function moveCall(doc: SpreadDocument, mat: Mat, delta: Delta, perInch: n
 export function resizeCall(doc: SpreadDocument, mat: Mat, edge: Edge, delta: Delta, perInch: number): CommandCall {
   const scale = UNITS_PER_INCH / perInch / doc.format.step;
   const grid = gridOf(doc.format);
-  const clamp = (value: number, min: number, max: number): number => Math.min(Math.max(value, min), max);
   const dx = Math.round(delta.x * scale);
   const dy = Math.round(delta.y * scale);
   const right = mat.x + mat.w;

@@ -1,8 +1,8 @@
 import { staleSpreadSchema, type Edit, type LoggedEdit, type PostEdits, type PostEditsResponse, type StaleSpread } from '#shared/contracts/edits';
-import { applyPatch } from '#shared/model/patch';
+import { applyPatch, touchedByBoth } from '#shared/model/patch';
 import type { SpreadDocument } from '#shared/model/spread';
 import { utf8Length } from '#shared/model/utf8-length';
-import { foreignEdits, touchedByBoth } from './conflict';
+import { foreignEdits } from './conflict';
 import type { DraftStore } from './drafts';
 
 /**
@@ -54,8 +54,6 @@ interface AutosaveOptions {
   /** Edits by others that touch nothing of this tab's unsaved ones. */
   readonly onMissed: (missed: readonly LoggedEdit[]) => void;
 }
-
-export type Autosave = ReturnType<typeof createAutosave>;
 
 const DEBOUNCE_MS = 600;
 const BACK_OFF_MS = [1_000, 2_000, 4_000, 8_000, 15_000, 30_000] as const;

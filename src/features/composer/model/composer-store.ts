@@ -4,7 +4,7 @@ import type { CommandContext, Reason } from '#shared/commands/command';
 import type { SpreadDetail } from '#shared/contracts/albums';
 import type { Edit, LoggedEdit } from '#shared/contracts/edits';
 import type { MatId, PrintId } from '#shared/model/ids';
-import { applyPatch, type Patch } from '#shared/model/patch';
+import { applyPatch, touchedKeys, type Patch } from '#shared/model/patch';
 import type { Print } from '#shared/model/print';
 import type { SpreadDocument, TrimSettings } from '#shared/model/spread';
 import type { Unit } from '#shared/words/measure';
@@ -104,7 +104,7 @@ export function createComposerStore(detail: SpreadDetail, deps: ComposerDeps): C
   /** Others' edits come in under whatever the hand is doing. */
   const takeMissed = (missed: readonly LoggedEdit[]): void => {
     current = applyEdits(current, missed);
-    history = forgetKeys(history, missed.flatMap(({ patch }) => Object.keys(patch)));
+    history = forgetKeys(history, touchedKeys(missed));
     show(current, undoState());
     gesture?.showAgain();
   };
@@ -176,8 +176,8 @@ export function createComposerStore(detail: SpreadDetail, deps: ComposerDeps): C
     if (!conflict) return;
     gesture?.cancel();
     const resolution = resolveConflict(autosave.getBase().doc, current, conflict, choice);
-    const lost = resolution.doc === resolution.theirs ? autosave.getUnsaved().flatMap(({ patch }) => Object.keys(patch)) : [];
-    history = forgetKeys(history, [...lost, ...conflict.missed.flatMap(({ patch }) => Object.keys(patch))]);
+    const lost = resolution.doc === resolution.theirs ? touchedKeys(autosave.getUnsaved()) : [];
+    history = forgetKeys(history, [...lost, ...touchedKeys(conflict.missed)]);
     current = resolution.doc;
     show(current, undoState());
     const isChanged = Object.keys(resolution.patch).length > 0;

@@ -1,18 +1,8 @@
 import type { Edit, LoggedEdit, StaleSpread } from '#shared/contracts/edits';
 import { findDocumentFaults } from '#shared/model/document-faults';
 import type { MatId, Side } from '#shared/model/ids';
-import { applyPatch, diffDocuments, readKey, type Patch, type PatchValue } from '#shared/model/patch';
+import { applyPatch, diffDocuments, readKey, touchedKeys, type Patch, type PatchValue } from '#shared/model/patch';
 import type { SpreadDocument } from '#shared/model/spread';
-
-type HasPatch = { readonly patch: Patch };
-
-const keysOf = (edits: readonly HasPatch[]): Set<string> => new Set(edits.flatMap(({ patch }) => Object.keys(patch)));
-
-/** Document keys that edits on both sides touch, sorted. */
-export function touchedByBoth(mine: readonly HasPatch[], theirs: readonly HasPatch[]): string[] {
-  const own = keysOf(mine);
-  return [...keysOf(theirs)].filter((key) => own.has(key)).sort();
-}
 
 /** Logged edits that are none of these (a repeated save is answered with the log, one's own edits included). */
 export function foreignEdits(log: readonly LoggedEdit[], own: readonly Pick<Edit, 'id'>[]): LoggedEdit[] {
@@ -50,7 +40,7 @@ export interface ConflictView {
  */
 export function describeConflict(base: SpreadDocument, mine: SpreadDocument, stale: StaleSpread): ConflictView {
   const theirs = applyEdits(base, stale.missed);
-  const keys = stale.keys.length > 0 ? stale.keys : [...keysOf(stale.missed)].sort();
+  const keys = stale.keys.length > 0 ? stale.keys : [...touchedKeys(stale.missed)].sort();
   const latestFirst = [...stale.missed].reverse();
   return {
     names: [...new Set(latestFirst.flatMap(({ userName }) => userName ?? []))],
@@ -63,7 +53,7 @@ export function describeConflict(base: SpreadDocument, mine: SpreadDocument, sta
 
 const sameValue = (a: PatchValue, b: PatchValue): boolean => JSON.stringify(a) === JSON.stringify(b);
 
-export const applyEdits = (doc: SpreadDocument, edits: readonly HasPatch[]): SpreadDocument => edits.reduce((next, { patch }) => applyPatch(next, patch), doc);
+export const applyEdits = (doc: SpreadDocument, edits: readonly { readonly patch: Patch }[]): SpreadDocument => edits.reduce((next, { patch }) => applyPatch(next, patch), doc);
 
 function describeKey(key: string, base: SpreadDocument, mine: SpreadDocument, theirs: SpreadDocument): Difference {
   const values = { before: readKey(base, key), mine: readKey(mine, key), theirs: readKey(theirs, key) };
@@ -95,7 +85,7 @@ export interface Resolution {
 export function resolveConflict(base: SpreadDocument, mine: SpreadDocument, stale: StaleSpread, choice: 'mine' | 'theirs'): Resolution {
   const theirs = applyEdits(base, stale.missed);
   const own = diffDocuments(base, mine);
-  const shared = keysOf(stale.missed);
+  const shared = touchedKeys(stale.missed);
   const kept = choice === 'mine' ? own : Object.fromEntries(Object.entries(own).filter(([key]) => !shared.has(key)));
   const joined = applyPatch(theirs, kept);
   const whole = choice === 'mine' ? mine : theirs;

@@ -1,9 +1,9 @@
 import type { Edit, LoggedEdit, StaleSpread } from '#shared/contracts/edits';
 import { findDocumentFaults } from '#shared/model/document-faults';
-import { applyPatch, invertPatch, readKey } from '#shared/model/patch';
+import { applyPatch, invertPatch, readKey, touchedByBoth } from '#shared/model/patch';
 import type { SpreadDocument } from '#shared/model/spread';
 import type { AutosaveDeps, Base } from './autosave';
-import { applyEdits, foreignEdits, touchedByBoth } from './conflict';
+import { applyEdits, foreignEdits } from './conflict';
 import type { Draft } from './drafts';
 
 /**

@@ -1,3 +1,4 @@
+import { clamp } from '#shared/geometry/clamp';
 import { toPicture, type PaperFrame } from '#shared/geometry/paper';
 import type { PxRect } from '#shared/model/print';
 import type { Rect, Size } from '#shared/model/rect';
@@ -11,8 +12,6 @@ export interface Handle {
 export const HANDLES: readonly Handle[] = ([-1, 0, 1] as const).flatMap((y) =>
   ([-1, 0, 1] as const).filter((x) => x !== 0 || y !== 0).map((x) => ({ x, y })),
 );
-
-const clamp = (value: number, low: number, high: number): number => Math.min(Math.max(value, low), Math.max(low, high));
 
 /** A rectangle moved by (dx, dy), kept on the paper. All in one unit. */
 export const moveZone = (zone: Rect, dx: number, dy: number, paper: Size): Rect => ({
