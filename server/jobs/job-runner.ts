@@ -72,12 +72,24 @@ export function startJobRunner(deps: RunnerDeps): JobRunner {
 
 /** @returns whether there was a job to do. */
 export async function runNextJob(deps: RunnerDeps, signal: AbortSignal): Promise<boolean> {
-  const { dataSource, handlers, log, now, claimMs = CLAIM_MS } = deps;
+  const { dataSource, log, now, claimMs = CLAIM_MS } = deps;
   const job = await claimNextJob(dataSource, now(), claimMs);
   if (!job) return false;
   const claim = claimOn(dataSource, job, now, claimMs);
   const renew = (): void => void claim.renew().catch((error: unknown) => log.warn({ err: error }, 'could not renew a job'));
   const renewal = setInterval(renew, RENEW_MS).unref();
+  try {
+    await doJob(deps, job, claim, signal);
+  } catch (error) {
+    if (!(error instanceof ClaimLost)) throw error;
+    log.warn({ jobId: job.id, kind: job.kind }, 'a job was deleted, or taken up by another runner, while it was done');
+  } finally {
+    clearInterval(renewal);
+  }
+  return true;
+}
+
+async function doJob({ handlers, log }: RunnerDeps, job: JobEntity, claim: Claim, signal: AbortSignal): Promise<void> {
   try {
     if (job.attempts > MAX_ATTEMPTS) throw new AppError('unavailable', { reason: 'tried-too-often' });
     const handler = handlers[job.kind];
@@ -85,6 +97,7 @@ export async function runNextJob(deps: RunnerDeps, signal: AbortSignal): Promise
     const result = await handler(job, { signal, progress: (share) => claim.renew(share) });
     await claim.end({ state: 'done', progress: 1, result });
   } catch (error) {
+    if (error instanceof ClaimLost) throw error;
     if (signal.aborted) await claim.end({ state: 'waiting', attempts: job.attempts - 1 });
     else if (error instanceof AppError) await claim.fail(error.code, error.data);
     else {
@@ -92,12 +105,13 @@ export async function runNextJob(deps: RunnerDeps, signal: AbortSignal): Promise
       if (job.attempts >= MAX_ATTEMPTS) await claim.fail('bug', { reference: randomUUID() });
       else await claim.end({ state: 'waiting' });
     }
-  } finally {
-    clearInterval(renewal);
   }
-  return true;
 }
 
+/** The job is gone, or another runner has it: what this one made of it is of no use any more. */
+class ClaimLost extends Error {}
+
+type Claim = ReturnType<typeof claimOn>;
 type Ending = Partial<Pick<JobEntity, 'state' | 'progress' | 'attempts'>> & { result?: object | null; failure?: JobEntity['failure'] };
 
 /** What a runner may do to the job that it holds; every statement checks that it still holds it. */
@@ -105,7 +119,7 @@ function claimOn(dataSource: DataSource, job: JobEntity, now: () => Date, claimM
   const held = { id: job.id, state: 'running' as const, attempts: job.attempts };
   const change = async (changes: object): Promise<void> => {
     const { affected } = await dataSource.manager.update(JobEntity, held, changes);
-    if (affected !== 1) throw new Error(`the claim on job ${job.id} was lost`);
+    if (affected !== 1) throw new ClaimLost(`the claim on job ${job.id} was lost`);
   };
   const end = (ending: Ending): Promise<void> => {
     const isOver = ending.state !== 'waiting';

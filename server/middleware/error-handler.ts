@@ -2,6 +2,7 @@ import type { ErrorRequestHandler } from 'express';
 import { problemSchema, type Problem } from '../../shared/contracts/common';
 import { AppError, type ErrorCode } from '../../shared/errors';
 import { errorSentence, errorTitle } from '../../shared/words/en/errors';
+import { asMachineFailure } from '../services/database-errors';
 
 /** The only place that knows HTTP statuses; a new ErrorCode does not compile until it is mapped. */
 export const STATUS: Record<ErrorCode, number> = {
@@ -29,10 +30,12 @@ export const PROBLEM_TYPE = 'application/problem+json';
 /** Answers every failure as RFC 9457 problem details; what nobody expected is logged and told without detail. */
 export const handleErrors: ErrorRequestHandler = (error: unknown, req, res, next) => {
   const known = asAppError(error);
+  const failure = known ? null : asMachineFailure(error);
   if (known) req.log.debug({ code: known.code }, 'refused');
+  else if (failure) req.log.warn({ err: error, code: failure.code }, 'the machine failed');
   else req.log.error({ err: error }, 'unexpected error');
   if (res.headersSent) return next(error);
-  const problem = presentProblem(known ?? new AppError('bug'), req.originalUrl.split('?')[0] ?? '/');
+  const problem = presentProblem(known ?? failure ?? new AppError('bug'), req.originalUrl.split('?')[0] ?? '/');
   if (problem.status === 503 && !res.hasHeader('Retry-After')) res.set('Retry-After', '5');
   res.status(problem.status).set('Cache-Control', 'no-store').type(PROBLEM_TYPE).send(JSON.stringify(problem));
 };

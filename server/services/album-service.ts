@@ -5,8 +5,10 @@ import { DEFAULT_BINDING } from '../../shared/model/page-format';
 import type { Actor, Target } from '../../shared/model/people';
 import { AlbumEntity } from '../entities/album-entity';
 import { SpreadEntity } from '../entities/spread-entity';
+import type { Storage } from '../storage/storage';
 import { recordAudit } from './audit';
 import { createOnce } from './create-once';
+import { removeWithExports } from './export-files';
 import type { FormatService } from './format-service';
 import { invalidField } from './invalid-field';
 
@@ -20,6 +22,7 @@ export class AlbumService {
   constructor(
     private readonly dataSource: DataSource,
     private readonly formats: FormatService,
+    private readonly storage: Storage,
     private readonly now: () => Date,
   ) {}
 
@@ -73,10 +76,10 @@ export class AlbumService {
     return this.count(await this.get(id));
   }
 
-  /** For good, with all its spreads. */
+  /** For good, with all its spreads and the pictures made of them. */
   async remove(album: AlbumEntity, actor: Actor): Promise<void> {
     await this.dataSource.transaction(async (manager) => {
-      await manager.delete(AlbumEntity, { id: album.id });
+      await removeWithExports(manager, this.storage, { spread: { albumId: album.id } }, () => manager.delete(AlbumEntity, { id: album.id }));
       const { studioId, id: subjectId } = album;
       await recordAudit(manager, { studioId, actor, action: 'album.delete', subjectId, at: this.now() });
     });

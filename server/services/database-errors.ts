@@ -1,9 +1,11 @@
 import { QueryFailedError } from 'typeorm';
+import { AppError } from '../../shared/errors';
 
 /** MariaDB's own code of a failed statement, or null for any other error. */
-function databaseCode(error: unknown): string | null {
-  if (!(error instanceof QueryFailedError)) return null;
-  const { code } = error.driverError as { readonly code?: unknown };
+const databaseCode = (error: unknown): string | null => (error instanceof QueryFailedError ? codeOf(error.driverError) : null);
+
+function codeOf(error: unknown): string | null {
+  const code = typeof error === 'object' && error !== null && 'code' in error ? error.code : null;
   return typeof code === 'string' ? code : null;
 }
 
@@ -14,3 +16,29 @@ export const isReferenced = (error: unknown): boolean => databaseCode(error) ===
 
 /** A row was to point to one that does not exist. */
 export const isDangling = (error: unknown): boolean => databaseCode(error) === 'ER_NO_REFERENCED_ROW_2';
+
+/** The server is away, is going away, or has no connection left; the first ones are the operating system's. */
+const AWAY = new Set([
+  'ECONNREFUSED',
+  'ECONNRESET',
+  'EPIPE',
+  'ETIMEDOUT',
+  'ENOTFOUND',
+  'EAI_AGAIN',
+  'EHOSTUNREACH',
+  'PROTOCOL_CONNECTION_LOST',
+  'ER_SERVER_SHUTDOWN',
+  'ER_CON_COUNT_ERROR',
+  'ER_TOO_MANY_USER_CONNECTIONS',
+]);
+/** Two transactions stood in each other's way, and this one was rolled back. */
+const CROSSED = new Set(['ER_LOCK_DEADLOCK', 'ER_LOCK_WAIT_TIMEOUT']);
+const FULL = new Set(['ENOSPC', 'EDQUOT', 'ER_DISK_FULL', 'ER_RECORD_FILE_FULL']);
+
+/** What a failure of the machine rather than of our code is to whoever asked, or null: a repeat can succeed. */
+export function asMachineFailure(error: unknown): AppError | null {
+  const code = databaseCode(error) ?? codeOf(error) ?? '';
+  if (AWAY.has(code)) return new AppError('unavailable', { reason: 'database' });
+  if (CROSSED.has(code)) return new AppError('unavailable', { reason: 'busy' });
+  return FULL.has(code) ? new AppError('disk-full') : null;
+}

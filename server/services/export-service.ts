@@ -23,6 +23,7 @@ import { presentPrint } from '../presenters/present-print';
 import { requireFreeDisk } from '../storage/free-disk';
 import type { Incoming } from '../storage/incoming';
 import { exportKey, originalKey, type LocalCopy, type Storage, type StorageKey } from '../storage/storage';
+import { EXPORT_EXTENSIONS, isJobKept } from './export-files';
 import { documentAt } from './history';
 import { invalidField } from './invalid-field';
 import type { JobService } from './job-service';
@@ -36,7 +37,6 @@ const MAX_RESULT_BYTES = 400 * 1024 * 1024;
 
 const payloadSchema = z.object({ revision: z.int(), format: z.enum(EXPORT_FORMATS), size: z.enum(EXPORT_SIZES) });
 
-const EXTENSIONS = { png: 'png', jpeg: 'jpg' } as const;
 export const exportResultSchema = z.object({
   format: z.enum(EXPORT_FORMATS),
   extension: z.enum(['png', 'jpg']),
@@ -94,7 +94,7 @@ export class ExportService {
     const doc = await this.documentAt(spread, revision);
     const prints = await this.printsOf(spread, doc);
     const scene = buildScene(doc, new Map(prints.map(({ print }) => [print.id, print])));
-    const extension = EXTENSIONS[format];
+    const extension = EXPORT_EXTENSIONS[format];
     const shown = new Set(scene.items.flatMap((item) => (item.kind === 'photo' ? [item.printId] : [])));
     const originals = await this.originals(spread, prints.filter(({ print }) => shown.has(print.id)));
     try {
@@ -106,7 +106,12 @@ export class ExportService {
         signal.addEventListener('abort', stop, { once: true });
         // A lost claim shows when the job ends; a missed report is no reason to stop drawing.
         const result = await pool.run(task, (share) => void progress(share).catch(() => undefined)).finally(() => signal.removeEventListener('abort', stop));
-        await storage.put(exportKey(spread.studioId, job.id, extension), outputPath);
+        const key = exportKey(spread.studioId, job.id, extension);
+        await storage.put(key, outputPath);
+        if (!(await isJobKept(this.deps.dataSource.manager, job.id))) {
+          await storage.delete(key);
+          throw new AppError('not-found');
+        }
         return { format, extension, ...result };
       });
     } catch (error) {

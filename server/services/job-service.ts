@@ -2,7 +2,7 @@ import { In, type DataSource } from 'typeorm';
 import { AppError } from '../../shared/errors';
 import type { Target } from '../../shared/model/people';
 import { JobEntity } from '../entities/job-entity';
-import { isDuplicateKey } from './database-errors';
+import { isDangling, isDuplicateKey } from './database-errors';
 
 export interface NewJob {
   readonly id: string;
@@ -48,7 +48,7 @@ export class JobService {
    * Puts a job in the queue. The same job again (by id, or by key while it waits or runs) is answered with the
    * job that is there.
    *
-   * @throws AppError('already-exists') when the id is another job's.
+   * @throws AppError `already-exists` when the id is another job's, `not-found` when its spread was deleted meanwhile.
    */
   async enqueue(job: NewJob): Promise<JobEntity> {
     const row = {
@@ -67,6 +67,7 @@ export class JobService {
       this.onEnqueued();
       return this.dataSource.manager.create(JobEntity, row);
     } catch (error) {
+      if (isDangling(error)) throw new AppError('not-found');
       if (!isDuplicateKey(error)) throw error;
       return this.findSame(job);
     }

@@ -120,7 +120,7 @@ export class PrintService {
   /**
    * For good, with its file when no other print shows it. The database itself refuses while a spread uses the print.
    *
-   * @throws AppError('in-use') naming the spreads.
+   * @throws AppError `in-use` naming the spreads, `not-found` when somebody else just did the same.
    */
   async remove(print: PrintEntity, actor: Actor): Promise<void> {
     const { dataSource, storage } = this.deps;
@@ -138,7 +138,8 @@ export class PrintService {
   /** @returns the file that no print shows any more. */
   private async removeRows(manager: EntityManager, print: PrintEntity, actor: Actor): Promise<FileEntity | null> {
     const studio = await lockStudio(manager, print.studioId);
-    await manager.delete(PrintEntity, { id: print.id });
+    const { affected } = await manager.delete(PrintEntity, { id: print.id });
+    if (affected !== 1) throw new AppError('not-found');
     await recordAudit(manager, { studioId: print.studioId, actor, action: 'print.delete', subjectId: print.id, at: this.deps.now() });
     if (await manager.existsBy(PrintEntity, { fileId: print.fileId })) return null;
     const file = await manager.findOneByOrFail(FileEntity, { id: print.fileId });

@@ -9,8 +9,10 @@ import { upgradeDocument } from '../../shared/model/upgrade-document';
 import { AlbumEntity } from '../entities/album-entity';
 import { SpreadEntity } from '../entities/spread-entity';
 import { SpreadSnapshotEntity } from '../entities/spread-snapshot-entity';
+import type { Storage } from '../storage/storage';
 import { recordAudit } from './audit';
 import { createOnce } from './create-once';
+import { removeWithExports } from './export-files';
 
 /** The only way to read a stored document. */
 export const readDocument = (row: Pick<SpreadEntity, 'document'>): SpreadDocument => upgradeDocument(row.document);
@@ -18,6 +20,7 @@ export const readDocument = (row: Pick<SpreadEntity, 'document'>): SpreadDocumen
 export class SpreadService {
   constructor(
     private readonly dataSource: DataSource,
+    private readonly storage: Storage,
     private readonly now: () => Date,
   ) {}
 
@@ -41,7 +44,11 @@ export class SpreadService {
     });
   }
 
-  /** A bare spread after the album's others; its first snapshot is where its history starts. */
+  /**
+   * A bare spread after the album's others; its first snapshot is where its history starts.
+   *
+   * @throws AppError `not-found` when the album was deleted meanwhile, `already-exists`.
+   */
   async create(album: AlbumEntity, { id, title, pages }: CreateSpread): Promise<SpreadEntity> {
     const at = this.now();
     const document = documentSchema.parse(newDocument(album.format, album.binding, pages));
@@ -86,10 +93,10 @@ export class SpreadService {
     return this.get(spread.id);
   }
 
-  /** For good, with its history. */
+  /** For good, with its history and the pictures made of it. */
   async remove(spread: SpreadEntity, actor: Actor): Promise<void> {
     await this.dataSource.transaction(async (manager) => {
-      await manager.delete(SpreadEntity, { id: spread.id });
+      await removeWithExports(manager, this.storage, { spreadId: spread.id }, () => manager.delete(SpreadEntity, { id: spread.id }));
       const { studioId, id: subjectId } = spread;
       await recordAudit(manager, { studioId, actor, action: 'spread.delete', subjectId, at: this.now() });
     });
@@ -107,9 +114,10 @@ export const targetOfSpread = (spread: Pick<SpreadEntity, 'studioId' | 'albumId'
   spreadId: spread.id,
 });
 
-/** Orders of one album's spreads change one after the other. */
+/** Orders of one album's spreads change one after the other. @throws AppError('not-found'). */
 async function lockAlbum(manager: EntityManager, albumId: string): Promise<void> {
-  await manager.findOne(AlbumEntity, { where: { id: albumId }, lock: { mode: 'pessimistic_write' } });
+  const album = await manager.findOne(AlbumEntity, { where: { id: albumId }, lock: { mode: 'pessimistic_write' } });
+  if (!album) throw new AppError('not-found');
 }
 
 /** Puts the spread at that place and closes the ranks; a place past the end is the end. */

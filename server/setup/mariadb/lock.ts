@@ -87,17 +87,21 @@ function isAlive(pid: number, started: string | null): boolean {
     // EPERM: it lives, under another account.
     if ((error as NodeJS.ErrnoException).code !== 'EPERM') return false;
   }
-  return started === null || startOf(pid) === started;
+  // One that has ended keeps its id until its parent asks, which in a container may be never.
+  return started === null || (startOf(pid) === started && statOf(pid)[0] !== 'Z');
 }
 
 /** When a process started, in the kernel's ticks since boot (proc(5), field 22); null where there is no /proc. */
-function startOf(pid: number): string | null {
+const startOf = (pid: number): string | null => statOf(pid)[19] ?? null;
+
+/** proc(5)'s fields from the third on, which is the state; none where there is no /proc. */
+function statOf(pid: number): string[] {
   try {
     const stat = readFileSync(`/proc/${pid}/stat`, 'utf8');
     // The name in field 2 may hold spaces, so count from its closing bracket.
-    return stat.slice(stat.lastIndexOf(')') + 2).split(' ')[19] ?? null;
+    return stat.slice(stat.lastIndexOf(')') + 2).split(' ');
   } catch {
-    return null;
+    return [];
   }
 }
 

@@ -77,14 +77,22 @@ describe('every answer', () => {
     expect(nothing.body).toMatchObject({ code: 'not-found', instance: '/api/nothing-here' });
   });
 
-  it('tells no detail of a bug', async () => {
+  const failingWith = (error: Error) => {
     const { deps } = app();
-    const broken = { ...deps, services: { ...deps.services, grants: { ...deps.services.grants, findLive: () => Promise.reject(new Error('secret')) } } };
-    const answer = await supertest(createApp(broken as unknown as typeof deps, { pagesDir, checkAnswers: true }))
-      .get('/api/session')
-      .set('X-Pairleaf-Grant', 'x')
-      .expect(500);
+    const broken = { ...deps, services: { ...deps.services, grants: { ...deps.services.grants, findLive: () => Promise.reject(error) } } };
+    return supertest(createApp(broken as unknown as typeof deps, { pagesDir, checkAnswers: true })).get('/api/session').set('X-Pairleaf-Grant', 'x');
+  };
+
+  it('tells no detail of a bug', async () => {
+    const answer = await failingWith(new Error('secret')).expect(500);
     expect(answer.body.code).toBe('bug');
+    expect(JSON.stringify(answer.body)).not.toContain('secret');
+  });
+
+  it('asks to try again, and tells no detail, where the database is away', async () => {
+    const answer = await failingWith(Object.assign(new Error('connect ECONNREFUSED secret:3306'), { code: 'ECONNREFUSED' })).expect(503);
+    expect(answer.body.code).toBe('unavailable');
+    expect(answer.headers['retry-after']).toMatch(/^\d+$/);
     expect(JSON.stringify(answer.body)).not.toContain('secret');
   });
 });

@@ -105,6 +105,22 @@ describe('the job runner', () => {
     expect(await jobs().get(id)).toMatchObject({ state: 'done', attempts: 2, result: { again: true } });
   });
 
+  it('goes on to the next where a job was deleted while it was done, and calls nobody for that', async () => {
+    const errors: string[] = [];
+    const log = pino({ level: 'error' }, { write: (line: string) => void errors.push(line) });
+    await enqueue();
+    const deleteItself: JobHandlers = {
+      'test.work': async (job) => {
+        await database().dataSource.manager.delete(JobEntity, { id: job.id });
+        return {};
+      },
+    };
+    const runner = { ...deps(deleteItself), log };
+    const { signal } = new AbortController();
+    expect([await runNextJob(runner, signal), await runNextJob(runner, signal)]).toEqual([true, false]);
+    expect(errors).toEqual([]);
+  });
+
   it('gives a job back when the server stops', async () => {
     const { id } = await enqueue();
     const runner = startJobRunner({
