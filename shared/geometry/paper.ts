@@ -64,16 +64,6 @@ export function toPicture(frame: PaperFrame, rect: Rect): Rect {
   return { ...local, x: local.x + paperRect.x, y: local.y + paperRect.y };
 }
 
-/** Widest difference of proportions that is taken for the same shape: lab crops and borderless printers bleed about this much. */
-const SHAPE_TOLERANCE = 0.02;
-
-/** True where the oriented, turned file and the paper differ in shape, so that the person should look. */
-export function differsInShape(print: Pick<Print, 'imageWidth' | 'imageHeight' | 'paperWidth' | 'paperHeight' | 'turns'>): boolean {
-  const image = turnedSize({ width: print.imageWidth, height: print.imageHeight }, print.turns);
-  const ratio = (image.width / image.height) * (print.paperHeight / print.paperWidth);
-  return Math.abs(Math.log(ratio)) > SHAPE_TOLERANCE;
-}
-
 /**
  * The centre crop of the file in the paper's proportions: where a print's paper rectangle starts.
  *
@@ -90,4 +80,39 @@ export function centreCrop(image: Size, paper: Size, turns: Turns): PxRect {
     width,
     height,
   };
+}
+
+/** What decides where a print's paper rectangle starts. */
+type Sized = Pick<Print, 'imageWidth' | 'imageHeight' | 'paperWidth' | 'paperHeight' | 'turns'>;
+
+/** Where the paper rectangle stands as long as nobody nudges it: the centre crop. */
+export const automaticPaperRect = (print: Sized): PxRect =>
+  centreCrop({ width: print.imageWidth, height: print.imageHeight }, { width: print.paperWidth, height: print.paperHeight }, print.turns);
+
+/** True where nobody has nudged the paper rectangle. */
+export function hasAutomaticPaperRect(print: Sized & Pick<Print, 'paperRect'>): boolean {
+  const automatic = automaticPaperRect(print);
+  const { x, y, width, height } = print.paperRect;
+  return x === automatic.x && y === automatic.y && width === automatic.width && height === automatic.height;
+}
+
+/** Natural logarithm of the ratio of two sizes' proportions; 0 where they have one shape. */
+const shapeDifference = (a: Size, b: Size): number => Math.log((a.width * b.height) / (a.height * b.width));
+
+/** Widest difference of proportions that is taken for the same shape: lab crops and borderless printers bleed about this much. */
+const FILE_TOLERANCE = 0.02;
+
+/** True where the oriented, turned file and the paper differ in shape, so that the person should look. */
+export function differsInShape(print: Sized): boolean {
+  const image = turnedSize({ width: print.imageWidth, height: print.imageHeight }, print.turns);
+  return Math.abs(shapeDifference(image, { width: print.paperWidth, height: print.paperHeight })) > FILE_TOLERANCE;
+}
+
+/** Papers that differ by less have one shape; a nudged paper rectangle fits both without stretching the picture to be seen. */
+const PAPER_TOLERANCE = 0.005;
+
+/** True where two papers show the same shape of the file. */
+export function sameShape(a: Sized, b: Sized): boolean {
+  const onFile = ({ paperWidth, paperHeight, turns }: Sized): Size => turnedSize({ width: paperWidth, height: paperHeight }, turns);
+  return Math.abs(shapeDifference(onFile(a), onFile(b))) < PAPER_TOLERANCE;
 }

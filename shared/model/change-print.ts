@@ -1,7 +1,7 @@
 import type { FieldFault } from '../contracts/field-faults';
 import type { UpdatePrint } from '../contracts/prints';
 import { contains, intersection } from '../geometry/rects';
-import { centreCrop, turnedSize } from '../geometry/paper';
+import { automaticPaperRect, hasAutomaticPaperRect, sameShape, turnedSize } from '../geometry/paper';
 import type { Print, PxRect } from './print';
 
 /** What a person sets on a print; the pile, the bin and the revision are the server's to check. */
@@ -11,8 +11,8 @@ export type PrintChanges = Omit<UpdatePrint, 'baseRevision' | 'binned'>;
  * The print after a person's changes.
  *
  * The keep zone, details, faces and horizon stay where they are on the picture, whatever else changes. The paper
- * rectangle follows a new paper size or turn only while it is the automatic centre crop; one that was nudged by
- * hand stays. A turn that changes width and height over turns the paper with the picture, unless a size is given.
+ * rectangle follows a new paper size as the centre crop; one that was nudged by hand stays while the paper keeps its
+ * shape, since another shape would stretch the picture. A turn that changes width and height over turns the paper with the picture, unless a size is given.
  */
 export function changePrint(print: Print, changes: PrintChanges): Print {
   const { marks, turns = print.turns, paperWidth, paperHeight, ...rest } = changes;
@@ -26,8 +26,8 @@ export function changePrint(print: Print, changes: PrintChanges): Print {
     paperHeight: paper.height,
     marks: { ...print.marks, ...withoutAbsent(marks ?? {}) },
   };
-  if (changes.paperRect || !isAutomatic(print)) return next;
-  return { ...next, paperRect: automaticRect(next) };
+  const staysNudged = !hasAutomaticPaperRect(print) && sameShape(print, next);
+  return changes.paperRect || staysNudged ? next : { ...next, paperRect: automaticPaperRect(next) };
 }
 
 /**
@@ -54,19 +54,6 @@ export function printFaults(next: Print, changes: PrintChanges): FieldFault[] {
   }
   if (changes.horizon) faults.push(...horizonFaults(changes.horizon, image));
   return faults;
-}
-
-const automaticRect = (print: Print): PxRect =>
-  centreCrop(
-    { width: print.imageWidth, height: print.imageHeight },
-    { width: print.paperWidth, height: print.paperHeight },
-    print.turns,
-  );
-
-function isAutomatic(print: Print): boolean {
-  const automatic = automaticRect(print);
-  const rect = print.paperRect;
-  return rect.x === automatic.x && rect.y === automatic.y && rect.width === automatic.width && rect.height === automatic.height;
 }
 
 const isNear = (image: PxRect, rect: PxRect): boolean =>

@@ -25,10 +25,6 @@ export function toInches(length: Length): number {
   return length / UNITS_PER_INCH;
 }
 
-export function toMillimetres(length: Length): number {
-  return length / UNITS_PER_MM;
-}
-
 /** `value` moved to the nearest multiple of `mark`; halves go up. Never −0, which JSON cannot carry. */
 export function snapTo(value: Length, mark: Length): Length {
   return Math.round(value / mark) * mark + 0;

@@ -1,4 +1,4 @@
-import { UNITS_PER_INCH, UNITS_PER_MM, type Length } from '../model/length';
+import { inches, millimetres, UNITS_PER_INCH, UNITS_PER_MM, type Length } from '../model/length';
 
 export type Unit = 'in' | 'mm';
 
@@ -27,4 +27,19 @@ export function formatLength(length: Length, unit: Unit): string {
 /** Width × height with the unit once, at the end: `3 7/8 × 2 7/8 in`. */
 export function formatSize(size: { readonly width: Length; readonly height: Length }, unit: Unit): string {
   return `${formatLength(size.width, unit)} × ${formatLength(size.height, unit)} ${unit}`;
+}
+
+/** A unit in which people type. */
+export type TypedUnit = Unit | 'cm';
+
+/** `4`, `3.5`, `3,5`, or `3 1/2` and `1/2`. */
+const NUMBER = /^(?:(\d+(?:[.,]\d+)?)|(?:(\d+)\s+)?(\d+)\/([1-9]\d*))$/;
+
+/** A length as people type it, with or without a fraction, rounded to a whole unit of 1/160 mm; null for anything else. */
+export function parseLength(text: string, unit: TypedUnit): Length | null {
+  const match = NUMBER.exec(text.trim());
+  if (!match) return null;
+  const [, decimal, whole, numerator, denominator] = match;
+  const value = decimal !== undefined ? Number(decimal.replace(',', '.')) : Number(whole ?? 0) + Number(numerator) / Number(denominator);
+  return unit === 'in' ? inches(value) : millimetres(unit === 'cm' ? value * 10 : value);
 }

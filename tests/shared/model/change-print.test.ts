@@ -19,9 +19,12 @@ describe('a changed print', () => {
     expect(square.keepZone).toBe(print.keepZone);
   });
 
-  it('leaves a paper rectangle that was nudged by hand', () => {
+  it('leaves a paper rectangle that was nudged by hand while the paper keeps its shape', () => {
     const nudged = { ...print, paperRect: { x: 10, y: 0, width: 590, height: 393 } };
-    expect(changePrint(nudged, { paperWidth: inches(4), paperHeight: inches(4) }).paperRect).toEqual(nudged.paperRect);
+    expect(changePrint(nudged, { paperWidth: inches(9), paperHeight: inches(6) }).paperRect).toEqual(nudged.paperRect);
+    expect(changePrint(nudged, { turns: 1 }).paperRect).toEqual(nudged.paperRect);
+    // A square paper over that rectangle would stretch the picture.
+    expect(changePrint(nudged, { paperWidth: inches(4), paperHeight: inches(4) }).paperRect).toEqual({ x: 100, y: 0, width: 400, height: 400 });
     const given = { x: 0, y: 0, width: 300, height: 300 };
     expect(changePrint(print, { paperWidth: inches(4), paperHeight: inches(4), paperRect: given }).paperRect).toEqual(given);
   });

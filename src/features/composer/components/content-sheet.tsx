@@ -3,7 +3,7 @@ import { JOURNALING_MAX, LETTERING_MAX } from '#shared/contracts/document';
 import type { Hex } from '#shared/model/ids';
 import { inches, millimetres } from '#shared/model/length';
 import type { Content, ContentKind, Mat, Pattern } from '#shared/model/spread';
-import { formatLength, type Unit } from '#shared/words/measure';
+import { formatLength, parseLength, type Unit } from '#shared/words/measure';
 
 type Choice = Exclude<ContentKind, 'print' | 'pane'>;
 
@@ -131,29 +131,29 @@ interface LengthFieldProps {
   readonly onCommit: (length: number) => void;
 }
 
-/** A length in inches (a decimal) or millimetres, taken over when the field is left. */
-export function LengthField({ label, value, unit, onCommit }: LengthFieldProps) {
-  const shown = unit === 'in' ? value / inches(1) : value / millimetres(1);
-  const [text, setText] = useState(String(Math.round(shown * 10_000) / 10_000));
-  const number = Number(text.replace(',', '.'));
-  const isGood = Number.isFinite(number) && number > 0 && number <= (unit === 'in' ? 24 : 600);
+const LONGEST = inches(24);
+
+/** A length in inches (with fractions, as on a ruler) or millimetres, taken over when the field is left. */
+function LengthField({ label, value, unit, onCommit }: LengthFieldProps) {
+  const [text, setText] = useState(formatLength(value, unit));
+  const length = parseLength(text, unit);
+  const isGood = length !== null && length > 0 && length <= LONGEST;
   const commit = (): void => {
-    const length = unit === 'in' ? inches(number) : millimetres(number);
-    if (isGood && length !== value) onCommit(length);
+    // What is shown may be rounded: only a changed text is a changed length.
+    if (isGood && text !== formatLength(value, unit)) onCommit(length);
   };
   return (
     <label className="content-field is-row">
       {label}
       <input
         className="field-input num"
-        inputMode="decimal"
         aria-invalid={!isGood}
         value={text}
         onChange={(event) => setText(event.target.value)}
         onBlur={commit}
         onKeyDown={(event) => event.key === 'Enter' && commit()}
       />
-      <span className="num">{unit === 'in' ? `in (${formatLength(value, unit)})` : unit}</span>
+      <span className="num">{unit}</span>
     </label>
   );
 }

@@ -1,22 +1,16 @@
 import { useMutation, useQueryClient, type QueryClient } from '@tanstack/react-query';
 import { pileSchema, printSchema, type UpdatePrint } from '#shared/contracts/prints';
+import { changePrint } from '#shared/model/change-print';
 import type { Print } from '#shared/model/print';
 import { api } from '@/lib/api';
 import { newId } from '@/lib/ids';
 import { pilesQuery, printsQuery } from './print-queries';
 
-export type PrintChange = Omit<UpdatePrint, 'baseRevision'>;
+export type PrintChange = Omit<UpdatePrint, 'baseRevision' | 'binned'>;
 
 const putPrint = (client: QueryClient, studioId: string, id: string, change: (print: Print) => Print): void => {
   client.setQueryData(printsQuery(studioId).queryKey, (prints) => prints?.map((print) => (print.id === id ? change(print) : print)));
 };
-
-/** A print as it will be after a change. */
-export const withChange = (print: Print, { marks, ...change }: PrintChange): Print => ({
-  ...print,
-  ...change,
-  marks: { ...print.marks, ...marks },
-});
 
 /**
  * Changes what is known of a print. The table shows the guess at once; a refusal takes it back by asking
@@ -34,7 +28,7 @@ export function useUpdatePrint(studioId: string) {
     },
     onMutate: async ({ id, ...change }) => {
       await client.cancelQueries({ queryKey });
-      putPrint(client, studioId, id, (print) => withChange(print, change));
+      putPrint(client, studioId, id, (print) => changePrint(print, change));
     },
     onSuccess: (saved) => {
       putPrint(client, studioId, saved.id, () => saved);

@@ -1,6 +1,6 @@
 import { useState, type KeyboardEvent, type PointerEvent } from 'react';
 import { pictureUrl } from '#shared/contracts/prints';
-import { centreCrop, inverseTurn, turnedSize, turnInBox } from '#shared/geometry/paper';
+import { automaticPaperRect, inverseTurn, turnedSize, turnInBox } from '#shared/geometry/paper';
 import type { Print, PxRect } from '#shared/model/print';
 import { Button } from '@/components/button';
 import { useWidth } from '@/lib/use-width';
@@ -89,7 +89,7 @@ export function PaperRectEditor({ print, onSave, onDone }: PaperRectEditorProps)
         </Button>
         <Button onClick={() => setRect(growPaper({ ...print, paperRect: rect }, GROWTH))}>More</Button>
         <Button onClick={() => setRect(growPaper({ ...print, paperRect: rect }, 1 / GROWTH))}>Less</Button>
-        <Button onClick={() => setRect(centreCrop(image, { width: print.paperWidth, height: print.paperHeight }, print.turns))}>Middle</Button>
+        <Button onClick={() => setRect(automaticPaperRect(print))}>Middle</Button>
         <Button variant="bare" onClick={onDone}>
           Leave it
         </Button>

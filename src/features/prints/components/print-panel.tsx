@@ -1,5 +1,6 @@
 import { useState } from 'react';
 import { smallestCuts } from '#shared/geometry/smallest-cut';
+import type { Turns } from '#shared/model/ids';
 import type { Print } from '#shared/model/print';
 import { Button, IconButton } from '@/components/button';
 import { CloseIcon, FixMark, StopMark, TurnIcon } from '@/components/icons';
@@ -9,7 +10,7 @@ import { Notice } from '@/components/notice';
 import { ApiError } from '@/lib/api';
 import { sentenceOf } from '@/lib/form-errors';
 import { useDeletePrint, useUpdatePrint, type PrintChange } from '../api/print-mutations';
-import { needsALook, turnPrint } from '../model/paper-edit';
+import { needsALook } from '../model/paper-edit';
 import type { PileGroup } from '../model/pile-groups';
 import { cautionsOf, type Sizing } from '../model/table-words';
 import { BigPrint } from './big-print';
@@ -105,7 +106,7 @@ export function PrintPanel({ print, groups, sizing, mayEdit, mayDelete, onClose 
           ))}
         </Fact>
         <Fact label="Picture">
-          <Button variant="bare" disabled={!mayEdit} onClick={() => save(turnPrint(print))}>
+          <Button variant="bare" disabled={!mayEdit} onClick={() => save({ turns: ((print.turns + 1) % 4) as Turns })}>
             <TurnIcon /> Turn upright
           </Button>
           {!isNudging && !isOdd && mayEdit && (

@@ -1,9 +1,10 @@
 import { useState, type FormEvent } from 'react';
 import type { Print } from '#shared/model/print';
+import type { Size } from '#shared/model/rect';
 import { formatLength, formatSize, type Unit } from '#shared/words/measure';
 import { Button } from '@/components/button';
 import { TextField } from '@/components/field';
-import { changeSize, hasSize, laidLike, readLength, sizesFor } from '../model/paper-edit';
+import { hasSize, laidLike, readPaperLength, sizesFor } from '../model/paper-edit';
 import type { PrintChange } from '../api/print-mutations';
 import { Fact } from './fact';
 
@@ -33,7 +34,7 @@ export function SizeChoice({ print, unit, mayEdit, onSave }: SizeChoiceProps) {
           className="opt"
           aria-pressed={size === current}
           disabled={!mayEdit}
-          onClick={() => size !== current && onSave(changeSize(print, laidLike(size, print)))}
+          onClick={() => size !== current && onSave(asPaper(laidLike(size, print)))}
         >
           <span className="num">{size === current ? laidName(print, size.name, unit) : size.name}</span>
         </button>
@@ -53,6 +54,8 @@ export function SizeChoice({ print, unit, mayEdit, onSave }: SizeChoiceProps) {
   );
 }
 
+const asPaper = ({ width, height }: Size): PrintChange => ({ paperWidth: width, paperHeight: height });
+
 /** An inch size is read as it lies: 6 × 4 for a flat print. Rounded centimetre names stay as they are sold. */
 function laidName(print: Print, name: string, unit: Unit): string {
   return name.endsWith(' in') && unit === 'in' ? formatSize({ width: print.paperWidth, height: print.paperHeight }, 'in') : name;
@@ -66,11 +69,12 @@ function OtherSize({ print, unit, onSave, onDone }: Pick<SizeChoiceProps, 'print
   const [error, setError] = useState<string>();
   const submit = (event: FormEvent): void => {
     event.preventDefault();
-    const paper = { width: readLength(width, entryUnit), height: readLength(height, entryUnit) };
+    const [typedWidth, typedHeight] = [width, height].map((text) => readPaperLength(text, entryUnit === 'in' ? 'in' : 'cm'));
+    const paper = { width: typedWidth ?? null, height: typedHeight ?? null };
     if (paper.width === null || paper.height === null) {
       return setError(entryUnit === 'in' ? 'Write inches such as 3 1/2 or 3.5, from 1/2 to 40.' : 'Write centimetres such as 8.9, from 1.3 to 101.');
     }
-    onSave(changeSize(print, { width: paper.width, height: paper.height }));
+    onSave(asPaper({ width: paper.width, height: paper.height }));
     onDone();
   };
   const listed = sizesFor(unit).slice(READY);
@@ -84,7 +88,7 @@ function OtherSize({ print, unit, onSave, onDone }: Pick<SizeChoiceProps, 'print
             className="opt"
             aria-pressed={hasSize(print, size)}
             onClick={() => {
-              onSave({ ...changeSize(print, laidLike(size, print)), ...(size.instantFilm && { marks: { instantFilm: true } }) });
+              onSave({ ...asPaper(laidLike(size, print)), ...(size.instantFilm && { marks: { instantFilm: true } }) });
               onDone();
             }}
           >
