@@ -2,7 +2,7 @@ import type { ErrorRequestHandler } from 'express';
 import { problemSchema, type Problem } from '../../shared/contracts/common';
 import { AppError, type ErrorCode } from '../../shared/errors';
 import { errorSentence, errorTitle } from '../../shared/words/en/errors';
-import { asMachineFailure } from '../services/database-errors';
+import { asMachineFailure, isGone } from '../services/database-errors';
 
 /** The only place that knows HTTP statuses; a new ErrorCode does not compile until it is mapped. */
 export const STATUS: Record<ErrorCode, number> = {
@@ -57,7 +57,7 @@ export function presentProblem({ code, data }: AppError, instance: string): Prob
 /** Expected failures of our own and of the body parser; null for a bug. */
 function asAppError(error: unknown): AppError | null {
   if (error instanceof AppError) return error;
-  if (error instanceof URIError) return new AppError('not-found');
+  if (error instanceof URIError || isGone(error)) return new AppError('not-found');
   switch (typeof error === 'object' && error !== null && 'type' in error ? error.type : undefined) {
     case 'entity.too.large':
       return new AppError('too-large');

@@ -1,4 +1,4 @@
-import { QueryFailedError } from 'typeorm';
+import { EntityNotFoundError, QueryFailedError } from 'typeorm';
 import { AppError } from '../../shared/errors';
 
 /** MariaDB's own code of a failed statement, or null for any other error. */
@@ -16,6 +16,9 @@ export const isReferenced = (error: unknown): boolean => databaseCode(error) ===
 
 /** A row was to point to one that does not exist. */
 export const isDangling = (error: unknown): boolean => databaseCode(error) === 'ER_NO_REFERENCED_ROW_2';
+
+/** A row that another one names was deleted between the reading of both. */
+export const isGone = (error: unknown): boolean => error instanceof EntityNotFoundError;
 
 /** The server is away, is going away, or has no connection left; the first ones are the operating system's. */
 const AWAY = new Set([

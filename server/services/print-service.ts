@@ -12,7 +12,7 @@ import { UserEntity } from '../entities/user-entity';
 import { presentPrint } from '../presenters/present-print';
 import type { Storage } from '../storage/storage';
 import { recordAudit } from './audit';
-import { isReferenced } from './database-errors';
+import { isDangling, isReferenced } from './database-errors';
 import { invalidField } from './invalid-field';
 import { readCursor, writeCursor } from './cursor';
 import { lockStudio, removeUnlessKnown } from './stored-pictures';
@@ -78,7 +78,7 @@ export class PrintService {
     if (binned === true) await this.requireUnused(print.id);
     const at = this.deps.now();
     const { id: _id, studioId: _studioId, marks, revision: _revision, palette: _palette, raster: _raster, ...columns } = next;
-    const { affected } = await this.deps.dataSource.manager.update(
+    const update = this.deps.dataSource.manager.update(
       PrintEntity,
       { id: print.id, revision: baseRevision },
       {
@@ -92,6 +92,10 @@ export class PrintService {
         ...(binned !== undefined && { binnedAt: binned ? (print.binnedAt ?? at) : null }),
       },
     );
+    const { affected } = await update.catch((error: unknown) => {
+      // The pile was deleted since it was looked for.
+      throw isDangling(error) ? noSuchPile() : error;
+    });
     if (affected !== 1) throw await this.stale(print.id);
     return this.get(print.id);
   }
@@ -103,7 +107,7 @@ export class PrintService {
   private async requirePile(studioId: string, pileId: string | null | undefined): Promise<void> {
     if (pileId === undefined || pileId === null) return;
     const exists = await this.deps.dataSource.manager.existsBy(PileEntity, { id: pileId, studioId });
-    if (!exists) throw invalidField('pileId', 'there is no such pile in this studio');
+    if (!exists) throw noSuchPile();
   }
 
   private async requireUnused(printId: string): Promise<void> {
@@ -149,6 +153,8 @@ export class PrintService {
     return file;
   }
 }
+
+const noSuchPile = (): AppError => invalidField('pileId', 'there is no such pile in this studio');
 
 /** A print is in a pile; whether that pile is shared matters to uploads only. */
 export const targetOfPrint = (print: PrintEntity): Target => ({

@@ -3,6 +3,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import supertest from 'supertest';
+import { EntityNotFoundError } from 'typeorm';
 import { createApp } from '#server/app';
 import { withApp } from '../../support/app';
 
@@ -86,6 +87,12 @@ describe('every answer', () => {
   it('tells no detail of a bug', async () => {
     const answer = await failingWith(new Error('secret')).expect(500);
     expect(answer.body.code).toBe('bug');
+    expect(JSON.stringify(answer.body)).not.toContain('secret');
+  });
+
+  it('finds nothing where a thing was deleted while it was read', async () => {
+    const answer = await failingWith(new EntityNotFoundError('AlbumEntity', { id: 'secret' })).expect(404);
+    expect(answer.body.code).toBe('not-found');
     expect(JSON.stringify(answer.body)).not.toContain('secret');
   });
 

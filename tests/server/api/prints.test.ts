@@ -93,6 +93,19 @@ describe('prints', () => {
     expect(answer.body.fields).toMatchObject([{ path: 'pileId' }]);
   });
 
+  it('refuse a pile that goes away while they are put on it', async () => {
+    const [print, pileId] = [await insert(), randomUUID()];
+    await owner.agent.post(`/api/studios/${owner.studioId}/piles`).send({ id: pileId, name: 'Going' }).expect(201);
+    const deletion = app().deps.dataSource.createQueryRunner();
+    await deletion.startTransaction();
+    await deletion.query('DELETE FROM piles WHERE id = ?', [pileId]);
+    const moved = patch(print, { baseRevision: 0, pileId }).then((answer) => answer);
+    await new Promise((resolve) => setTimeout(resolve, 200));
+    await deletion.commitTransaction();
+    await deletion.release();
+    expect(await moved).toMatchObject({ status: 400, body: { fields: [{ path: 'pileId' }] } });
+  });
+
   it('go into the bin and come out again', async () => {
     const print = await insert();
     const listed = async (binned: boolean) =>
