@@ -5,7 +5,8 @@ import type { Mat } from '#shared/model/spread';
 import { openBrowser } from '../support/browser';
 import { ComposePage, twoFrames } from '../support/e2e/compose-page';
 import { asJourney } from '../support/e2e/journey';
-import { laidSpread, newcomer } from '../support/e2e/people';
+import { newcomer } from '../support/e2e/people';
+import { laidSpread } from '../support/e2e/visitors';
 
 let browser: Browser;
 let compose: ComposePage;

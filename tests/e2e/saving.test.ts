@@ -5,7 +5,8 @@ import type { SpreadDetail } from '#shared/contracts/albums';
 import { openBrowser, openPage } from '../support/browser';
 import { axeFaults } from '../support/e2e/axe';
 import { ComposePage } from '../support/e2e/compose-page';
-import { demoPerson, laidSpread, newcomer, readSpread } from '../support/e2e/people';
+import { demoPerson, newcomer } from '../support/e2e/people';
+import { laidSpread, readSpread } from '../support/e2e/visitors';
 
 const DEEP_TEAL = '#1d4f5c';
 const BRICK = '#a3240f';

@@ -4,7 +4,8 @@ import type { Role } from '#shared/model/people';
 import { openBrowser, openPage, type WatchedPage } from '../support/browser';
 import { axeFaults, sidewaysScroll } from '../support/e2e/axe';
 import { ComposePage } from '../support/e2e/compose-page';
-import { demoPerson, type Visitor } from '../support/e2e/people';
+import { demoPerson } from '../support/e2e/people';
+import type { Visitor } from '../support/e2e/visitors';
 
 const WIDE = { width: 1440, height: 900 };
 const PHONE = { width: 390, height: 844 };

@@ -1,6 +1,6 @@
 import type { Locator, Page } from 'playwright-core';
 import type { SpreadDocument } from '#shared/model/spread';
-import { readSpread } from './people';
+import { readSpread } from './visitors';
 
 export interface Point {
   readonly x: number;
@@ -44,6 +44,7 @@ export class ComposePage {
 
   /** Gives a mat a colour by its code. */
   async colorMat(label: string, color: string): Promise<void> {
+    await this.page.bringToFront(); // a tab behind another is drawn once a second
     await this.mat(label).click();
     await this.page.getByRole('toolbar', { name: 'Mat' }).getByRole('button', { name: 'Colour', exact: true }).click();
     const sheet = this.page.getByRole('dialog');

@@ -1,76 +1,12 @@
-import { randomUUID } from 'node:crypto';
 import type { Browser, BrowserContextOptions } from 'playwright-core';
 import { inject } from 'vitest';
 import { DEMO_ACCOUNTS } from '#server/setup/demo/accounts';
-import type { Session } from '#shared/contracts/accounts';
-import type { SpreadDetail } from '#shared/contracts/albums';
-import type { CommandCall } from '#shared/commands/calls';
-import { runCommand } from '#shared/commands/run-command';
-import { applyPatch } from '#shared/model/patch';
 import type { Role } from '#shared/model/people';
-import type { Print } from '#shared/model/print';
-import { openPage, type WatchedPage } from '../browser';
-import { snapshot } from './snapshots';
+import { signIn, signUp, type Visitor } from './visitors';
 
-export interface Visitor extends WatchedPage {
-  readonly studioId: string;
-}
+/** Somebody new in the shared product. */
+export const newcomer = (browser: Browser, options: BrowserContextOptions = {}): Promise<Visitor> => signUp(browser, inject('productUrl'), options);
 
-/** Somebody new, signed in, with an empty studio. */
-export async function newcomer(browser: Browser, options: BrowserContextOptions = {}): Promise<Visitor> {
-  const visit = await openPage(browser, inject('productUrl'), options);
-  const answer = await visit.page.request.post('/api/accounts', {
-    data: { email: `${randomUUID()}@example.org`, password: 'a quiet table by the window', name: 'Maud Ferrier', studioName: 'Ferrier at the Table' },
-  });
-  return { ...visit, studioId: studioIn(await answer.json()) };
-}
-
-/** One of the demo's people, signed in. */
-export async function demoPerson(browser: Browser, role: Role, options: BrowserContextOptions = {}): Promise<Visitor> {
-  const visit = await openPage(browser, inject('productUrl'), options);
-  const { email, password } = DEMO_ACCOUNTS.find((account) => account.role === role)!;
-  const answer = await visit.page.request.post('/api/session', { data: { email, password } });
-  return { ...visit, studioId: studioIn(await answer.json()) };
-}
-
-function studioIn(body: unknown): string {
-  const studio = (body as Partial<Session>).studios?.[0];
-  if (studio === undefined) throw new Error(`The product did not let the test's person in: ${JSON.stringify(body)}`);
-  return studio.id;
-}
-
-/** A new 12 × 12 in spread of the visitor's, with that many 6 × 4 in prints on its table, and commands already run. */
-export async function laidSpread({ page, studioId }: Visitor, printCount: number, calls: (prints: readonly Print[]) => readonly CommandCall[] = () => []): Promise<SpreadDetail> {
-  const { request } = page;
-  const send = async (url: string, data: unknown): Promise<void> => {
-    const answer = await request.post(url, { data });
-    if (!answer.ok()) throw new Error(`${url} answered ${answer.status()}: ${await answer.text()}`);
-  };
-  const prints = await Promise.all(
-    Array.from({ length: printCount }, async (_, at) => {
-      const answer = await request.post(`/api/studios/${studioId}/prints`, { multipart: { file: await snapshot(at) } });
-      return ((await answer.json()) as { print: Print }).print;
-    }),
-  );
-  const albumId = randomUUID();
-  const spreadId = randomUUID();
-  await send(`/api/studios/${studioId}/albums`, { id: albumId, title: 'A year by the sea', formatId: '12x12in' });
-  await send(`/api/albums/${albumId}/spreads`, { id: spreadId, title: 'The pier' });
-  const { document, revision, trim } = await readSpread(page, spreadId);
-  const known = new Map(prints.map((print) => [print.id, print]));
-  let doc = document;
-  const edits = [{ id: 'table.add', args: { printIds: [...known.keys()] } } as const, ...calls(prints)].map((call) => {
-    const patch = runCommand(doc, call, { prints: known, trim, newId: randomUUID });
-    doc = applyPatch(doc, patch);
-    return { id: randomUUID(), command: call.id, patch };
-  });
-  await send(`/api/spreads/${spreadId}/edits`, { baseRevision: revision, edits: edits.filter(({ patch }) => Object.keys(patch).length > 0) });
-  return readSpread(page, spreadId);
-}
-
-/** A spread as the server has it. */
-export async function readSpread(page: WatchedPage['page'], spreadId: string): Promise<SpreadDetail> {
-  const answer = await page.request.get(`/api/spreads/${spreadId}`);
-  if (!answer.ok()) throw new Error(`The spread could not be read: ${answer.status()}`);
-  return (await answer.json()) as SpreadDetail;
-}
+/** One of the people of its demo. */
+export const demoPerson = (browser: Browser, role: Role, options: BrowserContextOptions = {}): Promise<Visitor> =>
+  signIn(browser, inject('productUrl'), DEMO_ACCOUNTS.find((account) => account.role === role)!, options);

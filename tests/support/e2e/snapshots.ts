@@ -40,7 +40,9 @@ export async function snapshot(at: number): Promise<Snapshot> {
     })
     .jpeg({ quality: 90 })
     .toBuffer();
-  return { name: `${name}.jpg`, mimeType: 'image/jpeg', buffer };
+  // From the ninth on the names come round again.
+  const round = Math.floor(at / SCENES.length);
+  return { name: `${round === 0 ? name : `${name} ${round + 1}`}.jpg`, mimeType: 'image/jpeg', buffer };
 }
 
 const WIDTH = 1500;
