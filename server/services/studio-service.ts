@@ -3,6 +3,7 @@ import type { z } from 'zod';
 import type { updateStudioSchema } from '../../shared/contracts/accounts';
 import { AppError } from '../../shared/errors';
 import type { Role, Target } from '../../shared/model/people';
+import { TRIM_SETTINGS } from '../../shared/model/trim-settings';
 import { MembershipEntity } from '../entities/membership-entity';
 import { StudioEntity } from '../entities/studio-entity';
 
@@ -37,7 +38,8 @@ export class StudioService {
     return memberships.flatMap(({ studio, role }) => (studio && !studio.hidden ? [{ studio, role }] : []));
   }
 
-  async update(studio: StudioEntity, { name, unit, trim }: UpdateStudio): Promise<StudioEntity> {
+  /** A trimmer that nobody has set follows the unit. */
+  async update(studio: StudioEntity, { name, unit, trim = trimForUnit(studio, unit) }: UpdateStudio): Promise<StudioEntity> {
     const changes = {
       ...(name !== undefined && { name }),
       ...(unit !== undefined && { unit }),
@@ -55,4 +57,10 @@ export class StudioService {
       order: { role: 'ASC', user: { name: 'ASC', id: 'ASC' } },
     });
   }
+}
+
+function trimForUnit({ unit: before, tolerance, finestMark }: StudioEntity, unit: UpdateStudio['unit']): UpdateStudio['trim'] {
+  const usual = TRIM_SETTINGS[before];
+  const isUsual = usual.tolerance === tolerance && usual.finestMark === finestMark;
+  return unit !== undefined && isUsual ? TRIM_SETTINGS[unit] : undefined;
 }

@@ -16,7 +16,7 @@ const SAME_COLOR = 3;
  */
 export const nothingShared = defineCheck({
   id: 'nothing-shared',
-  severity: 'fix',
+  severity: 'consider',
   basis: { kind: 'common-practice' },
   needsFilledPages: true,
   thresholds: {},

@@ -10,7 +10,7 @@ export const BALANCE_LIMIT = 18;
 /** The two pages' visual weights (`weighSpread`) differ by more than the limit. A single page has nothing to balance. */
 export const pagesUnequal = defineCheck({
   id: 'pages-unequal',
-  severity: 'fix',
+  severity: 'consider',
   basis: { kind: 'common-practice' },
   needsFilledPages: true,
   thresholds: { difference: { default: BALANCE_LIMIT, min: 4, max: 80, unit: 'points' } },

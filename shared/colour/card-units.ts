@@ -1,13 +1,13 @@
 import { cellRect, contentRect, matRect, revealOf } from '../geometry/grid';
-import { toPaper } from '../geometry/paper';
+import { neededOf } from '../geometry/keep-zone';
 import { placedPhotos, windowAtOwnSize, type PlacedPhoto } from '../geometry/placed-photos';
 import { area, bottom, boundingBox, contains, inset, overlaps, right } from '../geometry/rects';
 import type { Hex, MatId, PrintId, Side } from '../model/ids';
 import { inches } from '../model/length';
 import type { Print } from '../model/print';
 import type { Rect } from '../model/rect';
-import type { Mat, Scheme, SchemeRole, SpreadDocument } from '../model/spread';
-import { MIN_REVEAL, TRIM_SETTINGS_INCH } from '../model/trim-settings';
+import type { Mat, Scheme, SchemeRole, SpreadDocument, TrimSettings } from '../model/spread';
+import { MIN_REVEAL } from '../model/trim-settings';
 import { ciede2000 } from './ciede2000';
 import { contrastRatio } from './contrast';
 import { hexToLab } from './convert';
@@ -55,7 +55,7 @@ export function ownInner(doc: Pick<SpreadDocument, 'scheme'>, mat: Pick<Mat, 'in
 }
 
 /** All mats of the spread as units, in drawing order of their first mat, measured against the scheme's colours. */
-export function cardUnits(doc: SpreadDocument, prints: ReadonlyMap<PrintId, Print>, scheme: Scheme): CardUnit[] {
+export function cardUnits(doc: SpreadDocument, prints: ReadonlyMap<PrintId, Print>, trim: TrimSettings, scheme: Scheme): CardUnit[] {
   const photos = new Map(placedPhotos(doc, (id) => prints.get(id)).map((photo) => [photo.matId, photo]));
   const groups = new Map<string, Mat[]>();
   for (const mat of doc.mats) {
@@ -80,7 +80,7 @@ export function cardUnits(doc: SpreadDocument, prints: ReadonlyMap<PrintId, Prin
       card: cardSuitability(doc, mats, shown, carried, scheme),
       inner: carried,
       ownInnerHides: shown !== null && !fitsAll(mats, photos, prints, shown.color),
-      mayTakeInner: !own && mats.every((mat) => canTakeInner(doc, mat, photos.get(mat.id), prints.get(photos.get(mat.id)?.printId ?? ''))),
+      mayTakeInner: !own && mats.every((mat) => canTakeInner(doc, mat, photos.get(mat.id), prints.get(photos.get(mat.id)?.printId ?? ''), trim)),
       neighbours: lists.flatMap((others, k) => (k !== i && touch(doc, mats, others) ? [k] : [])),
     };
   });
@@ -147,7 +147,7 @@ function suitability(mat: Mat, photo: PlacedPhoto | undefined, prints: ReadonlyM
  * bottom edges, so it must leave enough of it, and the keep zone with it. Panes take none: it would move
  * their seams.
  */
-function canTakeInner(doc: SpreadDocument, mat: Mat, photo: PlacedPhoto | undefined, print: Print | undefined): boolean {
+function canTakeInner(doc: SpreadDocument, mat: Mat, photo: PlacedPhoto | undefined, print: Print | undefined, trim: TrimSettings): boolean {
   if (!photo || !print || photo.groupId !== null) return false;
   if (photo.placement.mode === 'whole') {
     const inner = inset(matRect(doc.format, mat), revealOf(mat, doc.reveal));
@@ -155,13 +155,10 @@ function canTakeInner(doc: SpreadDocument, mat: Mat, photo: PlacedPhoto | undefi
   }
   const left = inset(contentRect(doc.format, doc.reveal, { ...mat, inner: null }), MIN_REVEAL);
   if (left.width < MIN_PHOTO || left.height < MIN_PHOTO) return false;
-  if (!print.keepZone) return true;
-  const zone = inset(toPaper(print, print.keepZone), -TRIM_SETTINGS_INCH.tolerance);
-  const window = windowAtOwnSize(print, photo);
-  const { scaledWidth } = photo.placement;
-  const taken = 2 * MIN_REVEAL * (scaledWidth === null ? 1 : print.paperWidth / scaledWidth);
-  const narrower = { ...window, width: window.width - taken, height: window.height - taken };
-  return contains(narrower, zone) || !contains(window, zone);
+  const { window, placement } = photo;
+  const needed = neededOf(print, placement, trim.tolerance);
+  const narrower = { ...window, width: window.width - 2 * MIN_REVEAL, height: window.height - 2 * MIN_REVEAL };
+  return !needed || contains(narrower, needed) || !contains(window, needed);
 }
 
 /** True where some mat of one list shares an edge with, or lies on, some mat of the other. */

@@ -1,6 +1,6 @@
 import type { Hex, MatId, PrintId } from '../model/ids';
 import type { Print } from '../model/print';
-import type { Mat, Scheme, SchemeColor, SpreadDocument } from '../model/spread';
+import type { Mat, Scheme, SchemeColor, SpreadDocument, TrimSettings } from '../model/spread';
 import type { CommandArgs } from '../commands/calls';
 import { clamp } from '../geometry/clamp';
 import { assignCards, type CardRole } from './assign-cards';
@@ -13,6 +13,11 @@ import { photoColors, type PhotoColor } from './photo-colors';
 export interface SchemeInput {
   readonly doc: SpreadDocument;
   readonly prints: ReadonlyMap<PrintId, Print>;
+}
+
+export interface PlaceInput extends SchemeInput {
+  /** No inner mat may take a keep zone's tolerance. */
+  readonly trim: TrimSettings;
 }
 
 /** Photo colours with less chroma are neutrals and are kept apart from the rest. */
@@ -58,8 +63,8 @@ export function suggestSchemes({ doc, prints }: SchemeInput): Scheme[] {
  * on small mats of both pages. Deterministic. A mat's own inner mat stays, recoloured only where it hides
  * the photo; one that the last scheme put there is decided anew.
  */
-export function placeScheme({ doc, prints }: SchemeInput, scheme: Scheme): CommandArgs['scheme.apply'] {
-  const units = cardUnits(doc, prints, scheme);
+export function placeScheme({ doc, prints, trim }: PlaceInput, scheme: Scheme): CommandArgs['scheme.apply'] {
+  const units = cardUnits(doc, prints, trim, scheme);
   const before = new Map(doc.mats.map((mat) => [mat.id, mat]));
   const roles = assignCards(units);
   const matColors: Record<MatId, Hex> = {};

@@ -115,7 +115,7 @@ export function buildDemoSpreads(printByFile: ReadonlyMap<string, Print>, newId:
     run(newDocument(format, DEFAULT_BINDING, 'both'), { id: 'table.add', args: { printIds: files.map(idOf) } });
   const inScheme = (doc: SpreadDocument, index: number): SpreadDocument => {
     const scheme = suggestSchemes({ doc, prints })[index]!;
-    return run(doc, { id: 'scheme.apply', args: placeScheme({ doc, prints }, scheme) });
+    return run(doc, { id: 'scheme.apply', args: placeScheme({ doc, ...context }, scheme) });
   };
 
   /** The headland's four panes spread apart, so that the lighthouse stands whole in the third. */

@@ -19,6 +19,14 @@ describe('a studio’s things', () => {
     expect(body).toMatchObject({ name: 'Salt & Card', unit: 'mm', trim, role: 'owner' });
   });
 
+  it('settings: a trimmer that nobody has set follows the unit', async () => {
+    const person = await app().signUp();
+    const patch = (body: object) => person.agent.patch(`/api/studios/${person.studioId}`).send(body).expect(200);
+    expect((await patch({ unit: 'mm' })).body).toMatchObject({ unit: 'mm', trim: { tolerance: 240, finestMark: 160 } });
+    await patch({ trim: { tolerance: 320, finestMark: 160 } });
+    expect((await patch({ unit: 'in' })).body).toMatchObject({ unit: 'in', trim: { tolerance: 320, finestMark: 160 } });
+  });
+
   it('members: everybody with name and role, owners first', async () => {
     const reviewer = await app().join(owner.studioId, 'reviewer');
     const { body } = await owner.agent.get(inStudio('members')).expect(200);
@@ -49,6 +57,8 @@ describe('a studio’s things', () => {
     await owner.agent.post(inStudio('formats')).send({ ...format, width: 40_640 }).expect(409);
     await owner.agent.post(inStudio('formats')).send({ ...format, id: PAGE_FORMATS[0]!.id }).expect(409);
     await owner.agent.post(inStudio('formats')).send({ ...format, id: 'tiny', width: 2000 }).expect(400);
+    const short = { ...format, id: 'short', edge: 'bleed', minMargin: 0, height: format.height + 1 };
+    expect((await owner.agent.post(inStudio('formats')).send(short).expect(400)).body.fields).toMatchObject([{ path: 'edge' }]);
     const { body } = await owner.agent.get(inStudio('formats')).expect(200);
     expect(body.formats).toEqual([...PAGE_FORMATS, format]);
     await owner.agent.post(inStudio('albums')).send({ id: randomUUID(), title: 'Ours', formatId: 'ours' }).expect(201);

@@ -26,4 +26,9 @@ describe('the registry of checks', () => {
       (CHECKS[from].yieldsTo ?? []).flatMap((to) => (seen.includes(to) ? [to] : [to, ...reaches(to, [...seen, from])]));
     for (const id of CHECK_IDS) expect(reaches(id)).not.toContain(id);
   });
+
+  it('let taste never exceed "consider": what judges the filled spread is taste, a bare mat apart', () => {
+    const graver = CHECK_IDS.filter((id) => CHECKS[id].needsFilledPages && CHECKS[id].severity !== 'consider');
+    expect(graver).toEqual(['bare-mat']);
+  });
 });

@@ -9,6 +9,7 @@ import { placedPhotos } from '#shared/geometry/placed-photos';
 import { inches } from '#shared/model/length';
 import type { Print } from '#shared/model/print';
 import type { Mat, Scheme, SchemeRole, SpreadDocument } from '#shared/model/spread';
+import { TRIM_SETTINGS_INCH } from '#shared/model/trim-settings';
 import {
   buildMat,
   buildPanes,
@@ -131,7 +132,8 @@ const somePrints = fc
   .map((lists) => lists.map((hexes, i) => bands(i + 1, ...hexes)));
 
 describe('placeScheme', () => {
-  const applied = (doc: SpreadDocument, prints: readonly Print[], scheme: Scheme) => placeScheme(inputOf(doc, prints), scheme);
+  const applied = (doc: SpreadDocument, prints: readonly Print[], scheme: Scheme, trim = TRIM_SETTINGS_INCH) =>
+    placeScheme({ ...inputOf(doc, prints), trim }, scheme);
 
   it('never leaves a rim closer than CIEDE2000 12 to its mat where another of the scheme’s colours would do', () => {
     fc.assert(
@@ -191,6 +193,8 @@ describe('placeScheme', () => {
     expect(applied(spreadOf([tight]), [tight], scheme)).toMatchObject({ matColors: { [matIdOf(0)]: '#f6f2e8' } });
     expect(applied(spreadOf([tight]), [tight], scheme).inners).toBeUndefined();
     expect(applied(spreadOf([roomy]), [roomy], scheme).inners).toBeDefined();
+    // With 1/2 in to spare the same keep zone is as tight.
+    expect(applied(spreadOf([roomy]), [roomy], scheme, { ...TRIM_SETTINGS_INCH, tolerance: inches(1 / 2) }).inners).toBeUndefined();
   });
 
   it('asks nothing of card that does not show, and puts no inner mat on it', () => {

@@ -32,8 +32,8 @@ export function SchemeFan({ isEditable, onSources }: { isEditable: boolean; onSo
     [settled, prints, store],
   );
   const apply = (scheme: Scheme): void => {
-    const { doc, run } = store.getState();
-    run({ id: 'scheme.apply', args: placeScheme({ doc, prints: store.getState().prints }, scheme) });
+    const { run, ...state } = store.getState();
+    run({ id: 'scheme.apply', args: placeScheme(state, scheme) });
   };
   return (
     <section className="scheme-fan" aria-label="Colour schemes">
@@ -124,7 +124,7 @@ function SchemeBlock({ suggestion: { scheme, shares }, isInUse, isEditable, onAp
 function sharesOf(doc: SpreadDocument, scheme: Scheme, store: ReturnType<typeof useComposerStore>): Readonly<Record<SchemeRole, number>> {
   const { prints, trim } = store.getState();
   const context = { prints, trim, newId };
-  const applied = applyPatch(doc, runCommand(doc, { id: 'scheme.apply', args: placeScheme({ doc, prints }, scheme) }, context));
+  const applied = applyPatch(doc, runCommand(doc, { id: 'scheme.apply', args: placeScheme({ doc, prints, trim }, scheme) }, context));
   return visibleShares(applied, scheme);
 }
 
