@@ -1,5 +1,5 @@
 import { DndContext } from '@dnd-kit/core';
-import { lazy, Suspense, useEffect, useMemo, useState } from 'react';
+import { lazy, useEffect, useMemo, useState } from 'react';
 import type { Pile } from '#shared/contracts/prints';
 import type { PrintId } from '#shared/model/ids';
 import { toInches } from '#shared/model/length';
@@ -12,6 +12,7 @@ import { useComposeDrag } from '@/features/composer/hooks/use-compose-drag';
 import { stopOn, useJudgement, type Judgement } from '@/features/composer/hooks/use-judgement';
 import { RefusalLine, RefusalProvider } from '@/features/composer/hooks/use-run';
 import { useViewport } from '@/features/composer/hooks/use-viewport';
+import { AfterPages } from './after-pages';
 import { HeldPrint, type DropWords } from './held-print';
 import { NoteText } from './notes-margin';
 import { PileEdge } from './pile-edge';
@@ -73,9 +74,9 @@ export function ComposeScreen({ title, piles, mayEdit, sortHref }: ComposeScreen
           </section>
         ) : (
           <div className="table-edge">
-            <Suspense fallback={<div aria-busy="true" />}>
+            <AfterPages fallback={<div aria-busy="true" />}>
               <SchemeFan isEditable={isEditable} onSources={setSources} />
-            </Suspense>
+            </AfterPages>
             <PileEdge piles={piles} heldPrintId={held?.data.type === 'print' ? held.data.printId : null} isEditable={isEditable} sortHref={sortHref} marked={marked} />
           </div>
         )}

@@ -18,6 +18,7 @@ import { useComposer, useComposerStore } from '@/features/composer/hooks/compose
 import { isPrintDrag } from '@/features/composer/hooks/drag-data';
 import type { Held } from '@/features/composer/hooks/use-compose-drag';
 import { stopOn, type Judgement } from '@/features/composer/hooks/use-judgement';
+import { AfterPages } from './after-pages';
 import { BalanceBeam } from './balance-beam';
 import { MatControl } from './mat-control';
 import { NotesMargin } from './notes-margin';
@@ -140,11 +141,11 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
       </p>
       {isEditable && (
         <div className="table-foot">
-          <Suspense fallback={null}>
+          <AfterPages>
             {SIDES.map((side) => (
               <PageActions key={side} side={side} />
             ))}
-          </Suspense>
+          </AfterPages>
         </div>
       )}
     </div>
