@@ -3,6 +3,7 @@ import { mkdir, readdir, readFile, rm, writeFile } from 'node:fs/promises';
 import { join, resolve } from 'node:path';
 import { z } from 'zod';
 import { idSchema } from '../../shared/contracts/common';
+import { isRunning } from '../running-process';
 
 /** What an intake means to store; written before the first file is stored and removed after its row is. */
 const pendingSchema = z.object({ studioId: idSchema, sha256: z.string().regex(/^[0-9a-f]{64}$/) });
@@ -88,14 +89,7 @@ export async function sweepIncoming(parent: string, own: Incoming, undo: (pendin
 /** Ours is excluded before: a folder with our own number was left by an earlier process, as in a container. */
 function isAbandoned(name: string): boolean {
   const pid = Number(FOLDER_NAME.exec(name)?.[1]);
-  if (!Number.isInteger(pid)) return false;
-  if (pid === process.pid) return true;
-  try {
-    process.kill(pid, 0);
-    return false;
-  } catch (error) {
-    return error instanceof Error && 'code' in error && error.code === 'ESRCH';
-  }
+  return Number.isInteger(pid) && (pid === process.pid || !isRunning(pid));
 }
 
 /** A marker that the crash cut short names nothing: the first file is stored only after the marker is whole. */

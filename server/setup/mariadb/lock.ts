@@ -1,6 +1,7 @@
 import { readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { setTimeout as sleep } from 'node:timers/promises';
+import { isRunning, startOf } from '../../running-process';
 import { SetupFailure } from '../setup-failure';
 
 /** Who uses a data folder: the Pairleaf process, and the mariadbd that it started. */
@@ -80,29 +81,7 @@ function isDatabaseOver(pid: number, folder: string): boolean {
   }
 }
 
-function isAlive(pid: number, started: string | null): boolean {
-  try {
-    process.kill(pid, 0);
-  } catch (error) {
-    // EPERM: it lives, under another account.
-    if ((error as NodeJS.ErrnoException).code !== 'EPERM') return false;
-  }
-  // One that has ended keeps its id until its parent asks, which in a container may be never.
-  return started === null || (startOf(pid) === started && statOf(pid)[0] !== 'Z');
-}
-
-/** When a process started, in the kernel's ticks since boot (proc(5), field 22); null where there is no /proc. */
-const startOf = (pid: number): string | null => statOf(pid)[19] ?? null;
-
-/** proc(5)'s fields from the third on, which is the state; none where there is no /proc. */
-function statOf(pid: number): string[] {
-  try {
-    const stat = readFileSync(`/proc/${pid}/stat`, 'utf8');
-    // The name in field 2 may hold spaces, so count from its closing bracket.
-    return stat.slice(stat.lastIndexOf(')') + 2).split(' ');
-  } catch {
-    return [];
-  }
-}
+/** A process id can be given to another program, which started at another time. */
+const isAlive = (pid: number, started: string | null): boolean => isRunning(pid) && (started === null || startOf(pid) === started);
 
 const isExisting = (error: unknown): boolean => (error as NodeJS.ErrnoException).code === 'EEXIST';
