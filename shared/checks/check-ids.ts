@@ -10,6 +10,7 @@ export const CHECK_IDS = [
   'photo-sinks',
   'bare-mat',
   'pages-unequal',
+  'centre-off',
   'no-focal',
   'focals-same-place',
   'focals-same-size',

@@ -29,6 +29,8 @@ export interface NoteMessages {
   'photo-sinks': { title: string; share: number; matColor: Hex };
   'bare-mat': { fitting: number };
   'pages-unequal': { left: number; right: number; heavy: Side };
+  /** Towards which edge of the spread, and how far off its middle. */
+  'centre-off': { edge: Edge; off: number };
   'no-focal': Record<never, never>;
   'focals-same-place': Record<never, never>;
   'focals-same-size': { width: number; height: number };

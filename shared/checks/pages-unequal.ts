@@ -1,5 +1,6 @@
+import type { SpreadDocument } from '../model/spread';
 import { defineCheck, type Finding } from './check';
-import { weighSpread } from './weight';
+import { weighSpread, type SpreadWeights } from './weight';
 
 /**
  * Greatest difference of the pages' shares of 100 that is not noted: 41 against 59. The marks at the ends of
@@ -7,7 +8,11 @@ import { weighSpread } from './weight';
  */
 export const BALANCE_LIMIT = 18;
 
-/** The two pages' visual weights (`weighSpread`) differ by more than the limit. A single page has nothing to balance. */
+/** True where two pages' shares of the weight differ by more than the limit. A single page has nothing to balance. */
+export const isUneven = ({ pages }: SpreadDocument, { left, right }: SpreadWeights, limit: number = BALANCE_LIMIT): boolean =>
+  pages.left !== null && pages.right !== null && Math.abs(left - right) > limit;
+
+/** The two pages' visual weights (`weighSpread`) differ by more than the limit. */
 export const pagesUnequal = defineCheck({
   id: 'pages-unequal',
   severity: 'consider',
@@ -15,9 +20,9 @@ export const pagesUnequal = defineCheck({
   needsFilledPages: true,
   thresholds: { difference: { default: BALANCE_LIMIT, min: 4, max: 80, unit: 'points' } },
   find: (view, { difference }): Finding[] => {
-    if (!view.doc.pages.left || !view.doc.pages.right) return [];
-    const { left, right, mats } = weighSpread(view);
-    if (Math.abs(left - right) <= difference) return [];
+    const weights = weighSpread(view);
+    if (!isUneven(view.doc, weights, difference)) return [];
+    const { left, right, mats } = weights;
     const heavy = left > right ? 'left' : 'right';
     const onHeavy = view.doc.mats.filter((mat) => mat.page === heavy);
     const heaviest = onHeavy.reduce((a, b) => ((mats.get(b.id) ?? 0) > (mats.get(a.id) ?? 0) ? b : a));

@@ -1,4 +1,5 @@
 import { bareMat } from './bare-mat';
+import { centreOff } from './centre-off';
 import type { Check } from './check';
 import type { CheckId } from './check-ids';
 import { focalNotDominant } from './focal-not-dominant';
@@ -36,6 +37,7 @@ export const CHECKS: { readonly [Id in CheckId]: Check } = {
   'photo-sinks': photoSinks,
   'bare-mat': bareMat,
   'pages-unequal': pagesUnequal,
+  'centre-off': centreOff,
   'no-focal': noFocal,
   'focals-same-place': focalsSamePlace,
   'focals-same-size': focalsSameSize,

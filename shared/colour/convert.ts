@@ -75,7 +75,6 @@ export function xyzToOklab(x: number, y: number, z: number): Triple {
   return multiply(LMS_TO_OKLAB, Math.cbrt(l), Math.cbrt(m), Math.cbrt(s));
 }
 
-
 function xyzToLab(x: number, y: number, z: number): Triple {
   const fx = labCurve(x / WHITE_X);
   const fy = labCurve(y);
@@ -89,17 +88,11 @@ const labCurve = (t: number): number => (t > EPSILON ? Math.cbrt(t) : (KAPPA * t
 
 export const rgbToOklab = (r: number, g: number, b: number): Oklab => xyzToOklab(...rgbToXyz(r, g, b));
 export const hexToOklab = (hex: Hex): Oklab => rgbToOklab(...hexToRgb(hex));
-export const hexToLab = (hex: Hex): Lab => xyzToLab(...rgbToXyz(...hexToRgb(hex)));
+export const rgbToLab = (r: number, g: number, b: number): Lab => xyzToLab(...rgbToXyz(r, g, b));
+export const hexToLab = (hex: Hex): Lab => rgbToLab(...hexToRgb(hex));
 export const hexToOklch = (hex: Hex): Oklch => oklabToOklch(hexToOklab(hex));
 
-/** Lab D65 of an OKLab colour. */
-export function labFromOklab(l: number, a: number, b: number): Lab {
-  const lab: Triple = [0, 0, 0];
-  writeLab(l, a, b, lab, 0);
-  return lab;
-}
-
-/** The same, written to three places of `out` from `at` on: the checks ask for thousands while a mat is dragged. */
+/** Lab D65 of an OKLab colour, written to three places of `out` from `at` on: the checks ask for thousands while a mat is dragged. */
 export function writeLab(l: number, a: number, b: number, out: Float64Array | Triple, at: number): void {
   const n = OKLAB_TO_LMS;
   const m = LMS_TO_XYZ;

@@ -71,5 +71,3 @@ export function readPixel({ data }: OklabRaster, pixel: number, out: [number, nu
   out[2] = ((bits << 24) >> 24) / SCALE;
 }
 
-/** OKLab lightness, 0–1, of a decoded pixel: `at` is 3 × its index. */
-export const lightnessAt = ({ data }: DecodedRaster, at: number): number => (data[at]! + LIGHTNESS_OFFSET) / SCALE;

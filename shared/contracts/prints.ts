@@ -83,7 +83,6 @@ export const uploadedPrintSchema = z.object({ print: printSchema, known: z.boole
 export type UploadedPrint = z.infer<typeof uploadedPrintSchema>;
 
 export const printListSchema = z.object({ prints: z.array(printSchema), nextCursor: z.string().nullable() });
-export type PrintList = z.infer<typeof printListSchema>;
 
 export const pileSchema = z.object({
   id: idSchema,
@@ -96,9 +95,6 @@ export type Pile = z.infer<typeof pileSchema>;
 
 /** `pileId` and `binned` choose; prints in the bin are listed on their own. */
 export const printQuerySchema = pageQuerySchema.extend({ pileId: idSchema.optional(), binned: z.stringbool().default(false) });
-
-/** `data` of a 409 `stale-revision` on a print: how it stands now. */
-export const stalePrintSchema = z.object({ print: printSchema });
 
 export const pileListSchema = z.object({ piles: z.array(pileSchema) });
 

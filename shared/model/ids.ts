@@ -11,8 +11,6 @@ export type MatId = Id<'mat'>;
 export type PaneGroupId = Id<'pane-group'>;
 export type DetailId = Id<'detail'>;
 export type CutSizeId = Id<'cut-size'>;
-export type EditId = Id<'edit'>;
-export type JobId = Id<'job'>;
 export type GrantId = Id<'grant'>;
 
 /** Which of the two facing pages. */

@@ -1,7 +1,6 @@
 import type { SketchMat } from '../commands/calls';
 import { gridOf } from '../geometry/grid';
 import type { PageFormat } from '../model/page-format';
-import { sketchWords } from '../words/en/sketches';
 import type { Sketch } from './sketch';
 
 export const NINE_THIRDS = [
@@ -63,9 +62,6 @@ export function sketchFeatures(sketch: Sketch, format: PageFormat): SketchFeatur
     coverage: mats.reduce((sum, mat) => sum + cells(mat), 0) / (grid.columns * grid.rows),
   };
 }
-
-/** A sketch in plain words, its name behind them: `8 mats, big one left, one split in 6 · Milk Churn`. */
-export const describeSketch = (sketch: Sketch, format: PageFormat): string => `${sketchWords(sketchFeatures(sketch, format))} · ${sketch.name}`;
 
 /** The sketches that fit all that the filter says, in their order. */
 export function filterSketches(sketches: readonly Sketch[], format: PageFormat, filter: SketchFilter): Sketch[] {

@@ -1,11 +1,10 @@
-import { fireEvent, render, screen } from '@testing-library/react';
+import { fireEvent, render } from '@testing-library/react';
 import { beforeEach, describe, expect, it, vi } from 'vitest';
 import { inches } from '#shared/model/length';
 import type { Mat, SpreadDocument } from '#shared/model/spread';
 import { buildScene } from '#shared/scene/build-scene';
 import type * as PictureCover from '#shared/scene/picture-cover';
 import { SceneDrawing } from '@/components/scene/scene-drawing';
-import { SpreadThumbnail } from '@/components/scene/spread-thumbnail';
 import { buildMat, buildPrint, buildSpread, matIdOf, printContent, printIdOf, printsById } from '../support/builders';
 
 /** Ids of the prints whose photos were drawn, in order: one entry per drawing. */
@@ -108,17 +107,14 @@ describe('SceneDrawing', () => {
     expect(Number(card.getAttribute('x')) * perUnit).toBeCloseTo(23);
   });
 
+  it('leaves out cards’ thin edges in a miniature, and takes the small pictures', () => {
+    const { container } = render(<SceneDrawing scene={sceneOf(A, TITLE)} pictureSize="small" isMini />);
+    expect(container.querySelector('image')!.getAttribute('href')).toContain('/small');
+    expect(matGroup(container, A)!.querySelectorAll('path')).toHaveLength(0);
+  });
+
   it('holds no inline markup that a strict content security policy would refuse', () => {
     const { container } = render(<SceneDrawing scene={sceneOf(A, B, TITLE)} pictureSize="medium" />);
     expect(container.querySelectorAll('style, script, [onerror], [onload]')).toHaveLength(0);
-  });
-});
-
-describe('SpreadThumbnail', () => {
-  it('is one picture with a name, without cards’ thin edges', () => {
-    const { container } = render(<SpreadThumbnail doc={spreadOf(A, TITLE)} prints={PRINTS} label="Out to the light, two mats" />);
-    expect(screen.getByRole('img', { name: 'Out to the light, two mats' })).toBeDefined();
-    expect(container.querySelector('image')!.getAttribute('href')).toContain('/small');
-    expect(matGroup(container, A)!.querySelectorAll('path')).toHaveLength(0);
   });
 });

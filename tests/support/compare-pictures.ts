@@ -1,6 +1,6 @@
 import sharp, { type Sharp } from 'sharp';
 import { ciede2000 } from '#shared/colour/ciede2000';
-import { labFromOklab, rgbToOklab, type Lab } from '#shared/colour/convert';
+import { rgbToLab, type Lab } from '#shared/colour/convert';
 
 export interface PictureDifference {
   /** CIEDE2000 over all pixels. */
@@ -51,7 +51,7 @@ function labCache(): (rgb: number) => Lab {
   const known = new Map<number, Lab>();
   return (rgb) => {
     let lab = known.get(rgb);
-    if (!lab) known.set(rgb, (lab = labFromOklab(...rgbToOklab((rgb >> 16) & 255, (rgb >> 8) & 255, rgb & 255))));
+    if (!lab) known.set(rgb, (lab = rgbToLab((rgb >> 16) & 255, (rgb >> 8) & 255, rgb & 255)));
     return lab;
   };
 }

@@ -57,6 +57,7 @@ const SENTENCES: { readonly [Id in NoteMessageId]: (data: NoteMessages[Id], unit
   'bare-mat': ({ fitting }) =>
     fitting === 0 ? 'Bare mat. No print on the table fits it.' : `Bare mat. ${fitting === 1 ? 'One print on the table fits' : `${fitting} prints on the table fit`} it.`,
   'pages-unequal': ({ left, right, heavy }) => `The ${heavy} page weighs more: ${left} left against ${right} right.`,
+  'centre-off': ({ edge, off }, unit) => `The spread’s weight gathers towards the ${EDGES[edge]}, ${measure(off, unit)} off its middle.`,
   'no-focal': () => 'No picture leads. The eye wants one place to land on first.',
   'focals-same-place': () => 'Both focals stand at the same place of their pages, so neither leads. Move one.',
   'focals-same-size': ({ width, height }, unit) =>

@@ -1,7 +1,7 @@
-import type { BiggestSize, NineThird, OrientationMix, SketchFeatures } from '../../sketches/features';
+import type { NineThird, SketchFeatures } from '../../sketches/features';
 
 /** Where the biggest mat lies, as it follows "big one". */
-export const PLACE_WORDS: Readonly<Record<NineThird, string>> = {
+const PLACE_WORDS: Readonly<Record<NineThird, string>> = {
   'top-left': 'top left',
   'top-centre': 'at the top',
   'top-right': 'top right',
@@ -11,15 +11,6 @@ export const PLACE_WORDS: Readonly<Record<NineThird, string>> = {
   'bottom-left': 'bottom left',
   'bottom-centre': 'at the bottom',
   'bottom-right': 'bottom right',
-};
-
-export const BIGGEST_SIZE_WORDS: Readonly<Record<BiggestSize, string>> = { small: 'small', medium: 'middling', large: 'large' };
-
-export const ORIENTATION_WORDS: Readonly<Record<OrientationMix, string>> = {
-  flat: 'mostly flat',
-  upright: 'mostly upright',
-  mixed: 'flat and upright',
-  square: 'all square',
 };
 
 /** What a sketch is at a glance: `8 mats, big one left, one split in 6`. */

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { describeSketch, filterSketches, sketchFeatures } from '#shared/sketches/features';
+import { filterSketches, sketchFeatures } from '#shared/sketches/features';
+import { sketchWords } from '#shared/words/en/sketches';
 import { sketchesFor } from '#shared/sketches/catalogue';
 import { parseMats, type Sketch } from '#shared/sketches/sketch';
 import { formatOf } from '../../support/builders';
@@ -51,10 +52,10 @@ describe('filterSketches', () => {
   });
 });
 
-describe('describeSketch', () => {
+describe('the words for a sketch', () => {
   it.each([
-    ['0,4,10,14* 12,0,8,6 12,8,8,6', '3 mats, big one left · Milk Churn'],
-    ['4,4,14,14*', '1 mat, big one in the middle · Milk Churn'],
-    ['0,0,4,8a 4,0,4,8a 8,0,4,8a 2,14,6,8*', '4 mats, big one bottom left, one split in 3 · Milk Churn'],
-  ])('says of %s: %s', (notation, words) => expect(describeSketch(sketchOf(notation), twelve)).toBe(words));
+    ['0,4,10,14* 12,0,8,6 12,8,8,6', '3 mats, big one left'],
+    ['4,4,14,14*', '1 mat, big one in the middle'],
+    ['0,0,4,8a 4,0,4,8a 8,0,4,8a 2,14,6,8*', '4 mats, big one bottom left, one split in 3'],
+  ])('says of %s: %s', (notation, words) => expect(sketchWords(sketchFeatures(sketchOf(notation), twelve))).toBe(words));
 });
