@@ -8,20 +8,29 @@ import { KeepZoneEditor } from '@/features/prints/components/keep-zone-editor';
 const STEP = inches(1 / 16);
 const zone: Rect = { x: inches(1), y: inches(1), width: inches(2), height: inches(1) };
 
-function setUp(parts: { zone?: Rect | null; mayEdit?: boolean } = {}) {
+interface Parts {
+  readonly zone?: Rect | null;
+  readonly mayEdit?: boolean;
+}
+
+const setUp = (parts: Parts = {}) => setUpWith(parts).onSave;
+
+/** With a way to show another zone of the print. */
+function setUpWith(parts: Parts) {
   const onSave = vi.fn<(rect: Rect) => void>();
-  render(
+  const editor = (shown: Rect | null) => (
     <KeepZoneEditor
-      zone={parts.zone === undefined ? zone : parts.zone}
+      zone={shown}
       paper={{ width: inches(6), height: inches(4) }}
       unit="in"
       pxPerLength={100 / inches(1)}
       step={STEP}
       mayEdit={parts.mayEdit ?? true}
       onSave={onSave}
-    />,
+    />
   );
-  return onSave;
+  const { rerender } = render(editor(parts.zone === undefined ? zone : parts.zone));
+  return { onSave, show: (shown: Rect | null) => rerender(editor(shown)) };
 }
 
 describe('the keep zone by keyboard', () => {
@@ -36,7 +45,20 @@ describe('the keep zone by keyboard', () => {
     await userEvent.keyboard('{ArrowRight}');
     expect(onSave).toHaveBeenLastCalledWith({ ...zone, x: zone.x + STEP });
     await userEvent.keyboard('{Shift>}{ArrowUp}{/Shift}');
-    expect(onSave).toHaveBeenLastCalledWith({ ...zone, y: zone.y - 4 * STEP });
+    // It goes on from what was just stored, although that has not come back yet.
+    expect(onSave).toHaveBeenLastCalledWith({ ...zone, x: zone.x + STEP, y: zone.y - 4 * STEP });
+  });
+
+  it('shows what was stored until the print’s own zone changes, and then that one', async () => {
+    const { onSave, show } = setUpWith({});
+    screen.getByRole('button').focus();
+    await userEvent.keyboard('{ArrowDown}');
+    expect(onSave).toHaveBeenCalledOnce();
+    expect(screen.getByRole('button')).toHaveAccessibleName(/1 1\/16 from the top$/);
+    show({ ...zone, y: inches(2) }); // somebody else was quicker
+    expect(screen.getByRole('button')).toHaveAccessibleName(/2 from the top$/);
+    show(zone);
+    expect(screen.getByRole('button')).toHaveAccessibleName(/1 from the top$/);
   });
 
   it('is pulled at its right and lower edge with Alt', async () => {

@@ -19,7 +19,9 @@ const putPrint = (client: QueryClient, studioId: string, id: string, change: (pr
 export function useUpdatePrint(studioId: string) {
   const client = useQueryClient();
   const { queryKey } = printsQuery(studioId);
+  const mutationKey = ['prints', 'update', studioId];
   return useMutation({
+    mutationKey,
     // Saves queue up, so that each reads the revision that the one before it got.
     scope: { id: `prints:${studioId}` },
     mutationFn: ({ id, ...change }: PrintChange & { readonly id: string }) => {
@@ -27,11 +29,14 @@ export function useUpdatePrint(studioId: string) {
       return api.patch(`/prints/${id}`, printSchema, { ...change, baseRevision } satisfies UpdatePrint);
     },
     onMutate: async ({ id, ...change }) => {
-      await client.cancelQueries({ queryKey });
+      const cancelled = client.cancelQueries({ queryKey });
       putPrint(client, studioId, id, (print) => changePrint(print, change));
+      await cancelled;
     },
     onSuccess: (saved) => {
-      putPrint(client, studioId, saved.id, () => saved);
+      // While later changes wait for their turn, their guesses stand: only the revision is news.
+      const isLast = client.isMutating({ mutationKey }) === 1;
+      putPrint(client, studioId, saved.id, (print) => (isLast ? saved : { ...print, revision: saved.revision }));
       // An album's pictures carry their prints along: they must not keep the old size.
       return client.invalidateQueries({ queryKey: ['albums'] });
     },

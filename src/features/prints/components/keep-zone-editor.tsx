@@ -26,6 +26,12 @@ interface Gesture {
   readonly handle: Handle | null;
 }
 
+interface Stored {
+  readonly rect: Rect;
+  /** The print's zone when it was stored. */
+  readonly before: Rect | null;
+}
+
 /**
  * The keep zone as a rectangle on the paper: drawn, moved and pulled by pointer; with the focus on it, by
  * arrows. It is stored once, when the pointer or the key lets go.
@@ -33,7 +39,11 @@ interface Gesture {
 export function KeepZoneEditor({ zone, paper, unit, pxPerLength, step, mayEdit, onSave }: KeepZoneEditorProps) {
   const [gesture, setGesture] = useState<Gesture | null>(null);
   const [draft, setDraft] = useState<Rect | null>(null);
-  const shown = draft ?? zone;
+  const [stored, setStored] = useState<Stored | null>(null);
+  // What was stored shows until it comes back as the print's own zone; the next press of an arrow goes on from there.
+  const isNews = stored !== null && !isSame(stored.before, zone);
+  if (isNews) setStored(null);
+  const shown = draft ?? (isNews ? zone : (stored?.rect ?? zone));
   const least = step * LEAST_STEPS;
 
   const pointOf = (event: PointerEvent): { x: number; y: number } => {
@@ -55,7 +65,10 @@ export function KeepZoneEditor({ zone, paper, unit, pxPerLength, step, mayEdit, 
     else setDraft(pullZone(gesture.from, gesture.handle, dx, dy, paper, least));
   };
   const end = (): void => {
-    if (draft !== null) onSave(draft);
+    if (draft !== null) {
+      setStored({ rect: draft, before: zone });
+      onSave(draft);
+    }
     setGesture(null);
     setDraft(null);
   };
@@ -116,6 +129,9 @@ export function KeepZoneEditor({ zone, paper, unit, pxPerLength, step, mayEdit, 
     </div>
   );
 }
+
+const isSame = (a: Rect | null, b: Rect | null): boolean =>
+  a === b || (a !== null && b !== null && a.x === b.x && a.y === b.y && a.width === b.width && a.height === b.height);
 
 const ARROWS: Readonly<Record<string, readonly [x: number, y: number]>> = {
   ArrowLeft: [-1, 0],
