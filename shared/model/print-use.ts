@@ -18,15 +18,19 @@ export interface PrintUse {
  */
 export function printUses(doc: SpreadDocument): Map<PrintId, PrintUse[]> {
   const uses = new Map<PrintId, PrintUse[]>();
-  const add = (id: PrintId, ...more: PrintUse[]): void => void uses.set(id, [...(uses.get(id) ?? []), ...more]);
+  const usesOf = (id: PrintId): PrintUse[] => {
+    let list = uses.get(id);
+    if (!list) uses.set(id, (list = []));
+    return list;
+  };
   for (const mat of doc.mats) {
     const { content } = mat;
     if (content.kind !== 'print') continue;
     const window = windowOnPaper(content, contentRect(doc.format, doc.reveal, mat));
-    add(content.printId, { matIds: [mat.id], asked: content.mode === 'whole' ? { kind: 'all' } : { kind: 'piece', window } });
+    usesOf(content.printId).push({ matIds: [mat.id], asked: content.mode === 'whole' ? { kind: 'all' } : { kind: 'piece', window } });
   }
-  for (const group of doc.panes) if (group.content) add(group.content.printId, { matIds: group.matIds, asked: { kind: 'all' } });
-  for (const id of doc.table) add(id);
+  for (const group of doc.panes) if (group.content) usesOf(group.content.printId).push({ matIds: group.matIds, asked: { kind: 'all' } });
+  doc.table.forEach(usesOf);
   return uses;
 }
 
