@@ -1,3 +1,4 @@
+import { millimetres } from '../model/length';
 import type { Rect } from '../model/rect';
 import type { Content } from '../model/spread';
 import type { PlacedLine } from './lettering';
@@ -7,6 +8,8 @@ import { setLine, wrapText } from './text';
 const SIZE = 0.65;
 const BASELINE = 0.28;
 const RULE = 1 / 16;
+/** Nobody rules nearer lines by hand, and a page of them would take long to draw. */
+const NEAREST_RULES = millimetres(1);
 
 export interface JournalingLayout {
   readonly size: number;
@@ -21,7 +24,7 @@ export interface JournalingLayout {
  * beyond the last rule are not set but reported.
  */
 export function layoutJournaling(journaling: Pick<Extract<Content, { kind: 'journaling' }>, 'text' | 'lineHeight'>, rect: Rect): JournalingLayout {
-  const { lineHeight } = journaling;
+  const lineHeight = Math.max(journaling.lineHeight, NEAREST_RULES);
   const size = lineHeight * SIZE;
   const thickness = Math.round(lineHeight * RULE);
   const count = Math.floor(rect.height / lineHeight);

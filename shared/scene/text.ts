@@ -81,7 +81,34 @@ export function setLine(font: FontId, size: number, text: string): TextLine {
   return { text: known, xs, missing, width: x };
 }
 
-export const widthOf = (font: FontId, size: number, text: string): number => setLine(font, size, text).width;
+/** Where a pen stands, in the em's unit, and what it wrote last; null where that kerns with nothing. */
+interface Pen {
+  readonly x: number;
+  readonly before: string | null;
+}
+
+const LINE_START: Pen = { x: 0, before: null };
+
+/** The pen after more text: what `setLine` adds up, from anywhere in a line, so that a longer line need not be begun anew. */
+function write(font: FontId, size: number, pen: Pen, text: string): Pen {
+  const face = FACES[font];
+  const scale = size / face.metrics.unitsPerEm;
+  let { x, before } = pen;
+  for (const character of text) {
+    const advance = face.advance(character);
+    if (advance === undefined) {
+      x += missingBoxWidth(size);
+      before = null;
+      continue;
+    }
+    if (before !== null) x += face.kern(before, character) * scale;
+    x += advance * scale;
+    before = character;
+  }
+  return { x, before };
+}
+
+export const widthOf = (font: FontId, size: number, text: string): number => write(font, size, LINE_START, text).x;
 
 /**
  * Breaks text into lines no wider than `width`, at line ends and between words; an empty line stays a
@@ -97,16 +124,20 @@ export function wrapText(font: FontId, size: number, text: string, width: number
 function wrapParagraph(font: FontId, size: number, words: readonly string[], width: number, breakWords: boolean): string[] {
   const lines: string[] = [];
   let line = '';
+  let pen = LINE_START;
   for (const word of words) {
-    const longer = line === '' ? word : `${line} ${word}`;
-    if (widthOf(font, size, longer) <= width) {
-      line = longer;
+    const more = line === '' ? word : ` ${word}`;
+    const after = write(font, size, pen, more);
+    if (after.x <= width) {
+      line += more;
+      pen = after;
       continue;
     }
     if (line !== '') lines.push(line);
     const pieces = breakWords ? breakWord(font, size, word, width) : [word];
     lines.push(...pieces.slice(0, -1));
     line = pieces.at(-1)!;
+    pen = write(font, size, LINE_START, line);
   }
   return [...lines, line];
 }
@@ -115,12 +146,16 @@ function wrapParagraph(font: FontId, size: number, words: readonly string[], wid
 function breakWord(font: FontId, size: number, word: string, width: number): string[] {
   const pieces: string[] = [];
   let piece = '';
+  let pen = LINE_START;
   for (const character of word) {
-    if (piece !== '' && widthOf(font, size, piece + character) > width) {
+    let after = write(font, size, pen, character);
+    if (piece !== '' && after.x > width) {
       pieces.push(piece);
       piece = '';
+      after = write(font, size, LINE_START, character);
     }
     piece += character;
+    pen = after;
   }
   return [...pieces, piece];
 }
