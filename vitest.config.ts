@@ -37,7 +37,7 @@ export default defineConfig({
           globalSetup: ['tests/support/e2e/running-product.ts'],
           testTimeout: 120_000,
           hookTimeout: 180_000,
-          fileParallelism: false,
+          maxWorkers: 2,
         },
       },
       {
