@@ -1,8 +1,7 @@
 import { useDraggable } from '@dnd-kit/core';
-import { inset, intersection } from '#shared/geometry/rects';
-import { toPaper, turnInBox } from '#shared/geometry/paper';
+import { onPiece, paperOf, withSpare, zoneOf } from '#shared/geometry/keep-zone';
+import { bottom, right } from '#shared/geometry/rects';
 import type { PlacedPhoto } from '#shared/geometry/placed-photos';
-import { placedPaper } from '#shared/geometry/window';
 import { UNITS_PER_INCH } from '#shared/model/length';
 import type { Rect } from '#shared/model/rect';
 import type { Print } from '#shared/model/print';
@@ -66,29 +65,23 @@ const matSize = (rect: Rect, perInch: number) => ({
   height: Math.round((rect.height / perInch) * UNITS_PER_INCH),
 });
 
-/** The keep zone in page space, and the parts of it (with the cutting tolerance) that the window would cut away. */
-function keepOnPage(photo: PlacedPhoto, print: Print, trim: TrimSettings): { zone: Rect; lost: Rect[] } | null {
-  if (!print.keepZone) return null;
-  const paper = placedPaper(print, photo.placement);
-  const frame = { ...print, paperWidth: paper.width, paperHeight: paper.height };
-  const zone = toPaper(frame, print.keepZone);
+/** What the piece must hold, in page space, and the parts of it (with the cutting tolerance) that the window would cut away. */
+function keepOnPage({ placement, window, rect: box, groupId }: PlacedPhoto, print: Print, trim: TrimSettings): { zone: Rect; lost: Rect[] } | null {
+  const zone = zoneOf(print, placement);
+  if (!zone) return null;
   const place = (rect: Rect): Rect => {
-    const local = { ...rect, x: rect.x - photo.window.x, y: rect.y - photo.window.y };
-    const turned = turnInBox(local, photo.window, photo.placement.turn);
-    return { ...turned, x: turned.x + photo.rect.x, y: turned.y + photo.rect.y };
+    const piece = onPiece(rect, window, placement.turn);
+    return { ...piece, x: piece.x + box.x, y: piece.y + box.y };
   };
-  const placed = place(zone);
-  if (photo.placement.mode === 'whole' || photo.groupId) return { zone: placed, lost: [] };
-  const wanted = inset(placed, -trim.tolerance);
-  const box = photo.rect;
+  if (placement.mode === 'whole' || groupId) return { zone: place(zone), lost: [] };
+  const wanted = place(withSpare(zone, paperOf(print, placement), trim.tolerance));
   const bands: Rect[] = [
-    { x: wanted.x, y: wanted.y, width: box.x - wanted.x, height: wanted.height },
-    { x: box.x + box.width, y: wanted.y, width: wanted.x + wanted.width - box.x - box.width, height: wanted.height },
-    { x: wanted.x, y: wanted.y, width: wanted.width, height: box.y - wanted.y },
-    { x: wanted.x, y: box.y + box.height, width: wanted.width, height: wanted.y + wanted.height - box.y - box.height },
+    { ...wanted, width: box.x - wanted.x },
+    { ...wanted, x: right(box), width: right(wanted) - right(box) },
+    { ...wanted, height: box.y - wanted.y },
+    { ...wanted, y: bottom(box), height: bottom(wanted) - bottom(box) },
   ];
-  const onPaper = place({ x: 0, y: 0, width: paper.width, height: paper.height });
-  return { zone: placed, lost: bands.filter((r) => r.width > 0 && r.height > 0).flatMap((r) => intersection(r, onPaper) ?? []) };
+  return { zone: place(zone), lost: bands.filter(({ width, height }) => width > 0 && height > 0) };
 }
 
 function KeepZone({ zone, lost }: { zone: Rect; lost: readonly Rect[] }) {
@@ -106,8 +99,7 @@ function KeepZone({ zone, lost }: { zone: Rect; lost: readonly Rect[] }) {
 
 /** While the window slides, its whole print shows at 40 % under the hand, over the neighbours. */
 function WholePrint({ photo, print, onScreen }: { photo: PlacedPhoto; print: Print; onScreen: (rect: Rect) => Rect }) {
-  const paper = placedPaper(print, photo.placement);
-  const whole = turnInBox({ x: -photo.window.x, y: -photo.window.y, ...paper }, photo.window, photo.placement.turn);
+  const whole = onPiece(paperOf(print, photo.placement), photo.window, photo.placement.turn);
   const rect = onScreen({ ...whole, x: whole.x + photo.rect.x, y: whole.y + photo.rect.y });
   const turns = (print.turns + photo.placement.turn) % 4;
   const upright = turns % 2 === 0 ? rect : { ...rect, width: rect.height, height: rect.width };
