@@ -5,6 +5,7 @@ import type { Mat, Placement, SpreadDocument } from '../model/spread';
 import { contentRect } from './grid';
 import { inverseTurn, turnedSize, turnInBox } from './paper';
 import { paneWindow } from './panes';
+import { movedBy } from './rects';
 import { placedPaper, windowOnPaper } from './window';
 
 /** One visible piece of a print on the spread. */
@@ -83,7 +84,7 @@ function paneParts(doc: SpreadDocument): Map<MatId, PanePart> {
         groupId: group.id,
         placement: content,
         rect: photos[i]!,
-        window: { ...back, x: back.x + content.x, y: back.y + content.y },
+        window: movedBy(back, content),
       });
     });
   }

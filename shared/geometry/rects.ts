@@ -39,4 +39,5 @@ export function boundingBox(rects: readonly Rect[]): Rect {
   };
 }
 
-export const translate = (r: Rect, dx: number, dy: number): Rect => ({ ...r, x: r.x + dx, y: r.y + dy });
+/** `r` moved as its origin is: from the space that begins at `by` to the one that holds `by`. */
+export const movedBy = (r: Rect, by: { readonly x: number; readonly y: number }): Rect => ({ ...r, x: r.x + by.x, y: r.y + by.y });

@@ -1,6 +1,6 @@
 import { inkOn } from '../colour/contrast';
 import { contentRect, innerMatRect, matRect } from '../geometry/grid';
-import { inset } from '../geometry/rects';
+import { inset, movedBy } from '../geometry/rects';
 import type { Hex } from '../model/ids';
 import { inches } from '../model/length';
 import type { Rect } from '../model/rect';
@@ -21,7 +21,7 @@ const MISSING_STROKE_EM = 1 / 24;
 
 /** Everything that one mat shows, from its card upwards, in drawing order. */
 export function matItems(doc: SpreadDocument, mat: Mat, photo: PhotoItem | null, at: Rect): SceneItem[] {
-  const place = (rect: Rect): Rect => ({ ...rect, x: rect.x + at.x, y: rect.y + at.y });
+  const place = (rect: Rect): Rect => movedBy(rect, at);
   const inner = innerMatRect(doc.format, doc.reveal, mat);
   return [
     ...card(mat, 'card', place(matRect(doc.format, mat)), mat.color),

@@ -1,3 +1,4 @@
+import { movedBy } from '../geometry/rects';
 import type { Side } from '../model/ids';
 import type { Rect, Size } from '../model/rect';
 import type { SpreadDocument } from '../model/spread';
@@ -23,5 +24,5 @@ export function pageRects(doc: Pick<SpreadDocument, 'format' | 'binding' | 'page
 /** A rectangle in page space, moved to the scene; null where the spread has no such page. */
 export function toScene(pages: PageRects, side: Side, rect: Rect): Rect | null {
   const page = pages[side];
-  return page && { ...rect, x: rect.x + page.x, y: rect.y + page.y };
+  return page && movedBy(rect, page);
 }

@@ -1,10 +1,9 @@
-import { toPicture, turnInBox } from '../geometry/paper';
+import { onPiece, paperOf } from '../geometry/keep-zone';
+import { toPicture } from '../geometry/paper';
 import type { PlacedPhoto } from '../geometry/placed-photos';
-import { intersection } from '../geometry/rects';
-import { placedPaper } from '../geometry/window';
+import { intersection, movedBy } from '../geometry/rects';
 import type { Turns } from '../model/ids';
 import type { Print } from '../model/print';
-import type { Rect } from '../model/rect';
 import type { PhotoItem } from './scene';
 
 /**
@@ -18,12 +17,10 @@ import type { PhotoItem } from './scene';
  */
 export function photoItem(placed: PlacedPhoto, print: Print, at: { readonly x: number; readonly y: number }): PhotoItem | null {
   const { placement, window } = placed;
-  const paper = placedPaper(print, placement);
-  const visible = intersection(window, { x: 0, y: 0, ...paper });
+  const paper = paperOf(print, placement);
+  const visible = intersection(window, paper);
   if (!visible) return null;
-  const local = { ...visible, x: visible.x - window.x, y: visible.y - window.y };
-  const onPage = turnInBox(local, window, placement.turn);
-  const rect: Rect = { ...onPage, x: onPage.x + placed.rect.x + at.x, y: onPage.y + placed.rect.y + at.y };
+  const rect = movedBy(movedBy(onPiece(visible, window, placement.turn), placed.rect), at);
   const frame = { paperRect: print.paperRect, turns: print.turns, paperWidth: paper.width, paperHeight: paper.height };
   return {
     kind: 'photo',

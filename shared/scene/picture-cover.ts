@@ -1,5 +1,5 @@
 import { inverseTurn, turnedSize, turnInBox } from '../geometry/paper';
-import { intersection } from '../geometry/rects';
+import { intersection, movedBy } from '../geometry/rects';
 import type { Rect } from '../model/rect';
 import type { PhotoItem } from './scene';
 
@@ -32,6 +32,5 @@ export function pictureCover(photo: Omit<PhotoItem, 'kind' | 'key' | 'matId' | '
     width: shown.width * scaleX,
     height: shown.height * scaleY,
   };
-  const turned = turnInBox(upright, box, turns);
-  return { rect: { ...turned, x: turned.x + rect.x, y: turned.y + rect.y }, source: shown, isWhole };
+  return { rect: movedBy(turnInBox(upright, box, turns), rect), source: shown, isWhole };
 }

@@ -1,6 +1,6 @@
 import { useDraggable } from '@dnd-kit/core';
 import { onPiece, paperOf, withSpare, zoneOf } from '#shared/geometry/keep-zone';
-import { bottom, right } from '#shared/geometry/rects';
+import { bottom, movedBy, right } from '#shared/geometry/rects';
 import type { PlacedPhoto } from '#shared/geometry/placed-photos';
 import { UNITS_PER_INCH } from '#shared/model/length';
 import type { Rect } from '#shared/model/rect';
@@ -69,10 +69,7 @@ const matSize = (rect: Rect, perInch: number) => ({
 function keepOnPage({ placement, window, rect: box, groupId }: PlacedPhoto, print: Print, trim: TrimSettings): { zone: Rect; lost: Rect[] } | null {
   const zone = zoneOf(print, placement);
   if (!zone) return null;
-  const place = (rect: Rect): Rect => {
-    const piece = onPiece(rect, window, placement.turn);
-    return { ...piece, x: piece.x + box.x, y: piece.y + box.y };
-  };
+  const place = (rect: Rect): Rect => movedBy(onPiece(rect, window, placement.turn), box);
   if (placement.mode === 'whole' || groupId) return { zone: place(zone), lost: [] };
   const wanted = place(withSpare(zone, paperOf(print, placement), trim.tolerance));
   const bands: Rect[] = [
@@ -100,7 +97,7 @@ function KeepZone({ zone, lost }: { zone: Rect; lost: readonly Rect[] }) {
 /** While the window slides, its whole print shows at 40 % under the hand, over the neighbours. */
 function WholePrint({ photo, print, onScreen }: { photo: PlacedPhoto; print: Print; onScreen: (rect: Rect) => Rect }) {
   const whole = onPiece(paperOf(print, photo.placement), photo.window, photo.placement.turn);
-  const rect = onScreen({ ...whole, x: whole.x + photo.rect.x, y: whole.y + photo.rect.y });
+  const rect = onScreen(movedBy(whole, photo.rect));
   const turns = (print.turns + photo.placement.turn) % 4;
   const upright = turns % 2 === 0 ? rect : { ...rect, width: rect.height, height: rect.width };
   return (
