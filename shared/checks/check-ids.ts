@@ -4,6 +4,7 @@ export const CHECK_IDS = [
   'never-cut',
   'keep-zone-cut',
   'seam-through-keep-zone',
+  'panes-inseparable',
   'more-placements-than-copies',
   'print-smaller-than-photo',
   'whole-overhangs',

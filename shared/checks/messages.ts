@@ -22,6 +22,7 @@ export interface NoteMessages {
   'keep-zone-tight': { title: string; spare: number; tolerance: number; edge: Edge };
   'seam-behind': { title: string };
   'seam-apart': { title: string };
+  'panes-inseparable': { title: string };
   'more-placements': { title: string; needed: number; copies: number; elsewhere: number };
   'print-smaller': { title: string; print: number; photo: number; axis: Axis };
   'whole-overhangs': { title: string; over: number };

@@ -16,6 +16,7 @@ import { noJournaling } from './no-journaling';
 import { noTitle } from './no-title';
 import { nothingShared } from './nothing-shared';
 import { pagesUnequal } from './pages-unequal';
+import { panesInseparable } from './panes-inseparable';
 import { photoSinks } from './photo-sinks';
 import { printSmallerThanPhoto } from './print-smaller-than-photo';
 import { seamThroughKeepZone } from './seam-through-keep-zone';
@@ -31,6 +32,7 @@ export const CHECKS: { readonly [Id in CheckId]: Check } = {
   'never-cut': neverCut,
   'keep-zone-cut': keepZoneCut,
   'seam-through-keep-zone': seamThroughKeepZone,
+  'panes-inseparable': panesInseparable,
   'more-placements-than-copies': morePlacementsThanCopies,
   'print-smaller-than-photo': printSmallerThanPhoto,
   'whole-overhangs': wholeOverhangs,

@@ -108,6 +108,10 @@ export function differsInShape(print: Sized): boolean {
   return Math.abs(shapeDifference(image, { width: print.paperWidth, height: print.paperHeight })) > FILE_TOLERANCE;
 }
 
+/** True where the paper rectangle has the paper's own proportions, as near as lab crops keep them. */
+export const hasPaperShape = (print: Sized & Pick<Print, 'paperRect'>): boolean =>
+  Math.abs(shapeDifference(turnedSize(print.paperRect, print.turns), { width: print.paperWidth, height: print.paperHeight })) <= FILE_TOLERANCE;
+
 /** Papers that differ by less have one shape; a nudged paper rectangle fits both without stretching the picture to be seen. */
 const PAPER_TOLERANCE = 0.005;
 

@@ -1,7 +1,7 @@
 import type { FieldFault } from '../contracts/field-faults';
 import type { UpdatePrint } from '../contracts/prints';
 import { contains, intersection } from '../geometry/rects';
-import { automaticPaperRect, hasAutomaticPaperRect, sameShape, turnedSize } from '../geometry/paper';
+import { automaticPaperRect, hasAutomaticPaperRect, hasPaperShape, sameShape, turnedSize } from '../geometry/paper';
 import type { Print, PxRect } from './print';
 
 /** What a person sets on a print; the pile, the bin and the revision are the server's to check. */
@@ -42,6 +42,9 @@ export function printFaults(next: Print, changes: PrintChanges): FieldFault[] {
   const faults: FieldFault[] = [];
   if (changes.paperRect && (!shown || !isNear(image, next.paperRect))) {
     faults.push({ path: 'paperRect', message: 'the paper must show some of the picture, with at most one more picture of border on each side' });
+  }
+  if (changes.paperRect && !hasPaperShape(next)) {
+    faults.push({ path: 'paperRect', message: 'must have the proportions of the paper, or the picture would be stretched' });
   }
   const holdIn = (allowed: PxRect | null, rect: PxRect, path: string, where: string): void => {
     if (!allowed || !contains(allowed, rect)) faults.push({ path, message: `must lie inside ${where}` });

@@ -46,6 +46,7 @@ const SENTENCES: { readonly [Id in NoteMessageId]: (data: NoteMessages[Id], unit
       : `This cut leaves ${measure(spare, unit)} to spare by the keep zone of ${named(title)} at the ${EDGES[edge]}. ${measure(tolerance, unit)} is wanted.`,
   'seam-behind': ({ title }) => `A gap between the panes swallows part of the keep zone of ${named(title)}.`,
   'seam-apart': ({ title }) => `A cut between the panes goes through the keep zone of ${named(title)}.`,
+  'panes-inseparable': ({ title }) => `The panes of ${named(title)} lock into each other: no cuts from edge to edge part them.`,
   'more-placements': ({ title, needed, copies, elsewhere }) =>
     `${named(title)} is needed ${needed} times${elsewhere > 0 ? `, ${elsewhere} of them on other spreads` : ''}, and there ${copies === 1 ? 'is one copy' : `are ${copies} copies`}.`,
   'print-smaller': ({ title, print, photo, axis }, unit) =>

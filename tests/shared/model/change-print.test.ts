@@ -55,10 +55,11 @@ describe('faults of a changed print', () => {
   });
 
   it.each([
-    [{ x: -65, y: -65, width: 730, height: 530 }, []],
+    [{ x: -65, y: -43, width: 730, height: 487 }, []],
+    [{ x: -65, y: -65, width: 730, height: 530 }, ['paperRect']],
     [{ x: -600, y: -400, width: 1800, height: 1200 }, []],
     [{ x: -601, y: -400, width: 1800, height: 1200 }, ['paperRect']],
-    [{ x: 600, y: 0, width: 100, height: 100 }, ['paperRect']],
+    [{ x: 600, y: 0, width: 150, height: 100 }, ['paperRect']],
   ])('lets the paper %j reach past the picture within reason', (paperRect, expected) => {
     expect(faults({ paperRect })).toEqual(expected);
   });

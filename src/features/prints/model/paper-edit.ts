@@ -36,12 +36,15 @@ export const needsALook = (print: Print): boolean => hasAutomaticPaperRect(print
 /** The paper rectangle moved by whole pixels, in the oriented original. It may leave the image: there the paper is white. */
 export const movePaper = (rect: PxRect, dx: number, dy: number): PxRect => ({ ...rect, x: rect.x + Math.round(dx), y: rect.y + Math.round(dy) });
 
+/** No paper shows less of a file; of so few pixels a whole one still keeps the proportions near enough. */
+const LEAST_PX = 100;
+
 /** The paper rectangle grown about its middle by `factor`, in the paper's proportions. */
 export function growPaper(print: Pick<Print, 'paperRect' | 'paperWidth' | 'paperHeight' | 'turns'>, factor: number): PxRect {
   const { paperRect } = print;
   const shape = turnedSize({ width: print.paperWidth, height: print.paperHeight }, print.turns);
-  const width = Math.max(16, Math.round(paperRect.width * factor));
-  const height = Math.max(16, Math.round((width * shape.height) / shape.width));
+  const width = Math.max(LEAST_PX, Math.round(paperRect.width * factor));
+  const height = Math.round((width * shape.height) / shape.width);
   return {
     x: Math.round(paperRect.x + (paperRect.width - width) / 2),
     y: Math.round(paperRect.y + (paperRect.height - height) / 2),
