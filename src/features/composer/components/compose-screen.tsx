@@ -75,7 +75,7 @@ export function ComposeScreen({ title, piles, mayEdit, sortHref }: ComposeScreen
         ) : (
           <div className="table-edge">
             <AfterPages fallback={<div aria-busy="true" />}>
-              <SchemeFan isEditable={isEditable} onSources={setSources} />
+              <SchemeFan isEditable={isEditable} isHeld={held !== null} onSources={setSources} />
             </AfterPages>
             <PileEdge piles={piles} heldPrintId={held?.data.type === 'print' ? held.data.printId : null} isEditable={isEditable} sortHref={sortHref} marked={marked} />
           </div>

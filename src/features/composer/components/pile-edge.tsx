@@ -57,12 +57,12 @@ export function PileEdge({ piles, heldPrintId, isEditable, sortHref, marked }: P
               ))}
               {pile.ready.length === 0 && <li className="pile-empty">All placed</li>}
             </ul>
-            <h3 className="pile-name">
+            <h2 className="pile-name">
               {pile.name}
               <span className="num">
                 {pile.ready.length} of {pile.all}
               </span>
-            </h3>
+            </h2>
           </section>
         ))}
         {groups.length === 0 && (

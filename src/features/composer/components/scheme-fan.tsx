@@ -21,10 +21,17 @@ interface Suggestion {
   readonly shares: Readonly<Record<SchemeRole, number>>;
 }
 
+interface SchemeFanProps {
+  readonly isEditable: boolean;
+  /** Something is in the hand: what lies under it is only a preview, and no scheme is made from it. */
+  readonly isHeld: boolean;
+  readonly onSources: (printIds: readonly string[] | null) => void;
+}
+
 /** The three schemes for the prints on this spread, each applied at one press. */
-export function SchemeFan({ isEditable, onSources }: { isEditable: boolean; onSources: (printIds: readonly string[] | null) => void }) {
+export function SchemeFan({ isEditable, isHeld, onSources }: SchemeFanProps) {
   const store = useComposerStore();
-  const settled = useSettledDocument();
+  const settled = useSettledDocument(isHeld);
   const prints = useComposer((state) => state.prints);
   const inUse = useComposer((state) => state.doc.scheme);
   const suggestions = useMemo(
@@ -131,12 +138,13 @@ function sharesOf(doc: SpreadDocument, scheme: Scheme, store: ReturnType<typeof 
 const sameColors = (a: Scheme, b: Scheme): boolean => ROLES.every((role) => a.colors[role].hex === b.colors[role].hex);
 
 /** The document as it stood when the hand last rested: schemes are not worth a dropped frame. */
-function useSettledDocument(): SpreadDocument {
+function useSettledDocument(isHeld: boolean): SpreadDocument {
   const doc = useComposer((state) => state.doc);
   const [settled, setSettled] = useState(doc);
   useEffect(() => {
+    if (isHeld) return undefined;
     const timer = setTimeout(() => setSettled(doc), 250);
     return () => clearTimeout(timer);
-  }, [doc]);
+  }, [doc, isHeld]);
   return useDeferredValue(settled);
 }
