@@ -91,6 +91,7 @@ const FAULT_REASONS: Record<DocumentFaultCode, Reason> = {
   'pane-two-pages': 'on-two-pages',
   'unknown-print': 'no-such-print',
   'duplicate-id': 'nothing-to-do',
+  'print-listed-twice': 'nothing-to-do',
   'pane-member-missing': 'nothing-to-do',
   'pane-content-differs': 'nothing-to-do',
   'pane-in-two-groups': 'nothing-to-do',

@@ -12,6 +12,7 @@ export const DOCUMENT_FAULT_CODES = [
   'page-missing',
   'duplicate-id',
   'unknown-print',
+  'print-listed-twice',
   'true-size-too-large',
   'no-room-for-photo',
   'no-room-for-inner-mat',
@@ -73,6 +74,9 @@ function wholeFaults(doc: SpreadDocument): DocumentFault[] {
     if (seen.has(id)) faults.push(fault('duplicate-id', doc.mats.some((mat) => mat.id === id) ? [id] : [], { id }));
     seen.add(id);
   }
+  const listed = new Set<PrintId>();
+  const twice = doc.table.find((id) => listed.has(id) || !listed.add(id));
+  if (twice !== undefined) faults.push(fault('print-listed-twice', [], { printId: twice }));
   const late = doc.mats.find((mat, i) => i > 0 && inDrawingOrder(doc.mats[i - 1]!, mat) > 0);
   if (late) faults.push(fault('out-of-order', [late.id]));
   return faults;

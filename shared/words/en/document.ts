@@ -14,6 +14,8 @@ export function faultSentence(fault: DocumentFault): string {
       return `Two things in the spread have the same id (${data.id}): give one of them a new one.`;
     case 'unknown-print':
       return `There is no print ${data.printId} in this studio: take it off the spread, or upload it first.`;
+    case 'print-listed-twice':
+      return `The table lists the print ${data.printId} twice: leave one of them out.`;
     case 'true-size-too-large':
       return "A mat's true size is larger than its place on the grid: choose a smaller size, or give the mat more steps.";
     case 'no-room-for-photo':

@@ -58,7 +58,8 @@ describe('ciede2000', () => {
       fc.property(labs, labs, (p, q) => {
         // colorjs measures in Lab D50; the formula itself does not know the white.
         const theirs = new Color('lab', [...p]).deltaE(new Color('lab', [...q]), '2000');
-        expect(ciede2000(p, q)).toBeCloseTo(theirs, 6);
+        // It also takes the faintest chroma for none (its LCH), by which near-greys differ in the seventh digit.
+        expect(ciede2000(p, q)).toBeCloseTo(theirs, 5);
       }),
     );
   });

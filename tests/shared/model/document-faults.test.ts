@@ -77,6 +77,7 @@ describe('a faulty document', () => {
 
   it('has an id twice', () => {
     expect(codesOf(buildSpread({ mats: [buildMat({ id: A }), buildMat({ id: A, page: 'right' })] }))).toContain('duplicate-id');
+    expect(codesOf(buildSpread({ table: [print.id, print.id] }))).toEqual(['print-listed-twice']);
   });
 
   it('has mats out of drawing order', () => {
