@@ -1,3 +1,4 @@
+import { isIP } from 'node:net';
 import { z } from 'zod';
 
 const MEBIBYTE = 1024 * 1024;
@@ -19,6 +20,16 @@ const limitsSchema = z.object({
   FREE_DISK_BYTES: z.coerce.number().int().nonnegative().default(512 * MEBIBYTE),
 });
 
+const NAMED_NETWORKS = ['loopback', 'linklocal', 'uniquelocal'];
+
+/** Whether Express's `trust proxy` takes it: a name, an address, or an address with the length of its subnet's prefix. */
+function isNetwork(text: string): boolean {
+  if (NAMED_NETWORKS.includes(text)) return true;
+  const [address = '', bits = '1', ...rest] = text.split('/');
+  const longest = { 0: 0, 4: 32, 6: 128 }[isIP(address)] ?? 0;
+  return rest.length === 0 && /^\d+$/.test(bits) && Number(bits) >= 1 && Number(bits) <= longest;
+}
+
 const envSchema = limitsSchema.extend({
   DATABASE_URL: z.url({ protocol: /^(mariadb|mysql)$/ }),
   PORT: z.coerce.number().int().min(0).max(65_535).default(3000),
@@ -26,7 +37,11 @@ const envSchema = limitsSchema.extend({
   PAIRLEAF_MODE: z.enum(['demo', 'production']).default('demo'),
   DATA_DIR: z.string().min(1).default('.data'),
   /** Addresses or subnets of the proxies in front, comma separated; `loopback` and `uniquelocal` work too. */
-  TRUSTED_PROXIES: z.string().default(''),
+  TRUSTED_PROXIES: z
+    .string()
+    .default('')
+    .transform((list) => list.split(',').map((part) => part.trim()).filter((part) => part !== ''))
+    .pipe(z.array(z.string().refine(isNetwork, 'give an address such as 10.0.0.2, a subnet such as 10.0.0.0/8, or loopback'))),
   /** Signs the session cookie; setup keeps a random one under `.data`. */
   SESSION_SECRET: z.string().min(32),
   LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'silent']).default('warn'),
@@ -58,7 +73,7 @@ export interface Config {
 }
 
 /** Only the machine itself can reach these. */
-const isLoopback = (host: string): boolean => host === 'localhost' || host === '::1' || /^127(\.\d{1,3}){3}$/.test(host);
+const isLoopback = (host: string): boolean => host === 'localhost' || host === '::1' || (isIP(host) === 4 && host.startsWith('127.'));
 
 /**
  * Settings from the environment; the only place that reads it.
@@ -84,7 +99,7 @@ export function readConfig(env: Readonly<Record<string, string | undefined>> = p
     host: values.HOST,
     mode: values.PAIRLEAF_MODE,
     dataDir: values.DATA_DIR,
-    trustedProxies: values.TRUSTED_PROXIES.split(',').map((part) => part.trim()).filter((part) => part !== ''),
+    trustedProxies: values.TRUSTED_PROXIES,
     sessionSecret: values.SESSION_SECRET,
     logLevel: values.LOG_LEVEL,
     limits: {

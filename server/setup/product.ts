@@ -6,6 +6,7 @@ import { buildPages } from './build-pages';
 import { DEMO_ACCOUNTS } from './demo/accounts';
 import { clearHalfLoadedDemo } from './demo/half-loaded';
 import { loadDemoWhereEmpty } from './demo/load-where-empty';
+import { asListenFailure, portTaken } from './listen-failure';
 import { isPortFree } from './mariadb/ports';
 import { startPrivateMariadb } from './mariadb/private-mariadb';
 import { migrate } from './migrate';
@@ -55,7 +56,10 @@ export async function startProduct({ env, withPages, onProgress, onLost, onOpene
   const app = await openApp(config, { demoAccounts: DEMO_ACCOUNTS, ...(!withPages && { pagesDir: null }) });
   onOpened(app.close);
   if (config.mode === 'demo') await loadDemoWhereEmpty(app.deps, onProgress);
-  return { url: await app.listen(), config };
+  const url = await app.listen().catch((error: unknown) => {
+    throw asListenFailure(error, config);
+  });
+  return { url, config };
 }
 
 /** The settings, with a stand-in for the address of a database that is yet to be started. */
@@ -71,8 +75,5 @@ function checkSettings(env: Environment): Config {
 
 async function checkPort({ port, host }: Config): Promise<void> {
   if (port === 0 || host !== '127.0.0.1' || (await isPortFree(port))) return;
-  throw new SetupFailure(
-    `Port ${port} of this machine is taken by another program.`,
-    `Stop that program, or choose another port: PORT=${port + 100} npm start`,
-  );
+  throw portTaken(port);
 }

@@ -8,7 +8,7 @@ describe('the settings', () => {
     expect(readConfig(ENV)).toMatchObject({ mode: 'demo', host: '127.0.0.1', port: 3000, dataDir: '.data', trustedProxies: [] });
   });
 
-  it.each(['0.0.0.0', '192.168.1.4', '::', 'example.org', '127.0.0.1.example.org'])('refuse demo mode on %s', (host) => {
+  it.each(['0.0.0.0', '192.168.1.4', '::', 'example.org', '127.0.0.1.example.org', '127.999.0.1'])('refuse demo mode on %s', (host) => {
     expect(() => readConfig({ ...ENV, HOST: host })).toThrow(/known passwords.*PAIRLEAF_MODE=production/);
     expect(readConfig({ ...ENV, HOST: host, PAIRLEAF_MODE: 'production' }).host).toBe(host);
   });
@@ -17,14 +17,23 @@ describe('the settings', () => {
     expect(readConfig({ ...ENV, HOST: host }).mode).toBe('demo');
   });
 
+  it.each([
+    ['a name', 'proxy.example.org'],
+    ['a subnet that is too long', '10.0.0.0/33'],
+    ['no address', '10.0.0'],
+    ['one of several', 'loopback,10.0.0.1,everybody'],
+  ])('refuse %s as a trusted proxy, and say which', (_name, proxies) => {
+    expect(() => readConfig({ ...ENV, TRUSTED_PROXIES: proxies })).toThrow(/TRUSTED_PROXIES\.\d: give an address/);
+  });
+
   it('name every variable that does not fit', () => {
     const read = () => readConfig({ ...ENV, PORT: 'eighty', PAIRLEAF_MODE: 'test', SESSION_SECRET: 'short', DATABASE_URL: 'postgres://x' });
     expect(read).toThrow(/DATABASE_URL[^]*PORT[^]*PAIRLEAF_MODE[^]*SESSION_SECRET/);
   });
 
   it('read the proxies and the limits', () => {
-    const config = readConfig({ ...ENV, TRUSTED_PROXIES: ' loopback, 10.0.0.0/8 ,', SIGN_IN_PER_ACCOUNT: '3' });
-    expect(config.trustedProxies).toEqual(['loopback', '10.0.0.0/8']);
+    const config = readConfig({ ...ENV, TRUSTED_PROXIES: ' loopback, 10.0.0.0/8, 192.0.2.7, 2001:db8::/32 ,', SIGN_IN_PER_ACCOUNT: '3' });
+    expect(config.trustedProxies).toEqual(['loopback', '10.0.0.0/8', '192.0.2.7', '2001:db8::/32']);
     expect(config.limits.signInPerAccount).toBe(3);
   });
 });
