@@ -1,7 +1,7 @@
 import { cellRect, contentRect, matRect, revealOf } from '../geometry/grid';
 import { neededOf } from '../geometry/keep-zone';
 import { placedPhotos, windowAtOwnSize, type PlacedPhoto } from '../geometry/placed-photos';
-import { area, bottom, boundingBox, contains, inset, overlaps, right } from '../geometry/rects';
+import { area, bottom, boundingBox, centre, contains, inset, overlaps, right } from '../geometry/rects';
 import type { Hex, MatId, PrintId, Side } from '../model/ids';
 import { inches } from '../model/length';
 import type { Print } from '../model/print';
@@ -11,7 +11,9 @@ import { MIN_REVEAL } from '../model/trim-settings';
 import { ciede2000 } from './ciede2000';
 import { contrastRatio } from './contrast';
 import { hexToLab } from './convert';
+import type { Point } from './hull';
 import { RIM_DELTA_E, rimContrast, standsOut } from './rim';
+import { shownCard } from './shares';
 
 const ROLES: readonly SchemeRole[] = ['base', 'main', 'second', 'accent'];
 /** WCAG 2.2, 1.4.3: text against its ground. */
@@ -25,14 +27,22 @@ export interface Suitability {
   readonly fits: boolean;
   /** The least difference, CIEDE2000; 100 where nothing is carried. */
   readonly distance: number;
+  /** The least difference of lightness, L*; 100 where nothing is carried. */
+  readonly tone: number;
+  /** The largest share of a photo's rim that is too close, 0–1. */
+  readonly closeShare: number;
 }
 
 /** Mats that take one colour together: a single mat, or all panes of a split print. */
 export interface CardUnit {
   readonly mats: readonly Mat[];
   readonly page: Side;
-  readonly box: Rect;
+  /** Middle of its bounding box on the spread, from the left page's corner. */
+  readonly centre: Point;
+  /** Of its mats, square Lengths. */
   readonly area: number;
+  /** Of its card that shows, whatever its colour. */
+  readonly shown: number;
   readonly isFocal: boolean;
   readonly kind: Mat['content']['kind'];
   /** How a colour suits it as card. */
@@ -54,7 +64,10 @@ export function ownInner(doc: Pick<SpreadDocument, 'scheme'>, mat: Pick<Mat, 'in
   return ROLES.some((role) => doc.scheme!.colors[role].hex === color) ? null : mat.inner;
 }
 
-/** All mats of the spread as units, in drawing order of their first mat, measured against the scheme's colours. */
+/**
+ * All mats of the spread as units, measured against the scheme's colours. In the order of their mats' ids, so that
+ * a spread and its mirror image are judged in the same order.
+ */
 export function cardUnits(doc: SpreadDocument, prints: ReadonlyMap<PrintId, Print>, trim: TrimSettings, scheme: Scheme): CardUnit[] {
   const photos = new Map(placedPhotos(doc, (id) => prints.get(id)).map((photo) => [photo.matId, photo]));
   const groups = new Map<string, Mat[]>();
@@ -64,7 +77,10 @@ export function cardUnits(doc: SpreadDocument, prints: ReadonlyMap<PrintId, Prin
     if (group) group.push(mat);
     else groups.set(key, [mat]);
   }
-  const lists = [...groups.values()];
+  const lists = [...groups.values()]
+    .map((mats) => [...mats].sort((a, b) => (a.id < b.id ? -1 : 1)))
+    .sort(([a], [b]) => (a!.id < b!.id ? -1 : 1));
+  const cardShown = shownCard({ ...doc, mats: doc.mats.map((mat) => ({ ...mat, inner: ownInner(doc, mat) })) }, prints);
   return lists.map((mats, i) => {
     const own = ownInner(doc, mats[0]!);
     // An inner mat without a reveal lies wholly under the photo: the card still meets it.
@@ -73,8 +89,9 @@ export function cardUnits(doc: SpreadDocument, prints: ReadonlyMap<PrintId, Prin
     return {
       mats: mats.map((mat) => ({ ...mat, inner: ownInner(doc, mat) })),
       page: mats[0]!.page,
-      box: boundingBox(mats.map((mat) => matRect(doc.format, mat))),
+      centre: centreOnSpread(doc, mats),
       area: mats.reduce((sum, mat) => sum + area(matRect(doc.format, mat)), 0),
+      shown: mats.reduce((sum, mat) => sum + (cardShown.get(mat.id) ?? 0), 0),
       isFocal: mats.some((mat) => mat.focal),
       kind: mats[0]!.content.kind,
       card: cardSuitability(doc, mats, shown, carried, scheme),
@@ -96,8 +113,18 @@ function suitabilities(
 ): RoleSuitability {
   return eachRole(scheme, (hex) => {
     const parts = mats.map((mat) => suitability(mat, photos.get(mat.id), prints, hex));
-    return { fits: parts.every(({ fits }) => fits), distance: Math.min(...parts.map(({ distance }) => distance)) };
+    return {
+      fits: parts.every(({ fits }) => fits),
+      distance: Math.min(...parts.map(({ distance }) => distance)),
+      tone: Math.min(...parts.map(({ tone }) => tone)),
+      closeShare: Math.max(...parts.map(({ closeShare }) => closeShare)),
+    };
   });
+}
+
+function centreOnSpread(doc: SpreadDocument, mats: readonly Mat[]): Point {
+  const middle = centre(boundingBox(mats.map((mat) => matRect(doc.format, mat))));
+  return mats[0]!.page === 'right' && doc.pages.left ? { x: middle.x + doc.format.width + doc.binding.gap, y: middle.y } : middle;
 }
 
 const fitsAll = (mats: readonly Mat[], photos: ReadonlyMap<MatId, PlacedPhoto>, prints: ReadonlyMap<PrintId, Print>, hex: Hex): boolean =>
@@ -117,22 +144,24 @@ const against = (color: Hex, scheme: Scheme): RoleSuitability => eachRole(scheme
 
 function apart(color: Hex, hex: Hex): Suitability {
   const distance = ciede2000(hexToLab(color), hexToLab(hex));
-  return { fits: distance >= RIM_DELTA_E, distance };
+  return { fits: distance >= RIM_DELTA_E, distance, tone: toneBetween(color, hex), closeShare: 0 };
 }
 
-const NOTHING_CARRIED: Suitability = { fits: true, distance: 100 };
+const toneBetween = (a: Hex, b: Hex): number => Math.abs(hexToLab(a)[0] - hexToLab(b)[0]);
+
+const NOTHING_CARRIED: Suitability = { fits: true, distance: 100, tone: 100, closeShare: 0 };
 
 function suitability(mat: Mat, photo: PlacedPhoto | undefined, prints: ReadonlyMap<PrintId, Print>, hex: Hex): Suitability {
   const print = photo && prints.get(photo.printId);
   if (photo && print) {
     const contrast = rimContrast(print, windowAtOwnSize(print, photo), hex);
-    return { fits: standsOut(contrast), distance: contrast.medianDeltaE };
+    return { fits: standsOut(contrast), distance: contrast.medianDeltaE, tone: contrast.toneDifference, closeShare: contrast.closeShare };
   }
   const { content } = mat;
   switch (content.kind) {
     case 'lettering':
     case 'journaling':
-      return { fits: contrastRatio(content.color, hex) >= TEXT_CONTRAST, distance: ciede2000(hexToLab(content.color), hexToLab(hex)) };
+      return { ...apart(content.color, hex), fits: contrastRatio(content.color, hex) >= TEXT_CONTRAST };
     case 'paper':
       return apart(content.ground, hex);
     case 'embellishment':

@@ -2,7 +2,7 @@ import { clamp } from '../geometry/clamp';
 import { toPicture } from '../geometry/paper';
 import { placedPhotos, windowAtOwnSize } from '../geometry/placed-photos';
 import { area } from '../geometry/rects';
-import type { PrintId } from '../model/ids';
+import type { MatId, PrintId } from '../model/ids';
 import type { Print } from '../model/print';
 import type { Rect } from '../model/rect';
 import type { SpreadDocument } from '../model/spread';
@@ -20,6 +20,11 @@ export interface PhotoColor {
   readonly weight: number;
   /** Prints it comes from, strongest first. */
   readonly printIds: readonly PrintId[];
+}
+
+export interface PhotoColorOptions {
+  /** Skin in marked faces counts like any other colour; left out unless asked. */
+  readonly withSkin?: boolean;
 }
 
 interface SeenPart {
@@ -50,8 +55,8 @@ const VIVID_SHARE = 0.15;
  * prints lying ready, by paper area, where none is placed. Heaviest first; empty without prints. The
  * result depends only on the prints' rasters and windows.
  */
-export function photoColors(doc: SpreadDocument, prints: ReadonlyMap<PrintId, Print>): PhotoColor[] {
-  const colors = gather(seenParts(doc, prints));
+export function photoColors(doc: SpreadDocument, prints: ReadonlyMap<PrintId, Print>, { withSkin = false }: PhotoColorOptions = {}): PhotoColor[] {
+  const colors = gather(seenParts(doc, prints), withSkin);
   const total = colors.reduce((sum, { weight }) => sum + weight, 0);
   if (total === 0) return [];
   return groupColors(colors, MOST_GROUPS).map((group) => ({
@@ -63,18 +68,19 @@ export function photoColors(doc: SpreadDocument, prints: ReadonlyMap<PrintId, Pr
 }
 
 function seenParts(doc: SpreadDocument, prints: ReadonlyMap<PrintId, Print>): SeenPart[] {
-  const placed = placedPhotos(doc, (id) => prints.get(id)).flatMap((photo): SeenPart[] => {
+  const placed = placedPhotos(doc, (id) => prints.get(id)).flatMap((photo): (SeenPart & { readonly matId: MatId })[] => {
     const print = prints.get(photo.printId);
-    return print ? [{ print, source: toPicture(print, windowAtOwnSize(print, photo)), weight: area(photo.rect) }] : [];
+    return print ? [{ matId: photo.matId, print, source: toPicture(print, windowAtOwnSize(print, photo)), weight: area(photo.rect) }] : [];
   });
-  if (placed.length > 0) return placed;
+  // By id, so that a mirrored spread adds up its photos in the same order.
+  if (placed.length > 0) return placed.sort((a, b) => (a.matId < b.matId ? -1 : 1));
   return doc.table.flatMap((id): SeenPart[] => {
     const print = prints.get(id);
     return print ? [{ print, source: print.paperRect, weight: print.paperWidth * print.paperHeight }] : [];
   });
 }
 
-function gather(parts: readonly SeenPart[]): SeenColor[] {
+function gather(parts: readonly SeenPart[], withSkin: boolean): SeenColor[] {
   const cubes = new Map<number, { sum: [number, number, number]; weight: number; byPrint: Map<PrintId, number> }>();
   for (const { print, source, weight } of parts) {
     const pixels = decodeRaster(print.raster);
@@ -85,6 +91,7 @@ function gather(parts: readonly SeenPart[]): SeenColor[] {
     const endX = Math.max(left + 1, Math.min(pixels.width, Math.ceil((source.x + source.width) * scaleX)));
     const endY = Math.max(top + 1, Math.min(pixels.height, Math.ceil((source.y + source.height) * scaleY)));
     const stride = Math.max(1, Math.ceil(Math.sqrt(((endX - left) * (endY - top)) / SAMPLES_PER_PHOTO)));
+    const faces = withSkin ? [] : print.faces.map(({ rect }) => ({ left: rect.x * scaleX, top: rect.y * scaleY, right: (rect.x + rect.width) * scaleX, bottom: (rect.y + rect.height) * scaleY }));
     const each = weight / (Math.ceil((endX - left) / stride) * Math.ceil((endY - top) / stride));
     for (let y = top; y < endY; y += stride) {
       for (let x = left; x < endX; x += stride) {
@@ -92,6 +99,7 @@ function gather(parts: readonly SeenPart[]): SeenColor[] {
         const l = pixels.data[at]!;
         const a = pixels.data[at + 1]!;
         const b = pixels.data[at + 2]!;
+        if (faces.length > 0 && mayBeSkin(a, b) && faces.some((face) => x + 1 > face.left && x < face.right && y + 1 > face.top && y < face.bottom)) continue;
         const key = (((l + 128) >> CUBE_BITS) << 12) | (((a + 128) >> CUBE_BITS) << 6) | ((b + 128) >> CUBE_BITS);
         let cube = cubes.get(key);
         if (!cube) cubes.set(key, (cube = { sum: [0, 0, 0], weight: 0, byPrint: new Map<PrintId, number>() }));
@@ -108,6 +116,9 @@ function gather(parts: readonly SeenPart[]): SeenColor[] {
     .filter(([, cube]) => cube.weight > 0)
     .map(([, { sum, weight, byPrint }]) => ({ oklab: sum.map((v) => v / weight / 254) as unknown as Oklab, weight, byPrint }));
 }
+
+/** Within a marked face every skin, pale to dark, is of a red to yellow hue: a and b as the raster stores them. */
+const mayBeSkin = (a: number, b: number): boolean => a > 0 && b > 0 && b < 5 * a;
 
 /** The members by falling chroma; the first at which enough of the group's weight has gone by. */
 function vividOf(members: readonly SeenColor[]): Oklch {

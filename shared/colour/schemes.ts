@@ -20,6 +20,12 @@ export interface PlaceInput extends SchemeInput {
   readonly trim: TrimSettings;
 }
 
+/** What is asked of schemes besides the spread itself. */
+export interface SchemeWishes {
+  /** Skin may become card; it is left out unless asked. */
+  readonly withSkin?: boolean;
+}
+
 /** Photo colours with less chroma are neutrals and are kept apart from the rest. */
 const NEUTRAL_CHROMA = 0.03;
 /** A colour needs this share of what is seen before a mat is cut in it; an accent needs less. */
@@ -29,9 +35,11 @@ const MIN_ACCENT_SHARE = 0.004;
 const OTHER_HUE = 40;
 /** An accent is small and vivid, so it stands apart from a calm card already at this hue distance. */
 const ACCENT_HUE = 30;
-/** Skin lies about here in OKLCH; a card of it makes faces look pale. Common practice: it is not favoured. */
-const SKIN = { hue: [30, 75], chroma: [0.03, 0.12], lightness: [0.5, 0.92] } as const;
-const SKIN_FACTOR = 0.3;
+/**
+ * Skin of photos without marked faces lies about here in OKLCH: both skin patches of the 24-patch colour target do,
+ * sand, rope and kraft are yellower. The bounds are our own. Card of it makes faces look pale: common practice.
+ */
+const SKIN = { hue: [25, 66], chroma: [0.03, 0.125], lightness: [0.4, 0.92] } as const;
 
 /**
  * Card's tones: whatever a photo's rim is, one of the four keeps its distance from it. Main and second are
@@ -47,10 +55,12 @@ const DARKEST_TONE = 0.17;
  * The three schemes for the photos on a spread: `echo` (what is in them), `quiet` (neutrals that let them
  * lead) and `lift` (echo with one accent across the wheel), in that order. Weighed by the area seen of
  * each photo; from the prints lying ready where none is placed; empty where there are none. Each colour
- * names the prints it comes from. Same input, same schemes.
+ * names the prints it comes from. Skin is left out unless asked, and neutrals serve as card only where no colour can.
+ * Same input, same schemes.
  */
-export function suggestSchemes({ doc, prints }: SchemeInput): Scheme[] {
-  const colors = photoColors(doc, prints);
+export function suggestSchemes({ doc, prints }: SchemeInput, { withSkin = false }: SchemeWishes = {}): Scheme[] {
+  const seen = photoColors(doc, prints, { withSkin });
+  const colors = withSkin ? seen : withoutSkin(seen);
   if (colors.length === 0) return [];
   const echo = echoOf(colors);
   return [echo, quietOf(colors), liftOf(colors, echo)];
@@ -66,7 +76,7 @@ export function suggestSchemes({ doc, prints }: SchemeInput): Scheme[] {
 export function placeScheme({ doc, prints, trim }: PlaceInput, scheme: Scheme): CommandArgs['scheme.apply'] {
   const units = cardUnits(doc, prints, trim, scheme);
   const before = new Map(doc.mats.map((mat) => [mat.id, mat]));
-  const roles = assignCards(units);
+  const { roles } = assignCards(units);
   const matColors: Record<MatId, Hex> = {};
   const inners: Record<MatId, Mat['inner']> = {};
   units.forEach((unit, i) => {
@@ -77,6 +87,16 @@ export function placeScheme({ doc, prints, trim }: PlaceInput, scheme: Scheme): 
   const base = scheme.colors.base.hex;
   return Object.keys(inners).length > 0 ? { scheme, pageColor: base, matColors, inners } : { scheme, pageColor: base, matColors };
 }
+
+/** What is not skin; of photos of nothing but skin, its tones without their colour. */
+function withoutSkin(colors: readonly PhotoColor[]): readonly PhotoColor[] {
+  const others = colors.filter((color) => !isSkin(color));
+  if (others.length > 0) return others;
+  const calm = ([l, c, h]: Oklch): Oklch => [l, Math.min(c, NEUTRAL_CHROMA / 2), h];
+  return colors.map((color) => ({ ...color, oklch: calm(color.oklch), vivid: calm(color.vivid) }));
+}
+
+const isSkin = ({ oklch: [l, c, h] }: PhotoColor): boolean => within(h, SKIN.hue) && within(c, SKIN.chroma) && within(l, SKIN.lightness);
 
 function echoOf(colors: readonly PhotoColor[]): Scheme {
   const main = mainOf(colors);
@@ -148,8 +168,19 @@ const HUE_FOR_GREYS = 70;
 
 function liftOf(colors: readonly PhotoColor[], echo: Scheme): Scheme {
   const main = mainOf(colors);
-  const hue = isColored(main.from) ? (main.oklch[2] + 180) % 360 : HUE_FOR_GREYS;
+  const second = secondOf(colors, main);
+  const hue = isColored(main.from) ? acrossFrom(main, second) : HUE_FOR_GREYS;
   return { character: 'lift', colors: { ...echo.colors, accent: { hex: oklchToHex([0.66, 0.15, hue]), printIds: [] } } };
+}
+
+/** Across the wheel, and where the second colour stands there already, the nearest place to either side of it. */
+const ACROSS = [180, 150, 210, 120, 240] as const;
+const CLEAR_OF_SECOND = 40;
+
+function acrossFrom(main: Chosen, second: Chosen): number {
+  const hues = ACROSS.map((turn) => (main.oklch[2] + turn) % 360);
+  const isClear = (hue: number): boolean => second.oklch[1] < NEUTRAL_CHROMA || hueDistance(hue, second.oklch[2]) >= CLEAR_OF_SECOND;
+  return hues.find(isClear) ?? hues[0]!;
 }
 
 const isColored = ({ oklch: [, chroma] }: PhotoColor): boolean => chroma >= NEUTRAL_CHROMA;
@@ -160,12 +191,15 @@ const SAME_FAMILY = 20;
 const TYING_PRINTS = 4;
 /** A colour whose tone must be moved far to become card is not the colour any more. */
 const TONE_SHIFT_COST = 2;
-/** Yellows turn to mud when they are darkened to a main card's tone; sea, leaf and brick do not. Our own judgement. */
-const MUDDY = { hue: [55, 120], factor: 0.4 } as const;
+/**
+ * Light oranges and yellows turn to mud when they are darkened to a main card's tone; sea, leaf and brick do not, and
+ * wood or moss that is dark by itself is no more than drab. Our own judgement.
+ */
+const MUDDY = { hue: [50, 120], darkened: 0.12, drab: 0.6 } as const;
 
 /**
  * How well a photo colour serves for large mats of a tone: its family is seen a lot
- * and in several prints, it is coloured, near that tone, and neither skin nor mud.
+ * and in several prints, it is coloured, near that tone, and not mud.
  */
 function cardScore(colors: readonly PhotoColor[], tone: readonly [number, number]): (color: PhotoColor) => number {
   return (color) => {
@@ -177,8 +211,8 @@ function cardScore(colors: readonly PhotoColor[], tone: readonly [number, number
     const ties = (1 + Math.min(sources, TYING_PRINTS)) / (1 + TYING_PRINTS);
     const shift = Math.abs(l - hold(l, tone));
     const isMuddy = tone === MAIN_TONE && within(h, MUDDY.hue);
-    const isSkin = within(h, SKIN.hue) && within(c, SKIN.chroma) && within(l, SKIN.lightness);
-    const suits = Math.max(0.25, 1 - shift * TONE_SHIFT_COST) * (isSkin ? SKIN_FACTOR : 1) * (isMuddy ? MUDDY.factor : 1);
+    const mud = isMuddy ? (l > tone[1] ? MUDDY.darkened : MUDDY.drab) : 1;
+    const suits = Math.max(0.25, 1 - shift * TONE_SHIFT_COST) * mud;
     return seen * ties * (0.35 + Math.min(c, 0.12) / 0.12) * suits;
   };
 }

@@ -18,9 +18,10 @@ const ROLES: readonly SchemeRole[] = ['base', 'main', 'second', 'accent'];
 export function visibleShares(
   doc: SpreadDocument,
   scheme: Scheme,
-  prints?: ReadonlyMap<PrintId, Pick<Print, 'paperWidth' | 'paperHeight'>>,
+  prints?: PrintSizes,
 ): Record<SchemeRole, number> {
-  const shown = visibleCard(doc, prints);
+  const shown = new Map<Hex, number>();
+  for (const { color, area: units } of shownParts(doc, prints)) shown.set(color, (shown.get(color) ?? 0) + units);
   const total = [...shown.values()].reduce((sum, units) => sum + units, 0);
   const counted = new Set<Hex>();
   const shares: Record<SchemeRole, number> = { base: 0, main: 0, second: 0, accent: 0 };
@@ -33,26 +34,40 @@ export function visibleShares(
   return shares;
 }
 
-/** Visible area (square Lengths) of card by colour, over both pages. */
-function visibleCard(doc: SpreadDocument, prints?: ReadonlyMap<PrintId, Pick<Print, 'paperWidth' | 'paperHeight'>>): Map<Hex, number> {
-  const byColor = new Map<Hex, number>();
-  const add = (color: Hex, units: number): void => void byColor.set(color, (byColor.get(color) ?? 0) + units);
+/** A piece of card that shows: of a page, of a mat, or of a mat's inner mat. */
+interface ShownPart {
+  readonly matId: MatId | null;
+  readonly isInner: boolean;
+  readonly color: Hex;
+  /** Square Lengths. */
+  readonly area: number;
+}
+
+type PrintSizes = ReadonlyMap<PrintId, Pick<Print, 'paperWidth' | 'paperHeight'>>;
+
+/** Visible area (square Lengths) of each mat's own card, inner mats left out. */
+export function shownCard(doc: SpreadDocument, prints?: PrintSizes): Map<MatId, number> {
+  return new Map(shownParts(doc, prints).flatMap(({ matId, isInner, area: units }) => (matId && !isInner ? [[matId, units] as const] : [])));
+}
+
+function shownParts(doc: SpreadDocument, prints?: PrintSizes): ShownPart[] {
   const photos = new Map(placedPhotos(doc, (id) => prints?.get(id) ?? FITS_ANY_MAT).map((photo) => [photo.matId, photo]));
+  const parts: ShownPart[] = [];
   for (const side of SIDES) {
     const page = doc.pages[side];
     if (!page) continue;
     const mats = doc.mats.filter((mat) => mat.page === side);
     const rects = mats.map((mat) => matRect(doc.format, mat));
-    add(page.color, uncovered({ x: 0, y: 0, width: doc.format.width, height: doc.format.height }, rects));
+    parts.push({ matId: null, isInner: false, color: page.color, area: uncovered({ x: 0, y: 0, width: doc.format.width, height: doc.format.height }, rects) });
     mats.forEach((mat, i) => {
       const over = rects.slice(i + 1);
       const inner = innerMatRect(doc.format, doc.reveal, mat);
       const carried = carriedRects(doc, mat, photos);
-      if (inner) add(mat.inner!.color, uncovered(inner, [...carried, ...over]));
-      add(mat.color, uncovered(rects[i]!, inner ? [inner, ...over] : [...carried, ...over]));
+      if (inner) parts.push({ matId: mat.id, isInner: true, color: mat.inner!.color, area: uncovered(inner, [...carried, ...over]) });
+      parts.push({ matId: mat.id, isInner: false, color: mat.color, area: uncovered(rects[i]!, inner ? [inner, ...over] : [...carried, ...over]) });
     });
   }
-  return byColor;
+  return parts;
 }
 
 /** Stands in for an unknown print: as a whole print it covers all that its mat leaves for it. */

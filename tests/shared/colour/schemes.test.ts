@@ -101,10 +101,46 @@ describe('suggestSchemes', () => {
     expect(suggestSchemes(input)).toEqual(suggestSchemes(inputOf(wholeSpread(seaside), seaside)));
   });
 
-  it('does not favour skin over as much of another colour', () => {
-    const portrait = bands(8, '#c68863', '#2f5d50');
-    const [echo] = suggestSchemes(inputOf(wholeSpread([portrait]), [portrait]));
-    expect(Math.abs(hexToOklch(echo!.colors.main.hex)[2] - hexToOklch('#2f5d50')[2])).toBeLessThan(15);
+  // "Light skin" and "dark skin" of the 24-patch colour target, in its published sRGB values.
+  it.each(['#c29682', '#735244'])('leaves skin out of the mats’ colours unless asked: %s', (skin) => {
+    const portrait = bands(8, skin, skin, skin, '#2f5d50');
+    const input = inputOf(wholeSpread([portrait]), [portrait]);
+    const near = (hex: string): boolean => hexToOklch(hex)[1] > 0.03 && Math.abs(hexToOklch(hex)[2] - hexToOklch(skin)[2]) < 15;
+    for (const { colors } of suggestSchemes(input).filter(({ character }) => character !== 'lift')) {
+      for (const role of ['main', 'second', 'accent'] as const) expect(near(colors[role].hex)).toBe(false);
+    }
+    const asked = suggestSchemes(input, { withSkin: true })[0]!.colors;
+    expect([asked.main, asked.second, asked.accent].some(({ hex }) => near(hex))).toBe(true);
+  });
+
+  it('leaves out all skin within a marked face, and keeps the same colour elsewhere', () => {
+    // Yellower than the bounds for unmarked photos, as rope and sand are.
+    const sandy = '#b5895a';
+    const portrait = { ...bands(8, sandy, '#2f5d50'), faces: [{ rect: { x: 0, y: 0, width: 320, height: 400 }, facing: 'ahead' as const }] };
+    const sources = (print: Print): boolean => suggestSchemes(inputOf(wholeSpread([print]), [print]))[0]!.colors.second.printIds.length > 0
+      && Math.abs(hexToOklch(suggestSchemes(inputOf(wholeSpread([print]), [print]))[0]!.colors.second.hex)[2] - hexToOklch(sandy)[2]) < 10;
+    expect(sources({ ...portrait, faces: [] })).toBe(true);
+    expect(sources(portrait)).toBe(false);
+  });
+
+  it('keeps neutrals out of the mats’ colours while there is a colour', () => {
+    const grey = bands(9, '#777777', '#8a8a8a', '#999999', '#aaaaaa', '#bbbbbb', '#444444', '#333333', '#1f4e5f');
+    const [echo] = suggestSchemes(inputOf(wholeSpread([grey]), [grey]));
+    expect(hexToOklch(echo!.colors.main.hex)[1]).toBeGreaterThan(0.03);
+  });
+
+  it('has schemes for photos of nothing but skin', () => {
+    const closeUp = bands(8, '#c29682', '#d0a590');
+    for (const { colors } of suggestSchemes(inputOf(wholeSpread([closeUp]), [closeUp]))) {
+      for (const role of ['base', 'main', 'second'] as const) expect(hexToOklch(colors[role].hex)[1]).toBeLessThan(0.03);
+    }
+  });
+
+  it('sets lift’s accent apart from the second colour as well', () => {
+    const seaAndBrick = bands(4, '#1f4e5f', '#1f4e5f', '#1f4e5f', '#b35a3c', '#b35a3c', '#e8e2d4');
+    const lift = suggestSchemes(inputOf(wholeSpread([seaAndBrick]), [seaAndBrick]))[2]!;
+    const [second, accent] = [lift.colors.second, lift.colors.accent].map(({ hex }) => hexToOklch(hex)[2]) as [number, number];
+    expect(Math.abs(((second - accent + 540) % 360) - 180)).toBeGreaterThan(25);
   });
 
   it.each([
@@ -150,9 +186,9 @@ describe('placeScheme', () => {
           }
         }
       }),
-      { numRuns: 60 },
+      { numRuns: 40 },
     );
-  });
+  }, 20_000);
 
   it('puts a thin light inner mat where the card colours all hide the photo, and takes it away with the next scheme', () => {
     const scheme: Scheme = {
@@ -217,7 +253,7 @@ describe('placeScheme', () => {
     expect(suggestSchemes(inputOf(unscaled, [half]))[0]!.colors.base).not.toEqual(echo!.colors.base);
   });
 
-  it('lands the accent on small mats of both pages', () => {
+  it('lands the accent on at least three of the smaller mats, on both pages', () => {
     // Pale all round, so that every card colour would do.
     const inside = ['#1f4e5f', '#2d6f86', '#8a4f7d', '#d9a441'].map(hexToOklab);
     const pale = hexToOklab('#f4f2ee');
@@ -236,7 +272,8 @@ describe('placeScheme', () => {
     const accented = doc.mats.filter((mat) => matColors[mat.id] === echo!.colors.accent.hex);
     expect(accented.length).toBeGreaterThanOrEqual(3);
     expect(new Set(accented.map((mat) => mat.page)).size).toBe(2);
-    expect(Math.max(...accented.map((mat) => mat.w * mat.h))).toBeLessThanOrEqual(20);
+    // No larger than the middle one of all mats.
+    expect(Math.max(...accented.map((mat) => mat.w * mat.h))).toBeLessThanOrEqual(60);
     expect(matColors[matIdOf(0)]).toBe(echo!.colors.main.hex);
     // Of three that touch each other, two at least differ.
     expect(new Set([0, 1, 2].map((n) => matColors[matIdOf(n)])).size).toBeGreaterThan(1);
@@ -273,7 +310,7 @@ describe('placeScheme', () => {
       }),
       { numRuns: 40 },
     );
-  });
+  }, 20_000);
 
   it('has nothing to colour on a bare spread', () => {
     const ready = buildSpread({ table: seaside.map(({ id }) => id) });
