@@ -12,6 +12,7 @@ export const securityHeaders = (): RequestHandler =>
       useDefaults: false,
       directives: {
         defaultSrc: ["'self'"],
+        workerSrc: ["'self'"],
         imgSrc: ["'self'", 'blob:', 'data:'],
         objectSrc: ["'none'"],
         baseUri: ["'none'"],

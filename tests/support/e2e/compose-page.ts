@@ -46,7 +46,7 @@ export class ComposePage {
   async colorMat(label: string, color: string): Promise<void> {
     await this.page.bringToFront(); // a tab behind another is drawn once a second
     await this.mat(label).click();
-    await this.page.getByRole('toolbar', { name: 'Mat' }).getByRole('button', { name: 'Colour', exact: true }).click();
+    await this.page.getByRole('toolbar', { name: 'Mat' }).getByRole('button', { name: /^Colour/ }).click();
     const sheet = this.page.getByRole('dialog');
     await sheet.getByLabel('Colour code').fill(color);
     await sheet.getByRole('button', { name: 'Use' }).click();

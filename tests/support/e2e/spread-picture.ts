@@ -7,7 +7,7 @@ import type { Page } from 'playwright-core';
 export async function spreadPicture(page: Page): Promise<Buffer> {
   await page.mouse.move(1, 1);
   await page.keyboard.press('Escape'); // nothing is selected
-  await page.waitForFunction(() => document.querySelectorAll('.spread > svg [data-state]').length === 0);
+  await page.waitForFunction(() => document.querySelectorAll('.vision-view [data-state]').length === 0);
   await setWorkingMarks(page, 'hidden');
   const picture = await page.locator('.spread').screenshot();
   await setWorkingMarks(page, '');
@@ -17,5 +17,5 @@ export async function spreadPicture(page: Page): Promise<Buffer> {
 /** Through the object model, since the content security policy refuses styles that are added as text. */
 const setWorkingMarks = (page: Page, visibility: string): Promise<void> =>
   page.evaluate((value) => {
-    for (const mark of document.querySelectorAll<HTMLElement>('.spread > :not(svg:first-child), .spread .grid-lines')) mark.style.visibility = value;
+    for (const mark of document.querySelectorAll<HTMLElement>('.spread > :not(.vision-view), .spread .grid-lines')) mark.style.visibility = value;
   }, visibility);

@@ -2,6 +2,7 @@ import { useState } from 'react';
 import { parseColor } from '#shared/colour/css-color';
 import { colorName } from '#shared/colour/name';
 import type { Hex } from '#shared/model/ids';
+import { NamedSwatch } from './named-swatch';
 
 export interface ColorSheetProps {
   readonly heading: string;
@@ -27,15 +28,9 @@ export function ColorSheet({ heading, value, groups, onChoose }: ColorSheetProps
             <ul>
               {group.colors.map((color) => (
                 <li key={color}>
-                  <button
-                    type="button"
-                    className="swatch"
-                    style={{ background: color }}
-                    aria-label={colorName(color)}
-                    aria-pressed={color === value}
-                    title={colorName(color)}
-                    onClick={() => onChoose(color)}
-                  />
+                  <button type="button" className="swatch" aria-pressed={color === value} onClick={() => onChoose(color)}>
+                    <NamedSwatch color={color} />
+                  </button>
                 </li>
               ))}
             </ul>

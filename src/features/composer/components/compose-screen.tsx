@@ -16,6 +16,7 @@ import { AfterPages } from './after-pages';
 import { HeldPrint, type DropWords } from './held-print';
 import { NoteText } from './notes-margin';
 import { PileEdge } from './pile-edge';
+import type { Comparison } from './scheme-fan';
 import { SpreadTable } from './spread-table';
 
 // The schemes' colour work comes after the pages: dragging does not wait for it.
@@ -43,6 +44,7 @@ export function ComposeScreen({ title, piles, mayEdit, sortHref }: ComposeScreen
   const unit = useComposer((state) => state.unit);
   const judgement = useJudgement();
   const [sources, setSources] = useState<readonly PrintId[] | null>(null);
+  const [comparison, setComparison] = useState<Comparison | null>(null);
   const isSmall = viewport.width < COMPOSE_MIN_WIDTH;
   const isEditable = mayEdit && !isSmall;
   const margin = isSmall ? 0 : viewport.width < WIDE ? MARGIN_NARROW : MARGIN_WIDE;
@@ -60,7 +62,7 @@ export function ComposeScreen({ title, piles, mayEdit, sortHref }: ComposeScreen
       <main className={`compose ${isSmall ? 'is-small' : ''}`}>
         <h1 className="sr-only">Compose {title}</h1>
         <RefusalLine />
-        <SpreadTable judgement={isSmall ? { ...judgement, notes: [] } : judgement} held={held} perInch={perInch} margin={margin} isEditable={isEditable} sources={sources} />
+        <SpreadTable judgement={isSmall ? { ...judgement, notes: [] } : judgement} held={held} perInch={perInch} margin={margin} isEditable={isEditable} sources={sources} comparison={comparison} />
         {isSmall ? (
           <section className="notes-below" aria-label="Notes">
             <p>Composing needs a wider screen, from 1024 px. Here is the spread and what the notes say of it.</p>
@@ -75,7 +77,7 @@ export function ComposeScreen({ title, piles, mayEdit, sortHref }: ComposeScreen
         ) : (
           <div className="table-edge">
             <AfterPages fallback={<div aria-busy="true" />}>
-              <SchemeFan isEditable={isEditable} isHeld={held !== null} onSources={setSources} />
+              <SchemeFan isEditable={isEditable} isHeld={held !== null} onSources={setSources} onCompare={setComparison} />
             </AfterPages>
             <PileEdge piles={piles} heldPrintId={held?.data.type === 'print' ? held.data.printId : null} isEditable={isEditable} sortHref={sortHref} marked={marked} />
           </div>

@@ -2,11 +2,13 @@ import { inches, millimetres } from '#shared/model/length';
 import type { Mat, SpreadDocument } from '#shared/model/spread';
 import type { CommandCall } from '#shared/commands/calls';
 import { inkOn } from '#shared/colour/contrast';
+import { colorName } from '#shared/colour/name';
 import { formatLength, type Unit } from '#shared/words/measure';
 import { useComposer } from '@/features/composer/hooks/composer-context';
 import { useRun } from '@/features/composer/hooks/use-run';
 import { colorGroups } from '@/features/composer/model/color-groups';
 import { LazyColorSheet } from './lazy-color-sheet';
+import { NamedSwatch } from './named-swatch';
 import { ContentSheet } from './content-sheet';
 import { ActionPopover } from './popover';
 
@@ -29,7 +31,7 @@ export function MatActions({ mats, unit, onDone }: MatActionsProps) {
   const group = first.content.kind === 'pane' ? doc.panes.find((panes) => panes.matIds.includes(first.id)) : undefined;
   return (
     <div className="mat-actions" role="toolbar" aria-label={isOne ? 'Mat' : `${mats.length} mats`}>
-      <ActionPopover label={<i className="action-swatch" style={{ background: first.color }} />} name="Colour">
+      <ActionPopover label={<NamedSwatch color={first.color} />} name={`Colour, ${colorName(first.color)}`}>
         <LazyColorSheet heading="Mat colour" value={first.color} groups={colorGroups(doc, prints)} onChoose={(color) => run({ id: 'mats.setColor', args: { matIds, color } })} />
       </ActionPopover>
       {isOne && !group && (

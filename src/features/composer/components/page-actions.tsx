@@ -1,3 +1,4 @@
+import { colorName } from '#shared/colour/name';
 import { gridOf } from '#shared/geometry/grid';
 import type { Side } from '#shared/model/ids';
 import type { SpreadDocument } from '#shared/model/spread';
@@ -6,6 +7,7 @@ import { useComposer } from '@/features/composer/hooks/composer-context';
 import { useRun } from '@/features/composer/hooks/use-run';
 import { colorGroups } from '@/features/composer/model/color-groups';
 import { LazyColorSheet } from './lazy-color-sheet';
+import { NamedSwatch } from './named-swatch';
 import { ActionPopover } from './popover';
 
 const WANTED_STEPS = 6;
@@ -47,7 +49,7 @@ export function PageActions({ side }: { side: Side }) {
       >
         Add mat
       </button>
-      <ActionPopover label={<i className="action-swatch" style={{ background: page.color }} />} name={`Colour of the ${side} page`}>
+      <ActionPopover label={<NamedSwatch color={page.color} />} name={`Colour of the ${side} page, ${colorName(page.color)}`}>
         <LazyColorSheet heading="Page colour" value={page.color} groups={colorGroups(doc, prints)} onChoose={(color) => run({ id: 'pages.setColor', args: { pages: [side], color } })} />
       </ActionPopover>
       <button type="button" className="mat-action" disabled={isBare} title={isBare ? 'This page has no mats' : 'Mirror this page left to right; pictures are never mirrored'} onClick={() => run({ id: 'pages.mirror', args: { page: side, axis: 'horizontal' } })}>

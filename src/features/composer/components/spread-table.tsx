@@ -24,7 +24,9 @@ import { MatControl } from './mat-control';
 import { NotesMargin } from './notes-margin';
 import { PageGrid } from './page-grid';
 import { PageRuler } from './page-ruler';
+import type { Comparison } from './scheme-fan';
 import { SelectedMat } from './selected-mat';
+import { VisionChoice, VisionView, type SeenAs } from './vision-view';
 
 // The tools come after the pages: prints can be dragged while these are still fetched.
 const MatActions = lazy(async () => ({ default: (await import('./mat-actions')).MatActions }));
@@ -39,22 +41,26 @@ interface SpreadTableProps {
   readonly isEditable: boolean;
   /** Prints whose mats are outlined, because a scheme's colour comes from them. */
   readonly sources: readonly PrintId[] | null;
+  /** Drawn instead of the spread as it is, while somebody compares. */
+  readonly comparison: Comparison | null;
 }
 
 const NOTE_GUTTER = 20;
 const CHECK_COUNT = Object.keys(CHECKS).length;
 
 /** The two facing pages on the neutral table, with everything that hangs on them. */
-export function SpreadTable({ judgement, held, perInch, margin, isEditable, sources }: SpreadTableProps) {
+export function SpreadTable({ judgement, held, perInch, margin, isEditable, sources, comparison }: SpreadTableProps) {
   const store = useComposerStore();
   const doc = useComposer((state) => state.doc);
   const prints = useComposer((state) => state.prints);
   const unit = useComposer((state) => state.unit);
   const trim = useComposer((state) => state.trim);
   const selection = useComposer((state) => state.selection);
+  const [seenAs, setSeenAs] = useState<SeenAs>('common');
   const [marked, setMarked] = useState<readonly string[] | null>(null);
 
-  const scene = useMemo(() => buildScene(doc, prints), [doc, prints]);
+  const drawn = comparison?.doc ?? doc;
+  const scene = useMemo(() => buildScene(drawn, prints), [drawn, prints]);
   const scale = perInch / UNITS_PER_INCH;
   const size = { width: scene.width * scale, height: scene.height * scale };
   const labels = useMemo(() => matLabels(doc.mats), [doc.mats]);
@@ -83,7 +89,10 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
         {SIDES.map((side) => doc.pages[side] && <PageRuler key={side} format={doc.format} left={pageLeft(doc, side) * scale} perInch={perInch} />)}
       </div>
       <div className="spread" style={size} onDoubleClick={(event) => isEditable && addMatAt(event, store.getState(), perInch)} onPointerDown={(event) => event.target === event.currentTarget && store.getState().select([])}>
-        <SceneDrawing scene={scene} pictureSize={perInch * devicePixelRatio > 80 ? 'large' : 'medium'} underlay={<Grids doc={doc} />} />
+        <VisionView seenAs={seenAs}>
+          <SceneDrawing scene={scene} pictureSize={perInch * devicePixelRatio > 80 ? 'large' : 'medium'} underlay={<Grids doc={doc} />} />
+        </VisionView>
+        {comparison && <p className="comparison-tag">{comparison.words}</p>}
         {asRead(doc.mats).map((mat) => (
           <MatControl
             key={mat.id}
@@ -139,6 +148,7 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
       <p className="tally" style={{ width: margin - 36 }}>
         {CHECK_COUNT} checks, {judgement.notes.length === 1 ? '1 note' : `${judgement.notes.length} notes`}
       </p>
+      {margin > 0 && <VisionChoice value={seenAs} width={margin - 36} onChange={setSeenAs} />}
       {isEditable && (
         <div className="table-foot">
           <AfterPages>
