@@ -15,7 +15,7 @@ const SOURCE = 'Simulated after Machado, Oliveira and Fernandes (2009), severity
 export function VisionChoice({ value, width, onChange }: { value: SeenAs; width: number; onChange: (value: SeenAs) => void }) {
   return (
     <label className="vision-choice" title={SOURCE} style={{ width }}>
-      Seen as
+      <span>Seen as</span>
       <select value={value} onChange={(event) => onChange(event.target.value as SeenAs)}>
         {(['common', ...VISIONS] as const).map((vision) => (
           <option key={vision} value={vision}>
