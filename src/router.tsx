@@ -17,6 +17,9 @@ export const createRouter = () =>
       children: [
         { path: 'sign-in', lazy: () => import('./routes/sign-in') },
         { path: 'sign-up', lazy: () => import('./routes/sign-up') },
+        { path: 'help', lazy: () => import('./routes/help') },
+        { path: 'help/weight', lazy: () => import('./routes/help-weight') },
+        { path: 'help/checks/:checkId', lazy: () => import('./routes/help-check') },
         {
           Component: RequireSession,
           ErrorBoundary: RouteError,

@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { use, useState, type ReactNode } from 'react';
 import type { PictureSize } from '#shared/contracts/prints';
 import { pictureUrl } from '#shared/contracts/prints';
 import { inverseTurn, turnedSize } from '#shared/geometry/paper';
@@ -7,6 +7,7 @@ import type { Rect } from '#shared/model/rect';
 import { PHOTO_PAPER, pictureCover, type PictureCover } from '#shared/scene/picture-cover';
 import type { PhotoItem } from '#shared/scene/scene';
 import { onPixels } from './on-pixels';
+import { PictureSourceContext } from './picture-source';
 
 /** Blank paper, off white. */
 const BLANK = 'var(--color-paper-2, #f4f2ea)';
@@ -22,17 +23,29 @@ export function PhotoDrawing({ photo, scale, pictureSize }: PhotoDrawingProps) {
   const href = pictureUrl(photo.printId, pictureSize);
   const [missing, setMissing] = useState<string | null>(null);
   const [loaded, setLoaded] = useState<string | null>(null);
+  const drawn = use(PictureSourceContext)?.(photo) ?? null;
   const paper = onPixels(photo.rect, scale);
   if (missing === href) return <MissingPhoto rect={paper} />;
   const cover = pictureCover(photo);
   // Until its picture is there, a photo is blank paper: a mat that carries one never looks bare.
-  const isBlank = cover !== null && loaded !== href;
+  const isBlank = cover !== null && drawn === null && loaded !== href;
   return (
     <>
       {!cover?.isWhole && <rect {...paper} fill={PHOTO_PAPER} shapeRendering="crispEdges" />}
       {isBlank && <rect {...onPixels(cover.rect, scale)} fill={BLANK} data-state="photo-loading" shapeRendering="crispEdges" />}
       {cover && (
-        <Picture photo={photo} cover={cover} scale={scale} href={href} onLoad={() => setLoaded(href)} onError={() => setMissing(href)} />
+        <Picture photo={photo} cover={cover} scale={scale}>
+          {drawn ?? (
+            <image
+              href={href}
+              width={photo.imageWidth}
+              height={photo.imageHeight}
+              preserveAspectRatio="none"
+              onLoad={() => setLoaded(href)}
+              onError={() => setMissing(href)}
+            />
+          )}
+        </Picture>
       )}
     </>
   );
@@ -42,12 +55,11 @@ interface PictureProps {
   readonly photo: PhotoItem;
   readonly cover: PictureCover;
   readonly scale: number | null;
-  readonly href: string;
-  readonly onLoad: () => void;
-  readonly onError: () => void;
+  /** In pixels of the oriented original. */
+  readonly children: ReactNode;
 }
 
-function Picture({ photo, cover, scale, href, onLoad, onError }: PictureProps) {
+function Picture({ photo, cover, scale, children }: PictureProps) {
   const rect = onPixels(cover.rect, scale);
   const box = turnedSize(rect, inverseTurn(photo.turns));
   const { x, y, width, height } = cover.source;
@@ -55,7 +67,7 @@ function Picture({ photo, cover, scale, href, onLoad, onError }: PictureProps) {
   return (
     <g transform={turnInto(rect, photo.turns)}>
       <svg width={box.width} height={box.height} viewBox={`${x} ${y} ${width} ${height}`} preserveAspectRatio="none">
-        <image href={href} width={photo.imageWidth} height={photo.imageHeight} preserveAspectRatio="none" onLoad={onLoad} onError={onError} />
+        {children}
       </svg>
     </g>
   );

@@ -2,9 +2,9 @@ import { describe, expect, it } from 'vitest';
 import { weighSpread } from '#shared/checks/weight';
 import { inches } from '#shared/model/length';
 import { DEFAULT_BINDING } from '#shared/model/page-format';
-import type { Swatch } from '#shared/model/print';
+import type { Print } from '#shared/model/print';
 import type { Mat } from '#shared/model/spread';
-import { buildMat, buildPrint, buildSpread, buildView, matIdOf, printContent } from '../../support/builders';
+import { buildMat, buildPrint, buildRaster, buildSpread, buildView, matIdOf, printContent } from '../../support/builders';
 import { TITLE, viewFilled } from '../../support/filled-spread';
 
 const BARE = { content: { kind: 'bare' } } as const;
@@ -29,15 +29,42 @@ describe('weight of a mat', () => {
     expect(weightOf({ color: '#e0002d' })).toBeGreaterThan(weightOf({ color: '#808080' }));
   });
 
-  it('weighs a picture by its palette, so that black and white do not cancel to grey', () => {
-    const swatch = (l: number, share: number): Swatch => ({ hex: '#808080', oklch: [l, 0, 0], share, role: 'area' });
-    const weigh = (palette: readonly Swatch[]): number => {
-      const print = buildPrint({ palette });
-      const doc = buildSpread({ pages: { left: { color: '#777777' }, right: null }, mats: [buildMat({ id: matIdOf(1), content: printContent(print) })] });
-      return weighSpread(buildView({ doc, prints: [print] })).mats.get(matIdOf(1))!;
-    };
-    expect(weigh([swatch(0, 0.5), swatch(1, 0.5)])).toBeGreaterThan(weigh([swatch(0.56, 1)]));
-    expect(weigh([])).toBeGreaterThan(0);
+  /** A 6 × 4 in print whose window shows all of its width and its upper left. */
+  const weighPicture = (parts: Partial<Print>, place = {}, pageColor = '#777777') => {
+    const print = buildPrint(parts);
+    const mat = buildMat({ id: matIdOf(1), w: 6, h: 6, content: printContent(print, place) });
+    return weighSpread(buildView({ doc: buildSpread({ pages: { left: { color: pageColor }, right: null }, mats: [mat] }), prints: [print] }));
+  };
+  const weightOfPicture = (...args: Parameters<typeof weighPicture>): number => weighPicture(...args).mats.get(matIdOf(1))!;
+
+  it('weighs a picture point by point, so that black and white do not cancel to grey', () => {
+    const halves = buildRaster(12, 8, (x) => (x % 6 < 3 ? [0, 0, 0] : [1, 0, 0]));
+    expect(weightOfPicture({ raster: halves })).toBeGreaterThan(weightOfPicture({ raster: buildRaster(12, 8, [0.56, 0, 0]) }));
+  });
+
+  it('weighs what the window shows and not what is trimmed off', () => {
+    const darkRight = buildRaster(12, 8, (x) => (x < 6 ? [1, 0, 0] : [0, 0, 0]));
+    const [onLight, onDark] = [0, inches(3)].map((x) => weightOfPicture({ raster: darkRight }, { x }, '#ffffff'));
+    expect(onDark).toBeGreaterThan(2 * onLight!);
+  });
+
+  it('grows with detail, and with a face, but only with one that is in the window', () => {
+    const busy = buildRaster(60, 40, (x, y) => ((x + y) % 2 === 0 ? [0.5, 0, 0] : [0.62, 0, 0]));
+    expect(weightOfPicture({ raster: busy })).toBeGreaterThan(weightOfPicture({ raster: buildRaster(60, 40, [0.56, 0, 0]) }));
+    const face = (x: number) => [{ rect: { x, y: 50, width: 100, height: 120 } }];
+    expect(weightOfPicture({ faces: face(50) })).toBeGreaterThan(weightOfPicture({ faces: [] }));
+    expect(weightOfPicture({ faces: face(450) })).toBe(weightOfPicture({ faces: [] }));
+  });
+
+  it('balances where the picture does, turned with it', () => {
+    const darkLeft = buildRaster(12, 8, (x) => (x < 3 ? [0, 0, 0] : [1, 0, 0]));
+    const upright = weighPicture({ raster: darkLeft }, {}, '#ffffff').masses.get(matIdOf(1))!;
+    expect(upright.x).toBeLessThan(inches(2));
+    expect(upright.y).toBeCloseTo(inches(2), 3);
+    // A quarter-turn clockwise brings the left of the picture to the top.
+    const turned = weighPicture({ raster: darkLeft, marks: { ...buildPrint().marks, noUp: true } }, { turn: 1 }, '#ffffff').masses.get(matIdOf(1))!;
+    expect(turned.y).toBeLessThan(inches(2));
+    expect(turned.x).toBeCloseTo(inches(2), 3);
   });
 
   it('gives ink and inner mats their part', () => {
@@ -55,12 +82,39 @@ describe('weight of a mat', () => {
   });
 });
 
+describe('mats laid over others', () => {
+  const under = buildMat({ id: matIdOf(1), w: 8, h: 8, color: '#000000' });
+  const over = (parts: Partial<Mat>) => buildMat({ id: matIdOf(2), w: 4, h: 8, z: 1, laidOver: true, color: '#eeeeee', ...parts });
+  const weigh = (mats: readonly Mat[]) => weighSpread(buildView({ doc: buildSpread({ mats }) }));
+
+  it('leave what is under them only what can be seen of it', () => {
+    const alone = weigh([under]);
+    const covered = weigh([under, over({})]);
+    const card = inches(4 - 1 / 8);
+    // The upper mat ends half a gap before the middle of eight steps.
+    const strip = inches(2 - 1 / 8);
+    expect(covered.mats.get(matIdOf(1))! / alone.mats.get(matIdOf(1))!).toBeCloseTo(1 - strip / card, 3);
+    expect(covered.masses.get(matIdOf(1))!.x).toBeGreaterThan(alone.masses.get(matIdOf(1))!.x);
+  });
+
+  it('leave nothing of a mat that they hide, and take nothing where they lie beside it', () => {
+    expect(weigh([under, over({ w: 8 })]).mats.get(matIdOf(1))).toBe(0);
+    expect(weigh([under, over({ x: 8 })]).mats.get(matIdOf(1))).toBe(weigh([under]).mats.get(matIdOf(1)));
+  });
+});
+
 describe('weighSpread', () => {
   it('shares 100 between the pages and finds the middle between equal mats', () => {
     const weights = weighSpread(viewFilled([[0, 0, 4, 4, BARE]], [[18, 18, 4, 4, BARE]]));
     expect(weights).toMatchObject({ left: 50, right: 50 });
     expect(weights.centre?.x).toBeCloseTo(inches(12), 6);
     expect(weights.centre?.y).toBeCloseTo(inches(6), 6);
+  });
+
+  it('finds the middle of each page by itself', () => {
+    const { pageCentres } = weighSpread(viewFilled([[0, 0, 4, 4, BARE]], [[18, 18, 4, 4, BARE]]));
+    expect(pageCentres.left!.x).toBeCloseTo(inches(1.5), 6);
+    expect(pageCentres.right!.x).toBeCloseTo(inches(22.5), 6);
   });
 
   it('places the centre in the scene, the gap between the pages included', () => {

@@ -66,6 +66,36 @@ describe('Compose', () => {
     await waitFor(() => expect(screen.getAllByRole('button', { name: /^Mat [LR]\d/ })).toHaveLength(1));
   });
 
+  it('draws over the pages what pulls, at a press of W or of the button', async () => {
+    const user = userEvent.setup();
+    show(openTab({ doc: cut, prints: [wide] }));
+    const overlay = () => screen.queryByRole('img', { name: /^Weights drawn over the pages: left 100, right 0 of 100\./ });
+    expect(overlay()).not.toBeInTheDocument();
+    await user.keyboard('w');
+    expect(overlay()).toBeInTheDocument();
+    // Two mats: two circles of weight, two stops of the eye.
+    expect(overlay()!.querySelectorAll('.overlay-weight')).toHaveLength(2);
+    expect([...overlay()!.querySelectorAll('.overlay-stop text')].map((stop) => stop.textContent)).toEqual(['1', '2']);
+    await user.click(screen.getByRole('button', { name: /^Show weights/ }));
+    expect(overlay()).not.toBeInTheDocument();
+  });
+
+  it('reads the measures on the rule for the spread and for each page', async () => {
+    const user = userEvent.setup();
+    show(openTab({ doc: cut, prints: [wide] }));
+    await user.click(screen.getByRole('button', { name: 'On the rule' }));
+    const panel = await screen.findByRole('dialog', { name: 'On the rule' });
+    expect(await within(panel).findByText('2 mats on 2 left edges and 1 top edge.')).toBeInTheDocument();
+    await user.click(within(panel).getByRole('button', { name: 'Right page' }));
+    expect(within(panel).getByText('There are no mats to measure here yet.')).toBeInTheDocument();
+  });
+
+  it('leads from every note to the page that says why', () => {
+    show(openTab({ doc: cut, prints: [wide] }));
+    const notes = within(screen.getByRole('list', { name: 'Notes on the left page' }));
+    expect(notes.getByRole('link', { name: /^Why\? This cut takes .*Opens in a new tab\.$/ })).toHaveAttribute('href', '/help/checks/keep-zone-cut');
+  });
+
   it('shows a reader everything and no tool', () => {
     show(openTab({ doc: cut, prints: [wide], mayEdit: false }), false);
     expect(screen.getByText('Stop')).toBeInTheDocument();

@@ -1,7 +1,9 @@
 import { useLayoutEffect, useRef, useState } from 'react';
+import { Link } from 'react-router-dom';
 import type { Note } from '#shared/checks/check';
 import { SEVERITY_WORDS, noteSentence, remedyLabel } from '#shared/words/en/notes';
 import type { Unit } from '#shared/words/measure';
+import { SeverityMark } from '@/components/severity-mark';
 import { layOutNotes, leaderPath, type Anchor, type NotePlace } from '@/features/composer/canvas/note-layout';
 
 interface NotesMarginProps {
@@ -117,23 +119,12 @@ export function NoteText({ note, unit }: { note: Note; unit: Unit }) {
         <SeverityMark severity={note.severity} />
         {SEVERITY_WORDS[note.severity]}
       </h2>
-      <p>{noteSentence(note, unit)}</p>
+      <p>
+        {noteSentence(note, unit)}{' '}
+        <Link className="note-why" to={`/help/checks/${note.checkId}`} target="_blank" aria-label={`Why? ${noteSentence(note, unit)} Opens in a new tab.`}>
+          Why
+        </Link>
+      </p>
     </>
-  );
-}
-
-function SeverityMark({ severity }: { severity: Note['severity'] }) {
-  if (severity === 'stop') {
-    return (
-      <svg viewBox="0 0 13 13" width="13" height="13" aria-hidden="true">
-        <path className="mark-square" d="M.5.5h12v12H.5z" />
-        <path className="mark-bar" d="M3 6.500h7" />
-      </svg>
-    );
-  }
-  return (
-    <svg viewBox="0 0 13 13" width="13" height="13" aria-hidden="true" className="mark-line">
-      {severity === 'fix' ? <path d="M1 12 6.500 1.500 12 12" /> : <circle cx="6.500" cy="6.500" r="5" />}
-    </svg>
   );
 }

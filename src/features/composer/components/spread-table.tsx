@@ -1,4 +1,5 @@
 import { lazy, memo, Suspense, useCallback, useMemo, useState, type MouseEvent } from 'react';
+import { Link } from 'react-router-dom';
 import type { Note } from '#shared/checks/check';
 import { BALANCE_LIMIT } from '#shared/checks/pages-unequal';
 import { CHECKS } from '#shared/checks/registry';
@@ -18,15 +19,18 @@ import { useComposer, useComposerStore } from '@/features/composer/hooks/compose
 import { isPrintDrag } from '@/features/composer/hooks/drag-data';
 import type { Held } from '@/features/composer/hooks/use-compose-drag';
 import { stopOn, type Judgement } from '@/features/composer/hooks/use-judgement';
+import { useOverlayKey } from '@/features/composer/hooks/use-overlay-key';
 import { AfterPages } from './after-pages';
 import { BalanceBeam } from './balance-beam';
 import { MatControl } from './mat-control';
 import { NotesMargin } from './notes-margin';
 import { PageGrid } from './page-grid';
 import { PageRuler } from './page-ruler';
+import { RuleTools } from './rule-tools';
 import type { Comparison } from './scheme-fan';
 import { SelectedMat } from './selected-mat';
 import { VisionChoice, VisionView, type SeenAs } from './vision-view';
+import { WeightOverlay } from './weight-overlay';
 
 // The tools come after the pages: prints can be dragged while these are still fetched.
 const MatActions = lazy(async () => ({ default: (await import('./mat-actions')).MatActions }));
@@ -58,6 +62,9 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
   const selection = useComposer((state) => state.selection);
   const [seenAs, setSeenAs] = useState<SeenAs>('common');
   const [marked, setMarked] = useState<readonly string[] | null>(null);
+  const [areWeightsShown, setAreWeightsShown] = useState(false);
+  const toggleWeights = useCallback(() => setAreWeightsShown((shown) => !shown), []);
+  useOverlayKey(toggleWeights);
 
   const drawn = comparison?.doc ?? doc;
   const scene = useMemo(() => buildScene(drawn, prints), [drawn, prints]);
@@ -86,12 +93,14 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
     <div className="spread-table" style={{ width: size.width + 2 * margin, paddingInline: margin }}>
       <div className="table-head">
         <BalanceBeam left={judgement.left} right={judgement.right} limit={BALANCE_LIMIT} />
+        <RuleTools view={judgement.view} areWeightsShown={areWeightsShown} onToggleWeights={toggleWeights} />
         {SIDES.map((side) => doc.pages[side] && <PageRuler key={side} format={doc.format} left={pageLeft(doc, side) * scale} perInch={perInch} />)}
       </div>
       <div className="spread" style={size} onDoubleClick={(event) => isEditable && addMatAt(event, store.getState(), perInch)} onPointerDown={(event) => event.target === event.currentTarget && store.getState().select([])}>
         <VisionView seenAs={seenAs}>
           <SceneDrawing scene={scene} pictureSize={perInch * devicePixelRatio > 80 ? 'large' : 'medium'} underlay={<Grids doc={doc} />} />
         </VisionView>
+        {areWeightsShown && <WeightOverlay view={judgement.view} scale={scale} />}
         {comparison && <p className="comparison-tag">{comparison.words}</p>}
         {asRead(doc.mats).map((mat) => (
           <MatControl
@@ -146,7 +155,10 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
         ))}
       </div>
       <p className="tally" style={{ width: margin - 36 }}>
-        {CHECK_COUNT} checks, {judgement.notes.length === 1 ? '1 note' : `${judgement.notes.length} notes`}
+        <Link to="/help" target="_blank" aria-label={`${CHECK_COUNT} checks: what they look at (opens in a new tab)`}>
+          {CHECK_COUNT} checks
+        </Link>
+        , {judgement.notes.length === 1 ? '1 note' : `${judgement.notes.length} notes`}
       </p>
       {margin > 0 && <VisionChoice value={seenAs} width={margin - 36} onChange={setSeenAs} />}
       {isEditable && (
