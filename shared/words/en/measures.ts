@@ -108,7 +108,8 @@ export function measureSentence(measure: RuleMeasure, reading: RuleReading): str
     case 'symmetry':
       return say('The quarters nearly mirror each other.', 'The quarters mirror each other in part.', 'The quarters are quite different, as on most lively pages.');
     case 'sequence':
-      return `The ${ORDINAL[facts.heaviestQuarter]} quarter carries most. ${say('Area falls off as people read.', 'The order differs from reading in part.', 'The eye is asked to start elsewhere than where people read from.')}`;
+      if (level === 'high') return 'Counted as people read, the weight of the quarters falls off.';
+      return `The ${ORDINAL[facts.heaviestQuarter]} quarter is the fullest. ${say('', 'The order differs from reading in part.', 'The eye is asked to start elsewhere than where people read from.')}`;
     case 'cohesion':
       return say('Mats and pages have like shapes.', 'Some mats have the pages’ shape, others do not.', 'Most mats are of quite another shape than the whole.');
     case 'unity':
