@@ -12,6 +12,7 @@ export type PaneGroupId = Id<'pane-group'>;
 export type DetailId = Id<'detail'>;
 export type CutSizeId = Id<'cut-size'>;
 export type GrantId = Id<'grant'>;
+export type StashSheetId = Id<'stash-sheet'>;
 
 /** Which of the two facing pages. */
 export type Side = 'left' | 'right';
