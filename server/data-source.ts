@@ -16,9 +16,13 @@ import { SpreadEditEntity } from './entities/spread-edit-entity';
 import { SpreadEntity } from './entities/spread-entity';
 import { SpreadPrintEntity } from './entities/spread-print-entity';
 import { SpreadSnapshotEntity } from './entities/spread-snapshot-entity';
+import { StashReservationEntity } from './entities/stash-reservation-entity';
+import { StashSheetEntity } from './entities/stash-sheet-entity';
+import { StashSideEntity } from './entities/stash-side-entity';
 import { StudioEntity } from './entities/studio-entity';
 import { UserEntity } from './entities/user-entity';
 import { First1764547200000 } from './migrations/1764547200000-first';
+import { Stash1764633600000 } from './migrations/1764633600000-stash';
 
 /**
  * TypeORM's data source, not yet connected: call `initialize()`, then `runMigrations()`.
@@ -53,9 +57,12 @@ export function createDataSource(url: string): DataSource {
       SpreadEntity,
       SpreadPrintEntity,
       SpreadSnapshotEntity,
+      StashReservationEntity,
+      StashSheetEntity,
+      StashSideEntity,
       StudioEntity,
       UserEntity,
     ],
-    migrations: [First1764547200000],
+    migrations: [First1764547200000, Stash1764633600000],
   });
 }

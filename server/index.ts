@@ -7,7 +7,7 @@ import { createApp } from './app';
 import type { AppDeps, DemoAccounts } from './app-deps';
 import type { Config } from './config';
 import { createDataSource } from './data-source';
-import { createExportPool, createIntakePool } from './images/pools';
+import { createExportPool, createIntakePool, createReadingPool } from './images/pools';
 import { startJobRunner } from './jobs/job-runner';
 import { createLog } from './log';
 import { pruneLimits } from './middleware/attempt-limit';
@@ -55,9 +55,9 @@ export async function openApp(config: Config, options: OpenOptions = {}): Promis
   const incomingDir = join(config.dataDir, 'incoming');
   const incoming = await Incoming.open(incomingDir);
   await sweepIncoming(incomingDir, incoming, (pending) => removeUnlessKnown(dataSource, storage, pending));
-  const [intakePool, exportPool] = [createIntakePool(), createExportPool()];
+  const [intakePool, exportPool, readingPool] = [createIntakePool(), createExportPool(), createReadingPool()];
 
-  const base = { config, dataSource, storage, incoming, intakePool, exportPool, now };
+  const base = { config, dataSource, storage, incoming, intakePool, exportPool, readingPool, now };
   const services = createServices(base);
   const sessionStore = new SessionStore({ dataSource, now, maxAgeMs: SESSION_MAX_AGE_MS });
   const demoAccounts = config.mode === 'demo' ? (options.demoAccounts ?? null) : null;
@@ -80,7 +80,7 @@ export async function openApp(config: Config, options: OpenOptions = {}): Promis
       clearInterval(pruning);
       await stopServer(server);
       await runner.close();
-      await Promise.all([intakePool.close(), exportPool.close()]);
+      await Promise.all([intakePool.close(), exportPool.close(), readingPool.close()]);
       await incoming.close();
       await dataSource.destroy();
     },

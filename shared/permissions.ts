@@ -29,6 +29,8 @@ export const PERMISSIONS = {
   'cut-size:see': ['owner', 'designer', 'reviewer'],
   'cut-size:edit': ['owner', 'designer'],
   'format:edit': ['owner', 'designer'],
+  'stash:see': ['owner', 'designer', 'reviewer'],
+  'stash:edit': ['owner', 'designer'],
   'export:make': ['owner', 'designer', 'reviewer'],
   'data:download': ['owner'],
 } as const satisfies Record<string, readonly Holder[]>;
@@ -51,6 +53,7 @@ const SEES: Record<string, Permission> = {
   pile: 'pile:see',
   'cut-size': 'cut-size:see',
   format: 'cut-size:see',
+  stash: 'stash:see',
   export: 'spread:see',
   data: 'studio:see',
 };

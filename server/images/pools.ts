@@ -1,6 +1,8 @@
 import { availableParallelism } from 'node:os';
+import type { ReadColor } from '../../shared/colour/white-balance';
 import type { ExportResult, ExportTask } from './export-spread';
 import type { IntakeResult, IntakeTask } from './intake';
+import type { ReadingTask } from './read-sheet';
 import { WorkerPool } from './worker-pool';
 
 const MEBIBYTE = 1024 * 1024;
@@ -14,6 +16,7 @@ const MAX_WAITING_INTAKES = 400;
 const IDLE_MS = 60_000;
 
 export type IntakePool = WorkerPool<IntakeTask, IntakeResult>;
+export type ReadingPool = WorkerPool<ReadingTask, ReadColor>;
 export type ExportPool = WorkerPool<ExportTask, ExportResult>;
 
 export const createIntakePool = (): IntakePool =>
@@ -21,6 +24,16 @@ export const createIntakePool = (): IntakePool =>
     script: new URL('./intake-worker.ts', import.meta.url),
     size: Math.min(2, availableParallelism()),
     maxWaiting: MAX_WAITING_INTAKES,
+    idleMs: IDLE_MS,
+    ...INTAKE_LIMITS,
+  });
+
+/** Reads colours from photographed sheets: one at a time, with the limits of an intake. */
+export const createReadingPool = (): ReadingPool =>
+  new WorkerPool({
+    script: new URL('./reading-worker.ts', import.meta.url),
+    size: 1,
+    maxWaiting: 20,
     idleMs: IDLE_MS,
     ...INTAKE_LIMITS,
   });

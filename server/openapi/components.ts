@@ -8,6 +8,7 @@ import { editSchema, loggedEditSchema } from '../../shared/contracts/edits';
 import { jobSchema } from '../../shared/contracts/exports';
 import { grantSchema } from '../../shared/contracts/grants';
 import { pileSchema, printSchema, swatchSchema } from '../../shared/contracts/prints';
+import { stashSheetSchema, stashSideSchema } from '../../shared/contracts/stash';
 
 export type JsonSchema = Record<string, unknown>;
 
@@ -33,6 +34,8 @@ const NAMED: Readonly<Record<string, z.ZodType>> = {
   Session: sessionSchema,
   SpreadDetail: spreadDetailSchema,
   SpreadSummary: spreadSummarySchema,
+  StashSheet: stashSheetSchema,
+  StashSide: stashSideSchema,
   Studio: studioSchema,
   Swatch: swatchSchema,
 };

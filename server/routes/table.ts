@@ -14,6 +14,7 @@ import { pictureRoutes } from './pictures';
 import { pileRoutes } from './piles';
 import { printRoutes } from './prints';
 import { spreadRoutes } from './spreads';
+import { stashRoutes } from './stash';
 import { studioRoutes } from './studios';
 import { uploadRoutes } from './uploads';
 
@@ -36,6 +37,7 @@ export function createRoutes(deps: AppDeps): readonly Route[] {
     ...formatRoutes(services),
     ...exportRoutes({ ...services, storage }),
     ...jobRoutes(services),
+    ...stashRoutes(services),
   ];
   const descriptionRoute = publicRoute({
     method: 'get',

@@ -1,6 +1,6 @@
 import type { DataSource } from 'typeorm';
 import type { Config } from '../config';
-import type { ExportPool, IntakePool } from '../images/pools';
+import type { ExportPool, IntakePool, ReadingPool } from '../images/pools';
 import type { Incoming } from '../storage/incoming';
 import { requireFreeDisk } from '../storage/free-disk';
 import type { Storage } from '../storage/storage';
@@ -15,7 +15,11 @@ import { JobService } from './job-service';
 import { PileService } from './pile-service';
 import { PrintService } from './print-service';
 import { createReceiveUpload, type ReceiveUpload } from './receive-upload';
+import { ReservationService } from './reservation-service';
 import { SpreadService } from './spread-service';
+import { StashImport } from './stash-import';
+import { StashReading } from './stash-reading';
+import { StashService } from './stash-service';
 import { StudioService } from './studio-service';
 import { UploadService } from './upload-service';
 
@@ -36,6 +40,10 @@ export interface Services {
   /** Reads the body of an upload to disk. */
   readonly receive: ReceiveUpload;
   readonly exports: ExportService;
+  readonly stash: StashService;
+  readonly stashImport: StashImport;
+  readonly stashReading: StashReading;
+  readonly reservations: ReservationService;
 }
 
 export interface ServiceDeps {
@@ -45,10 +53,11 @@ export interface ServiceDeps {
   readonly incoming: Incoming;
   readonly intakePool: IntakePool;
   readonly exportPool: ExportPool;
+  readonly readingPool: ReadingPool;
   readonly now: () => Date;
 }
 
-export function createServices({ config, dataSource, storage, incoming, intakePool, exportPool, now }: ServiceDeps): Services {
+export function createServices({ config, dataSource, storage, incoming, intakePool, exportPool, readingPool, now }: ServiceDeps): Services {
   const { freeDiskBytes, studioQuotaBytes, accountQuotaBytes } = config.limits;
   const jobs = new JobService(dataSource, now);
   const formats = new FormatService(dataSource, now);
@@ -67,5 +76,9 @@ export function createServices({ config, dataSource, storage, incoming, intakePo
     uploads: new UploadService({ dataSource, storage, incoming, pool: intakePool, freeDiskBytes, now }),
     receive: createReceiveUpload(incoming, (bytes) => requireFreeDisk(storage, bytes, freeDiskBytes)),
     exports: new ExportService({ dataSource, storage, incoming, pool: exportPool, jobs, freeDiskBytes, now }),
+    stash: new StashService(dataSource, now),
+    stashImport: new StashImport(dataSource, now),
+    stashReading: new StashReading(readingPool),
+    reservations: new ReservationService(dataSource, now),
   };
 }

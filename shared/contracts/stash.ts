@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { COLOR_SOURCES, MAX_PALETTE, SIDE_PATTERNS, type StashSheet } from '../model/stash';
+import { COLOR_SOURCES, MAX_PALETTE, SIDE_PATTERNS, type StashFacts, type StashSheet } from '../model/stash';
 import { hexSchema, idSchema, lineSchema, revisionSchema, sizeSchema } from './common';
 
 /** Most kinds of sheet in one stash. */
@@ -32,13 +32,13 @@ export const stashFactsSchema = z.strictObject({
 });
 
 export const createStashSheetSchema = stashFactsSchema.extend({ id: idSchema });
-export type CreateStashSheet = z.infer<typeof createStashSheetSchema>;
+export type CreateStashSheet = StashFacts & { readonly id: string };
 
 export const updateStashSheetSchema = stashFactsSchema.partial().extend({
   /** The revision last seen; an older one than the server's is a 409. */
   baseRevision: revisionSchema,
 });
-export type UpdateStashSheet = z.infer<typeof updateStashSheetSchema>;
+export type UpdateStashSheet = Partial<StashFacts> & { readonly baseRevision: number };
 
 /** What many sheets can be given at once; `quantityBy` adds to each one's own quantity. */
 export const bulkStashSchema = z.strictObject({

@@ -74,6 +74,7 @@ export interface StashRow {
   readonly line: number;
   readonly id: string | null;
   readonly facts: StashFacts;
+  readonly text: string;
 }
 
 /** A row that cannot, with its own text, so that nothing is lost. */
@@ -89,6 +90,8 @@ export interface ReadStash {
   readonly faults: readonly StashRowFault[];
   /** The heading line, as it stands in the file; empty where it could not be used. */
   readonly heading: string;
+  /** The headings that we know. */
+  readonly columns: ReadonlySet<string>;
 }
 
 /** Most rows of one file. */
@@ -97,27 +100,56 @@ export const MAX_STASH_ROWS = 2000;
 /** Reads a stash file. Every row comes back: taken, or with what is wrong with it. */
 export function readStashCsv(csv: string): ReadStash {
   const [heading, ...records] = parseCsv(csv);
-  if (!heading) return { rows: [], faults: [{ line: 1, message: 'The file is empty: it needs a line of headings, then one line per sheet.', text: '' }], heading: '' };
+  if (!heading) return { rows: [], faults: [{ line: 1, message: 'The file is empty: it needs a line of headings, then one line per sheet.', text: '' }], heading: '', columns: new Set() };
   const names = heading.cells.map((cell) => cell.trim().toLowerCase());
   const missing = (['name', 'colour'] as const).filter((column) => !names.includes(column) && !(column === 'colour' && names.includes('color')));
   if (missing.length > 0) {
     const message = `The first line has no heading “${missing.join('” and no “')}”: its headings can be ${STASH_COLUMNS.join(', ')}.`;
-    return { rows: [], faults: [heading, ...records].map(({ line, text }, i) => ({ line, text, message: i === 0 ? message : 'Not read, since the headings do not fit.' })), heading: '' };
+    return { rows: [], faults: [heading, ...records].map(({ line, text }, i) => ({ line, text, message: i === 0 ? message : 'Not read, since the headings do not fit.' })), heading: '', columns: new Set() };
   }
   const rows: StashRow[] = [];
   const faults: StashRowFault[] = [];
   records.forEach(({ line, cells, text, isBroken }, i) => {
     const row = isBroken ? 'A quote is opened and not closed, or text follows a closed one.' : i >= MAX_STASH_ROWS ? `A file brings in ${MAX_STASH_ROWS} rows at most: put the rest into another one.` : readRow(names, cells);
     if (typeof row === 'string') faults.push({ line, message: row, text });
-    else rows.push({ line, ...row });
+    else rows.push({ line, text, ...row });
   });
-  return { rows, faults, heading: heading.text };
+  return { rows, faults, heading: heading.text, columns: new Set(names.map((name) => name.replace('color', 'colour'))) };
+}
+
+/** A sheet as a row changes it: only in the columns that the file has, so that a short file loses nothing. */
+export function mergeStashRow(there: StashFacts, row: StashFacts, columns: ReadonlySet<string>): StashFacts {
+  const pick = <K extends keyof StashFacts>(key: K, column: StashColumn): StashFacts[K] => (columns.has(column) ? row[key] : there[key]);
+  const hasSize = columns.has('width') && columns.has('height');
+  const [front, back] = row.sides;
+  const [frontThere, backThere] = there.sides;
+  const isSameFront = front.hex === frontThere.hex;
+  const mergedFront: StashSide = {
+    hex: front.hex,
+    source: columns.has('colour from') || !isSameFront ? front.source : frontThere.source,
+    uncertainty: columns.has('uncertainty') || !isSameFront ? front.uncertainty : frontThere.uncertainty,
+    pattern: columns.has('pattern') ? front.pattern : frontThere.pattern,
+    palette: columns.has('palette') ? front.palette : frontThere.palette,
+  };
+  const mergedBack = columns.has('back colour') ? back : backThere;
+  return {
+    name: row.name,
+    maker: pick('maker', 'maker'),
+    texture: pick('texture', 'texture'),
+    place: pick('place', 'place'),
+    width: hasSize ? row.width : there.width,
+    height: hasSize ? row.height : there.height,
+    quantity: pick('quantity', 'quantity'),
+    lowAt: pick('lowAt', 'low at'),
+    price: pick('price', 'price'),
+    sides: mergedBack ? [mergedFront, mergedBack] : [mergedFront],
+  };
 }
 
 const FIELD_COLUMNS: Readonly<Record<string, string>> = { lowAt: 'low at' };
 
 /** One row, or the sentence that says what is wrong with it. */
-function readRow(names: readonly string[], cells: readonly string[]): Omit<StashRow, 'line'> | string {
+function readRow(names: readonly string[], cells: readonly string[]): Omit<StashRow, 'line' | 'text'> | string {
   if (cells.length > names.length && cells.slice(names.length).some((cell) => cell.trim() !== '')) {
     return `There are ${cells.length} cells under ${names.length} headings: put quotes round a cell with a comma in it.`;
   }

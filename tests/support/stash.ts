@@ -1,5 +1,5 @@
 import { inches } from '#shared/model/length';
-import type { StashSheet, StashSide } from '#shared/model/stash';
+import type { StashFacts, StashSheet, StashSide } from '#shared/model/stash';
 import { idOf } from './builders';
 
 export const buildSide = (parts: Partial<StashSide> = {}): StashSide => ({
@@ -11,6 +11,21 @@ export const buildSide = (parts: Partial<StashSide> = {}): StashSide => ({
   ...parts,
 });
 
+/** What a person enters of four sheets of a deep teal. */
+export const buildFacts = (parts: Partial<StashFacts> = {}): StashFacts => ({
+  name: 'Harbour',
+  maker: '',
+  texture: '',
+  place: '',
+  width: inches(12),
+  height: inches(12),
+  quantity: 4,
+  lowAt: null,
+  price: null,
+  sides: [buildSide()],
+  ...parts,
+});
+
 let serial = 0;
 
 /** Four free 12 × 12 in sheets of a deep teal. */
@@ -19,18 +34,9 @@ export function buildSheet({ hex, ...parts }: Partial<StashSheet> & { readonly h
   return {
     id: idOf(serial, 21),
     studioId: idOf(1, 9),
-    name: 'Harbour',
-    maker: '',
-    texture: '',
-    place: '',
-    width: inches(12),
-    height: inches(12),
-    quantity: 4,
-    lowAt: null,
-    price: null,
+    ...buildFacts({ sides: [buildSide(hex === undefined ? {} : { hex })] }),
     reserved: 0,
     revision: 0,
-    sides: [buildSide(hex === undefined ? {} : { hex })],
     ...parts,
   };
 }

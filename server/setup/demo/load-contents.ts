@@ -13,6 +13,7 @@ import { presentPrint } from '../../presenters/present-print';
 import { readDocument } from '../../services/spread-service';
 import { DEMO_PILES, DEMO_PRINTS, SHARED_PILE, type DemoPrint } from './prints';
 import { buildDemoSpreads } from './spreads';
+import { DEMO_STASH } from './stash';
 
 const PHOTOS = new URL('./photos/', import.meta.url);
 const ALBUM_TITLE = 'Long weekends';
@@ -46,6 +47,7 @@ export async function loadContents(deps: AppDeps, owner: Owner): Promise<void> {
     const size = { id: randomUUID(), name: `${width} × ${height} in`, width: inches(width), height: inches(height) };
     await deps.services.cutSizes.create(owner.studioId, { ...size, stock: CUT_SIZE_STOCKS[2], kind: 'hand', sets: [] });
   }
+  for (const facts of DEMO_STASH) await deps.services.stash.create(owner.studioId, { id: randomUUID(), ...facts });
   await makeSpreads(deps, owner, printByFile);
 }
 

@@ -3,6 +3,7 @@ import type { DocumentFault } from '../../model/document-faults';
 import { faultSentence } from './document';
 import { EXPORT_TOO_HEAVY } from './exports';
 import { fileTooLargeSentence, pictureRefusalSentence } from './pictures';
+import { readingRefusalSentence, stashShortSentence } from './stash';
 
 interface Words {
   /** A few words, the same for every occurrence of the code. */
@@ -40,15 +41,19 @@ const WORDS: Record<ErrorCode, Words> = {
         : `There is a ${text(what, 'thing')} with this id already: reload and try again.`,
   },
   'in-use': { title: 'In use', sentence: inUse },
+  'stash-short': { title: 'Not enough sheets', sentence: stashShortSentence },
   'stale-revision': {
     title: 'Changed meanwhile',
-    sentence: ({ print }) =>
-      print === undefined
+    sentence: ({ print, sheet }) =>
+      sheet !== undefined
+        ? 'Somebody changed these sheets meanwhile: look at how they stand now and make your change again.'
+        : print === undefined
         ? 'Somebody changed the same part of this spread meanwhile: look at what differs before you save yours.'
         : 'Somebody changed this print meanwhile: look at how it stands now and make your change again.',
   },
   'document-refused': { title: 'The spread does not fit together', sentence: documentRefused },
   'picture-refused': { title: 'Not a picture that can be used', sentence: pictureRefusalSentence },
+  'reading-refused': { title: 'The colour cannot be read', sentence: readingRefusalSentence },
   'too-large': {
     title: 'Too large',
     sentence: ({ maxBytes }) =>

@@ -5,6 +5,7 @@ import { createRoutes } from '#server/routes/table';
 import type { Role } from '#shared/model/people';
 import type { SpreadDetail } from '#shared/contracts/albums';
 import { beginSpread, insertPrint, withApp, type Person } from '../../support/app';
+import { buildFacts } from '../../support/stash';
 
 /**
  * Who gets what, for every route of the table: the answer's status for a member of each role, for the owner of
@@ -67,6 +68,16 @@ const MATRIX: readonly Row[] = [
   row('patch /cut-sizes/:cutSizeId', 400, 400, 403, 404),
   row('get /studios/:studioId/formats', 200, 200, 200, 404),
   row('post /studios/:studioId/formats', 400, 400, 403, 404),
+  row('get /studios/:studioId/stash', 200, 200, 200, 404),
+  row('post /studios/:studioId/stash', 400, 400, 403, 404),
+  row('patch /stash-sheets/:sheetId', 400, 400, 403, 404),
+  row('delete /stash-sheets/:sheetId', 200, 200, 403, 404),
+  row('post /studios/:studioId/stash/bulk', 400, 400, 403, 404),
+  row('get /studios/:studioId/stash/file', 200, 200, 200, 404),
+  row('post /studios/:studioId/stash/import', 400, 400, 403, 404),
+  row('post /studios/:studioId/stash/readings', 422, 422, 403, 404),
+  row('get /spreads/:spreadId/reservations', 200, 200, 200, 404),
+  row('post /spreads/:spreadId/reservations', 400, 400, 403, 404),
   row('delete /piles/:pileId', 200, 200, 403, 404),
   row('delete /cut-sizes/:cutSizeId', 200, 200, 403, 404),
   row('delete /grants/:grantId', 200, 200, 404, 404),
@@ -104,10 +115,12 @@ describe('access', () => {
     await owner.agent.post(`/api/studios/${studioId}/piles`).send({ id: pileId, name: 'Pier' }).expect(201);
     const cutSize = { id: cutSizeId, name: 'Square', width: 4064, height: 4064, stock: 'card', kind: 'hand', sets: [] };
     await owner.agent.post(`/api/studios/${studioId}/cut-sizes`).send(cutSize).expect(201);
+    const sheetId = randomUUID();
+    await owner.agent.post(`/api/studios/${studioId}/stash`).send({ id: sheetId, ...buildFacts() }).expect(201);
     const scope = { kind: 'spread-link', spreadId: spread.id, mayComment: false };
     await owner.agent.post(`/api/studios/${studioId}/grants`).send({ id: grantId, scope, expiresAt: null }).expect(201);
     await deps.services.jobs.enqueue({ id: jobId, studioId, spreadId: spread.id, kind: 'test.none', payload: {}, dedupeKey: null, createdBy: null });
-    return { studioId, albumId: spread.albumId, spreadId: spread.id, printId: print.id, pileId, cutSizeId, grantId, jobId, size: 'small' };
+    return { studioId, albumId: spread.albumId, spreadId: spread.id, printId: print.id, pileId, cutSizeId, sheetId, grantId, jobId, size: 'small' };
   }
 
   const shown = (status: number): number => (status >= 200 && status < 300 ? 200 : status);
