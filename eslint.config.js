@@ -26,7 +26,7 @@ const FROM_ROUTER = ['^(@/|(\\.\\./)+)router$', 'Imports run one way: lib and co
 const FROM_ROUTES = ['^(@/|(\\.\\./)+)routes/', 'Imports run one way: lib and components, features, routes, router.'];
 const FROM_FEATURES = ['^(@/|(\\.\\./)+)features/', 'lib and components know no feature.'];
 
-const FEATURE_NAMES = ['session', 'albums', 'prints', 'composer', 'help'];
+const FEATURE_NAMES = ['session', 'albums', 'prints', 'composer', 'help', 'stash'];
 
 /** A feature reaches its own files, by either spelling, and no other feature's. */
 const featureConfig = (name) => ({

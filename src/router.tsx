@@ -27,6 +27,7 @@ export const createRouter = () =>
             { index: true, lazy: () => import('./routes/home') },
             { path: 'studios/:studioId', lazy: () => import('./routes/studio') },
             { path: 'studios/:studioId/prints', lazy: () => import('./routes/studio-prints') },
+            { path: 'studios/:studioId/stash', lazy: () => import('./routes/studio-stash') },
             { path: 'albums/:albumId', lazy: () => import('./routes/album') },
             {
               path: 'spreads/:spreadId',

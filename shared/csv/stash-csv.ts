@@ -3,6 +3,7 @@ import { stashFactsSchema } from '../contracts/stash';
 import { UNITS_PER_INCH, UNITS_PER_MM, type Length } from '../model/length';
 import { COLOR_SOURCES, DEFAULT_SHEET_SIDE, SIDE_PATTERNS, UNCERTAINTY, type ColorSource, type SidePattern, type StashFacts, type StashSheet, type StashSide } from '../model/stash';
 import { formatLength } from '../words/measure';
+import { readLength } from '../words/read-measure';
 import { formatCsv, parseCsv, readCell } from './csv';
 
 /** Headings of the file, in the order in which they are written. All but `name` and `colour` may be left out. */
@@ -237,12 +238,9 @@ function price(text: string): number {
   return Math.round(value * 100);
 }
 
-/** `12`, `8.5`, `8 1/2` or `1/2`. */
 function length(text: string, unit: 'in' | 'mm' | 'cm', column: string): Length {
   if (text === '') return DEFAULT_SHEET_SIDE;
-  const parts = /^(?:(\d+(?:[.,]\d+)?)(?:\s+(\d+)\/(\d+))?|(\d+)\/(\d+))$/.exec(text);
-  if (!parts) throw new RowFault(column, `holds “${short(text)}”: write 12, 8.5 or 8 1/2`);
-  const [, number = '0', top = parts[4] ?? '0', bottom = parts[5] ?? '1'] = parts;
-  const value = Number(number.replace(',', '.')) + Number(top) / Number(bottom);
-  return Math.round(value * (unit === 'in' ? UNITS_PER_INCH : unit === 'mm' ? UNITS_PER_MM : UNITS_PER_MM * 10));
+  const read = readLength(text, unit);
+  if (read === null) throw new RowFault(column, `holds “${short(text)}”: write 12, 8.5 or 8 1/2`);
+  return read;
 }

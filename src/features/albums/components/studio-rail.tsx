@@ -21,13 +21,16 @@ export function StudioRail({ studio }: { readonly studio: Studio }) {
         aria-controls="rail-more"
         onClick={() => setIsOpen(!isOpen)}
       >
-        {isOpen ? 'Fold up' : 'Albums, prints and members'}
+        {isOpen ? 'Fold up' : 'Albums, prints, stash and members'}
       </button>
       <div id="rail-more" className={isOpen ? undefined : 'max-lg:hidden'}>
         <RailAlbums studio={studio} />
         <ul className="rail-list rail-more">
           <li>
             <NavLink to={`/studios/${studio.id}/prints`}>Prints</NavLink>
+          </li>
+          <li>
+            <NavLink to={`/studios/${studio.id}/stash`}>Stash</NavLink>
           </li>
         </ul>
         <RailMembers studio={studio} />
