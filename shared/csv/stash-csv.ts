@@ -2,8 +2,7 @@ import { parseColor } from '../colour/css-color';
 import { stashFactsSchema } from '../contracts/stash';
 import { UNITS_PER_INCH, UNITS_PER_MM, type Length } from '../model/length';
 import { COLOR_SOURCES, DEFAULT_SHEET_SIDE, SIDE_PATTERNS, UNCERTAINTY, type ColorSource, type SidePattern, type StashFacts, type StashSheet, type StashSide } from '../model/stash';
-import { formatLength } from '../words/measure';
-import { readLength } from '../words/read-measure';
+import { formatLength, parseLength } from '../words/measure';
 import { formatCsv, parseCsv, readCell } from './csv';
 
 /** Headings of the file, in the order in which they are written. All but `name` and `colour` may be left out. */
@@ -240,7 +239,7 @@ function price(text: string): number {
 
 function length(text: string, unit: 'in' | 'mm' | 'cm', column: string): Length {
   if (text === '') return DEFAULT_SHEET_SIDE;
-  const read = readLength(text, unit);
+  const read = parseLength(text, unit);
   if (read === null) throw new RowFault(column, `holds “${short(text)}”: write 12, 8.5 or 8 1/2`);
   return read;
 }

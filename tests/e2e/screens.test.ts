@@ -81,6 +81,28 @@ const SCREENS: readonly Screen[] = [
   },
   { name: 'an album', role: 'designer', path: () => paths.album, open: heading('On the grass') },
   { name: 'the prints of a studio', role: 'designer', path: () => `${paths.studio}/prints`, open: heading('The beach') },
+  { name: 'the stash', role: 'designer', path: () => `${paths.studio}/stash`, open: (page) => page.getByRole('rowheader', { name: /Harbour/ }).waitFor() },
+  {
+    name: 'a patterned sheet of the stash',
+    role: 'designer',
+    path: () => `${paths.studio}/stash`,
+    open: async (page) => {
+      await press(page, 'More for Deck chair');
+      await page.getByRole('menuitem', { name: 'Edit' }).click();
+      await page.getByRole('dialog', { name: 'Deck chair' }).waitFor();
+    },
+  },
+  {
+    name: 'bringing sheets in',
+    role: 'designer',
+    path: () => `${paths.studio}/stash`,
+    open: async (page) => {
+      await press(page, 'Bring in CSV');
+      await page.getByRole('textbox', { name: 'Rows' }).fill('name,colour\nFog,greyish');
+      await page.getByText('One row does not fit').waitFor();
+    },
+  },
+  { name: 'the stash as a reviewer sees it', role: 'reviewer', path: () => `${paths.studio}/stash`, open: (page) => page.getByRole('rowheader', { name: /Harbour/ }).waitFor() },
   {
     name: 'Sort with a print open',
     role: 'designer',

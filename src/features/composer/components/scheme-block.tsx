@@ -5,6 +5,7 @@ import type { Scheme, SchemeRole } from '#shared/model/spread';
 import { useAnnounce } from '@/components/live-region';
 import { useComposer } from '@/features/composer/hooks/composer-context';
 import { holdHandlers } from '@/features/composer/hooks/hold-handlers';
+import { SchemeStash } from './scheme-stash';
 
 const CHARACTER_WORDS = { echo: 'what is in the photos', quiet: 'photos lead', lift: 'one across the wheel' } as const;
 export const SCHEME_NAMES = { echo: 'Echo', quiet: 'Quiet', lift: 'Lift' } as const;
@@ -75,6 +76,7 @@ export function SchemeBlock({ suggestion, isInUse, isEditable, hasBefore, onAppl
           </li>
         ))}
       </ul>
+      <SchemeStash scheme={scheme} args={suggestion.args} isWide={character === 'echo'} isEditable={isEditable} onApply={onApply} />
     </div>
   );
 }

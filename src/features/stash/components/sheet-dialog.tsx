@@ -1,8 +1,7 @@
 import { useState, type FormEvent } from 'react';
 import { inches, millimetres } from '#shared/model/length';
 import type { StashFacts, StashSide, StashSides } from '#shared/model/stash';
-import { formatLength, type Unit } from '#shared/words/measure';
-import { readLength } from '#shared/words/read-measure';
+import { formatLength, parseLength, type Unit } from '#shared/words/measure';
 import { Button } from '@/components/button';
 import { Dialog } from '@/components/dialog';
 import { TextField } from '@/components/field';
@@ -118,7 +117,7 @@ export function SheetDialog({ studioId, unit, facts, title, action, onSave, onCl
 /** What was typed, or what does not fit. A length that was not touched stays exactly as it was. */
 function readTexts(texts: Texts, before: StashFacts, unit: Unit): { readonly facts: StashFacts } | { readonly faults: Faults } {
   const shown = textsOf(before, unit);
-  const length = (key: 'width' | 'height') => (texts[key] === shown[key] ? before[key] : readLength(texts[key], unit));
+  const length = (key: 'width' | 'height') => (texts[key] === shown[key] ? before[key] : parseLength(texts[key], unit));
   const [width, height, quantity, price] = [length('width'), length('height'), readCount(texts.quantity), readPrice(texts.price)];
   const lowAt = texts.lowAt.trim() === '' ? null : readCount(texts.lowAt);
   const most = unit === 'in' ? inches(390) : millimetres(9999);
