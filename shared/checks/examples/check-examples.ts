@@ -15,6 +15,7 @@ import { noTitle } from './no-title';
 import { nothingShared } from './nothing-shared';
 import { pagesUnequal } from './pages-unequal';
 import type { CheckExamples } from './parts';
+import { panesInseparable } from './panes-inseparable';
 import { photoSinks } from './photo-sinks';
 import { printSmallerThanPhoto } from './print-smaller-than-photo';
 import { seamThroughKeepZone } from './seam-through-keep-zone';
@@ -30,6 +31,7 @@ export const CHECK_EXAMPLES: CheckExamples = {
   'never-cut': neverCut,
   'keep-zone-cut': keepZoneCut,
   'seam-through-keep-zone': seamThroughKeepZone,
+  'panes-inseparable': panesInseparable,
   'more-placements-than-copies': morePlacementsThanCopies,
   'print-smaller-than-photo': printSmallerThanPhoto,
   'whole-overhangs': wholeOverhangs,

@@ -39,6 +39,12 @@ export const CHECK_HELP: Readonly<Record<CheckId, CheckHelp>> = {
     rule: 'Speaks where no single pane holds the keep zone with the cutting tolerance to spare.',
     right: 'The whole picture has slid under the panes until one of them holds his face.',
   },
+  'panes-inseparable': {
+    name: 'Panes that lock into each other',
+    why: 'A trimmer cuts from edge to edge. The panes of a pinwheel hold each other, so that every cut that frees one goes through another: they cannot all come out of one print.',
+    rule: 'Speaks where no order of straight cuts from edge to edge parts the panes of a split print.',
+    right: 'One cut across parts upper and lower panes, and one more parts each pair.',
+  },
   'more-placements-than-copies': {
     name: 'More places than prints',
     why: 'One print is one piece of paper. Two pieces can come out of it only where they do not overlap and straight cuts from edge to edge part them.',
