@@ -27,7 +27,7 @@ const STOP_WITHIN_MS = 5_000;
 export interface OpenOptions {
   /** Null where something else serves the pages. */
   readonly pagesDir?: string | null;
-  /** Told by `/api/health` in demo mode. */
+  /** Told by `/api/health` in demo mode; in any other nobody gets in with them, should an earlier demo have left them behind. */
   readonly demoAccounts?: DemoAccounts;
   readonly log?: Logger;
   readonly now?: () => Date;
@@ -57,10 +57,11 @@ export async function openApp(config: Config, options: OpenOptions = {}): Promis
   await sweepIncoming(incomingDir, incoming, (pending) => removeUnlessKnown(dataSource, storage, pending));
   const [intakePool, exportPool, readingPool] = [createIntakePool(), createExportPool(), createReadingPool()];
 
-  const base = { config, dataSource, storage, incoming, intakePool, exportPool, readingPool, now };
+  const demoAccounts = config.mode === 'demo' ? (options.demoAccounts ?? null) : null;
+  const closedAccounts = new Set(demoAccounts ? [] : options.demoAccounts?.map(({ email }) => email));
+  const base = { config, dataSource, storage, incoming, intakePool, exportPool, readingPool, closedAccounts, now };
   const services = createServices(base);
   const sessionStore = new SessionStore({ dataSource, now, maxAgeMs: SESSION_MAX_AGE_MS });
-  const demoAccounts = config.mode === 'demo' ? (options.demoAccounts ?? null) : null;
   const deps: AppDeps = { ...base, log, services, sessionStore, passport: createPassport(services.accounts), demoAccounts };
 
   const handlers = { [EXPORT_KIND]: services.exports.run.bind(services.exports) };

@@ -16,6 +16,8 @@ interface Deps {
   readonly now: () => Date;
   readonly studioQuotaBytes: number;
   readonly accountQuotaBytes: number;
+  /** E-mail addresses of accounts that nobody can use: their passwords are public. */
+  readonly closedAccounts: ReadonlySet<string>;
 }
 
 type NewAccount = Pick<SignUp, 'email' | 'password' | 'name'>;
@@ -78,11 +80,16 @@ export class AccountService {
   async verify(email: string, password: string): Promise<UserEntity | null> {
     const user = await this.deps.dataSource.manager.findOneBy(UserEntity, { email });
     const matches = await verifyPassword(user?.passwordHash ?? null, password);
-    return matches ? user : null;
+    return matches ? this.unlessClosed(user) : null;
   }
 
-  find(id: string): Promise<UserEntity | null> {
-    return this.deps.dataSource.manager.findOneBy(UserEntity, { id });
+  /** Null where there is no such account that can be used. */
+  async find(id: string): Promise<UserEntity | null> {
+    return this.unlessClosed(await this.deps.dataSource.manager.findOneBy(UserEntity, { id }));
+  }
+
+  private unlessClosed(user: UserEntity | null): UserEntity | null {
+    return user && !this.deps.closedAccounts.has(user.email) ? user : null;
   }
 
   /** @throws AppError('unauthenticated') when the account is gone. */

@@ -54,15 +54,18 @@ export interface ServiceDeps {
   readonly intakePool: IntakePool;
   readonly exportPool: ExportPool;
   readonly readingPool: ReadingPool;
+  /** E-mail addresses of accounts that nobody can use. */
+  readonly closedAccounts: ReadonlySet<string>;
   readonly now: () => Date;
 }
 
-export function createServices({ config, dataSource, storage, incoming, intakePool, exportPool, readingPool, now }: ServiceDeps): Services {
+export function createServices(deps: ServiceDeps): Services {
+  const { config, dataSource, storage, incoming, intakePool, exportPool, readingPool, closedAccounts, now } = deps;
   const { freeDiskBytes, studioQuotaBytes, accountQuotaBytes } = config.limits;
   const jobs = new JobService(dataSource, now);
   const formats = new FormatService(dataSource, now);
   return {
-    accounts: new AccountService({ dataSource, now, studioQuotaBytes, accountQuotaBytes }),
+    accounts: new AccountService({ dataSource, now, studioQuotaBytes, accountQuotaBytes, closedAccounts }),
     studios: new StudioService(dataSource),
     grants: new GrantService(dataSource, now),
     formats,
