@@ -16,6 +16,8 @@ export const PERMISSIONS = {
   'album:edit': ['owner', 'designer'],
   'album:delete': ['owner'],
   'spread:see': ['owner', 'designer', 'reviewer', 'link', 'worktable'],
+  /** What was there before, and who changed it: more than the spread itself shows. */
+  'spread:history': ['owner', 'designer', 'reviewer'],
   'spread:edit': ['owner', 'designer'],
   'spread:comment': ['owner', 'designer', 'reviewer', 'commenting-link'],
   'spread:delete': ['owner'],

@@ -16,7 +16,7 @@ export const editRoutes = ({ dataSource, services: { spreads, edits } }: AppDeps
     summary: 'The log of edits after a revision, oldest first',
     params: spreadParamsSchema,
     query: editQuerySchema,
-    needs: 'spread:see',
+    needs: 'spread:history',
     on: ({ spreadId }) => spreads.locate(spreadId),
     answer: { status: 200, schema: editListSchema },
     handle: async ({ subject, query }) => ({

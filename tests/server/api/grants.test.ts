@@ -36,6 +36,12 @@ describe('a link to a spread', () => {
     await app().stranger().patch(`/api/spreads/${spread.id}`).set(GRANT_HEADER, token).send({ title: 'x' }).expect(403);
   });
 
+  it('tells nothing of what was there before, nor who changed it', async () => {
+    const { token } = await link();
+    const refused = await holder(token, `/api/spreads/${spread.id}/edits`).expect(403);
+    expect(JSON.stringify(refused.body)).not.toContain('Maud Ferrier');
+  });
+
   it('shows the pictures of that spread’s prints', async () => {
     const { token } = await link();
     const [shown, hidden] = [await insertPrint(app().deps, owner.studioId), await insertPrint(app().deps, owner.studioId)];
