@@ -2,6 +2,7 @@ import 'reflect-metadata';
 import { DataSource } from 'typeorm';
 import { AlbumEntity } from './entities/album-entity';
 import { AuditEntryEntity } from './entities/audit-entry-entity';
+import { CheckSettingEntity } from './entities/check-setting-entity';
 import { CutSizeEntity } from './entities/cut-size-entity';
 import { FileEntity } from './entities/file-entity';
 import { GrantEntity } from './entities/grant-entity';
@@ -23,6 +24,7 @@ import { StudioEntity } from './entities/studio-entity';
 import { UserEntity } from './entities/user-entity';
 import { First1764547200000 } from './migrations/1764547200000-first';
 import { Stash1764633600000 } from './migrations/1764633600000-stash';
+import { CheckSettings1764633700000 } from './migrations/1764633700000-check-settings';
 
 /**
  * TypeORM's data source, not yet connected: call `initialize()`, then `runMigrations()`.
@@ -43,6 +45,7 @@ export function createDataSource(url: string): DataSource {
     entities: [
       AlbumEntity,
       AuditEntryEntity,
+      CheckSettingEntity,
       CutSizeEntity,
       FileEntity,
       GrantEntity,
@@ -63,6 +66,6 @@ export function createDataSource(url: string): DataSource {
       StudioEntity,
       UserEntity,
     ],
-    migrations: [First1764547200000, Stash1764633600000],
+    migrations: [First1764547200000, Stash1764633600000, CheckSettings1764633700000],
   });
 }

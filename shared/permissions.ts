@@ -33,6 +33,8 @@ export const PERMISSIONS = {
   'format:edit': ['owner', 'designer'],
   'stash:see': ['owner', 'designer', 'reviewer'],
   'stash:edit': ['owner', 'designer'],
+  'check:see': ['owner', 'designer', 'reviewer'],
+  'check:edit': ['owner', 'designer'],
   'export:make': ['owner', 'designer', 'reviewer'],
   'data:download': ['owner'],
 } as const satisfies Record<string, readonly Holder[]>;
@@ -56,6 +58,7 @@ const SEES: Record<string, Permission> = {
   'cut-size': 'cut-size:see',
   format: 'cut-size:see',
   stash: 'stash:see',
+  check: 'check:see',
   export: 'spread:see',
   data: 'studio:see',
 };

@@ -1,4 +1,5 @@
 import type { SpreadState } from '../../shared/contracts/albums';
+import type { CheckSettings } from '../../shared/contracts/check-settings';
 import type { Actor } from '../../shared/model/people';
 import type { Print } from '../../shared/model/print';
 import type { SpreadDocument, TrimSettings } from '../../shared/model/spread';
@@ -6,6 +7,7 @@ import { can } from '../../shared/permissions';
 import type { SpreadEntity } from '../entities/spread-entity';
 import { readDocument, targetOfSpread } from '../services/spread-service';
 import type { SpreadSetting } from '../services/spread-setting';
+import { presentCheckSetting } from './present-check-setting';
 import { presentPrint } from './present-print';
 
 interface SpreadAnswer {
@@ -28,6 +30,7 @@ interface SpreadDetailAnswer extends SpreadAnswer {
   readonly trim: TrimSettings;
   readonly prints: readonly Print[];
   readonly usedElsewhere: Readonly<Record<string, number>>;
+  readonly checks: CheckSettings;
   readonly may: { readonly edit: boolean; readonly comment: boolean; readonly export: boolean };
 }
 
@@ -55,6 +58,7 @@ export function presentSpreadDetail(spread: SpreadEntity, setting: SpreadSetting
     prints: setting.prints.map(presentPrint),
     // Other spreads are no business of somebody who holds a link to this one.
     usedElsewhere: can(actor, 'album:see', target) === 'allow' ? setting.usedElsewhere : {},
+    checks: { studio: setting.checks.studio.map(presentCheckSetting), spread: setting.checks.spread.map(presentCheckSetting) },
     may: {
       edit: can(actor, 'spread:edit', target) === 'allow',
       comment: can(actor, 'spread:comment', target) === 'allow',

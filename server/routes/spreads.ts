@@ -18,7 +18,7 @@ import { guardedRoute, type Route } from './define-route';
 
 export const spreadParamsSchema = z.strictObject({ spreadId: idSchema });
 
-export function spreadRoutes({ dataSource, services: { albums, spreads } }: AppDeps): Route[] {
+export function spreadRoutes({ dataSource, services: { albums, spreads, checkSettings } }: AppDeps): Route[] {
   const on = ({ spreadId }: z.output<typeof spreadParamsSchema>) => spreads.locate(spreadId);
   return [
     guardedRoute({
@@ -56,7 +56,7 @@ export function spreadRoutes({ dataSource, services: { albums, spreads } }: AppD
       needs: 'spread:see',
       on,
       answer: { status: 200, schema: spreadDetailSchema },
-      handle: async ({ actor, subject }) => presentSpreadDetail(subject, await loadSpreadSetting(dataSource, subject), actor),
+      handle: async ({ actor, subject }) => presentSpreadDetail(subject, await loadSpreadSetting(dataSource, checkSettings, subject), actor),
     }),
     guardedRoute({
       method: 'patch',

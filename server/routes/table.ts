@@ -3,6 +3,7 @@ import type { AppDeps } from '../app-deps';
 import { describeApi } from '../openapi/describe-api';
 import { accountRoutes } from './accounts';
 import { albumRoutes } from './albums';
+import { checkSettingRoutes } from './check-settings';
 import { cutSizeRoutes, formatRoutes } from './cut-sizes';
 import { publicRoute, type Route } from './define-route';
 import { editRoutes } from './edits';
@@ -35,6 +36,7 @@ export function createRoutes(deps: AppDeps): readonly Route[] {
     ...pileRoutes(services),
     ...cutSizeRoutes(services),
     ...formatRoutes(services),
+    ...checkSettingRoutes(services),
     ...exportRoutes({ ...services, storage }),
     ...jobRoutes(services),
     ...stashRoutes(services),

@@ -6,6 +6,7 @@ import { requireFreeDisk } from '../storage/free-disk';
 import type { Storage } from '../storage/storage';
 import { AccountService } from './account-service';
 import { AlbumService } from './album-service';
+import { CheckSettingService } from './check-setting-service';
 import { CutSizeService } from './cut-size-service';
 import { EditService } from './edit-service';
 import { ExportService } from './export-service';
@@ -35,6 +36,7 @@ export interface Services {
   readonly prints: PrintService;
   readonly piles: PileService;
   readonly cutSizes: CutSizeService;
+  readonly checkSettings: CheckSettingService;
   readonly jobs: JobService;
   readonly uploads: UploadService;
   /** Reads the body of an upload to disk. */
@@ -75,6 +77,7 @@ export function createServices(deps: ServiceDeps): Services {
     prints: new PrintService({ dataSource, storage, now }),
     piles: new PileService(dataSource, now),
     cutSizes: new CutSizeService(dataSource, now),
+    checkSettings: new CheckSettingService(dataSource, now),
     jobs,
     uploads: new UploadService({ dataSource, storage, incoming, pool: intakePool, freeDiskBytes, now }),
     receive: createReceiveUpload(incoming, (bytes) => requireFreeDisk(storage, bytes, freeDiskBytes)),

@@ -1,11 +1,13 @@
 import { In, type DataSource } from 'typeorm';
 import type { SpreadDocument } from '../../shared/model/spread';
 import { namedPrints } from '../../shared/model/print-use';
+import type { CheckSettingEntity } from '../entities/check-setting-entity';
 import { AlbumEntity } from '../entities/album-entity';
 import { PrintEntity } from '../entities/print-entity';
 import type { SpreadEntity } from '../entities/spread-entity';
 import { SpreadPrintEntity } from '../entities/spread-print-entity';
 import { StudioEntity } from '../entities/studio-entity';
+import type { CheckSettingService } from './check-setting-service';
 import { readDocument } from './spread-service';
 
 /** What a spread stands in: all that Compose needs beside the document. */
@@ -15,15 +17,20 @@ export interface SpreadSetting {
   readonly prints: readonly PrintEntity[];
   /** Copies of each of the studio's prints that its other live spreads use. */
   readonly usedElsewhere: Readonly<Record<string, number>>;
+  /** What the studio and the spread say about checks. */
+  readonly checks: { readonly studio: readonly CheckSettingEntity[]; readonly spread: readonly CheckSettingEntity[] };
 }
 
-export async function loadSpreadSetting(dataSource: DataSource, spread: SpreadEntity): Promise<SpreadSetting> {
-  const [album, studio, prints] = await Promise.all([
+export async function loadSpreadSetting(dataSource: DataSource, checkSettings: CheckSettingService, spread: SpreadEntity): Promise<SpreadSetting> {
+  const { studioId } = spread;
+  const [album, studio, prints, ofStudio, ofSpread] = await Promise.all([
     dataSource.manager.findOneByOrFail(AlbumEntity, { id: spread.albumId }),
     dataSource.manager.findOneByOrFail(StudioEntity, { id: spread.studioId }),
-    loadNamedPrints(dataSource, spread.studioId, [readDocument(spread)]),
+    loadNamedPrints(dataSource, studioId, [readDocument(spread)]),
+    checkSettings.list({ studioId, spreadId: null }),
+    checkSettings.list({ studioId, spreadId: spread.id }),
   ]);
-  return { album, studio, prints, usedElsewhere: await countElsewhere(dataSource, spread) };
+  return { album, studio, prints, usedElsewhere: await countElsewhere(dataSource, spread), checks: { studio: ofStudio, spread: ofSpread } };
 }
 
 /** Every print of the studio that one of the documents names, oldest first. */

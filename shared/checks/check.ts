@@ -3,7 +3,7 @@ import { clamp } from '../geometry/clamp';
 import type { PlacedPhoto } from '../geometry/placed-photos';
 import type { MatId, PrintId, Side } from '../model/ids';
 import type { Print } from '../model/print';
-import type { Mat, SpreadDocument, TrimSettings } from '../model/spread';
+import type { Mat, SchemeCharacter, SpreadDocument, TrimSettings } from '../model/spread';
 import type { CheckId } from './check-ids';
 import type { NoteMessageId, NoteMessages, RemedyMessageId, RemedyMessages } from './messages';
 
@@ -65,7 +65,7 @@ export interface Threshold {
   readonly default: number;
   readonly min: number;
   readonly max: number;
-  readonly unit: 'length' | 'steps' | 'share' | 'points' | 'ratio';
+  readonly unit: 'length' | 'steps' | 'share' | 'points' | 'ratio' | 'count' | 'degrees';
 }
 
 export type ThresholdValues<T extends Readonly<Record<string, Threshold>>> = { readonly [Name in keyof T]: number };
@@ -79,6 +79,8 @@ interface CheckTraits {
   readonly needsFilledPages: boolean;
   /** Checks whose finding on the same mat has the same cause, and says it better. */
   readonly yieldsTo?: readonly CheckId[];
+  /** Schemes that contradict the check by nature: it is off while one of them is on. */
+  readonly offUnder?: readonly SchemeCharacter[];
 }
 
 export interface Check extends CheckTraits {

@@ -4,6 +4,7 @@ import { SIDES, type Side } from '../model/ids';
 import type { Rect } from '../model/rect';
 import type { Mat } from '../model/spread';
 import type { SpreadView } from './check';
+import { weighSpread } from './weight';
 
 /** The mat that the eye lands on first on one page; for a pane, its whole split print. */
 export interface Focal {
@@ -48,4 +49,29 @@ export function picturesBySize({ doc }: SpreadView): readonly { readonly mat: Ma
       return [{ mat, area: groups.get(mat.content.groupId)! }];
     })
     .sort((a, b) => b.area - a.area);
+}
+
+/** A mat, or all panes of one split print together, with its visual weight. */
+export interface WeighedUnit {
+  readonly mat: Mat;
+  readonly page: Side;
+  readonly isFocal: boolean;
+  readonly weight: number;
+}
+
+/** Every mat and split print of the spread's pages, in drawing order of its first mat. */
+export function weighedUnits(view: SpreadView): readonly WeighedUnit[] {
+  const { mats: weights } = weighSpread(view);
+  const units = new Map<string, { mat: Mat; page: Side; isFocal: boolean; weight: number }>();
+  for (const mat of view.doc.mats) {
+    const key = mat.content.kind === 'pane' ? mat.content.groupId : mat.id;
+    const weight = weights.get(mat.id) ?? 0;
+    const unit = units.get(key);
+    if (!unit) units.set(key, { mat, page: mat.page, isFocal: mat.focal, weight });
+    else {
+      unit.weight += weight;
+      unit.isFocal ||= mat.focal;
+    }
+  }
+  return [...units.values()];
 }

@@ -45,10 +45,26 @@ export interface NoteMessages {
   'low-resolution': { title: string; ppi: number };
   'no-title': Record<never, never>;
   'no-journaling': Record<never, never>;
+  'face-too-large': { title: string; face: number; photo: number; axis: Axis };
+  /** `others`: how many more keep zones lie under the same thing. */
+  'keep-zone-covered': { title: string; others: number };
+  'title-overflows': { needs: number; has: number; axis: Axis };
+  'journaling-overflows': { words: number; capacity: number };
+  'focals-compete': Record<never, never>;
+  'undeclared-focal': Record<never, never>;
+  'against-print': { title: string; isUpright: boolean };
+  'orientations-alike': { areUpright: boolean; others: number };
+  'looks-off-page': { title: string };
+  'horizons-apart': { title: string; other: string; apart: number };
+  'color-in-no-photo': { color: Hex };
+  'too-many-colors': { count: number; most: number; color: Hex };
+  'accent-few': { color: Hex; places: number };
+  'accent-one-page': { color: Hex; places: number };
+  'all-neutrals': Record<never, never>;
 }
 export type NoteMessageId = keyof NoteMessages;
 
-export type MotifKind = 'split-print' | 'strip' | 'pinwheel';
+export type MotifKind = 'split-print' | 'strip' | 'pinwheel' | 'arrangement';
 
 /** Every remedy that a note can offer, with the data that its label needs. */
 export interface RemedyMessages {
@@ -66,5 +82,13 @@ export interface RemedyMessages {
   'other-color': { color: Hex };
   'place-best-fit': { count: number };
   'make-focal': { matId: MatId };
+  'move-off': Record<never, never>;
+  'smaller-letters': { height: number };
+  'smaller-hand': { line: number };
+  'turn-mat': Record<never, never>;
+  'turn-picture': Record<never, never>;
+  'swap-places': Record<never, never>;
+  'line-up': Record<never, never>;
+  'repeat-accent': { color: Hex };
 }
 export type RemedyMessageId = keyof RemedyMessages;

@@ -1,21 +1,21 @@
 import { defineCheck, type Finding } from './check';
-import { footprint, motifsOf } from './motifs';
+import type { MotifKind } from './messages';
+import { sharedAcross } from './shared-across';
 
-/** The very same motif on both pages, in the same shape at the same place: an echo wants to be moved, turned or resized. */
+/**
+ * The very same motif on both pages, in the same shape at the same place, or the very same arrangement of all
+ * mats: an echo wants to be moved, mirrored, turned or resized. Only what is `copied`, not what is `related`.
+ */
 export const motifCopied = defineCheck({
   id: 'motif-copied',
   severity: 'consider',
   basis: { kind: 'common-practice' },
   needsFilledPages: true,
-  thresholds: {},
-  find: (view) => {
-    const motifs = motifsOf(view);
-    const left = new Map(motifs.flatMap((motif) => (motif.page === 'left' ? [[`${motif.kind} ${footprint(motif)}`, motif] as const] : [])));
-    return motifs.flatMap((motif): Finding[] => {
-      const twin = motif.page === 'right' ? left.get(`${motif.kind} ${footprint(motif)}`) : undefined;
-      if (!twin) return [];
-      const matIds = [...twin.mats, ...motif.mats].map((mat) => mat.id);
-      return [{ messageId: 'motif-copied', data: { motif: motif.kind }, matIds }];
-    });
-  },
+  thresholds: { mats: { default: 2, min: 2, max: 12, unit: 'count' } },
+  find: (view, { mats: least }) =>
+    sharedAcross(view).flatMap(({ kind, relation, matIds }): Finding[] =>
+      relation === 'copied' && matIds.length >= 2 * least && isMotif(kind) ? [{ messageId: 'motif-copied', data: { motif: kind }, matIds }] : [],
+    ),
 });
+
+const isMotif = (kind: string): kind is MotifKind => kind !== 'size' && kind !== 'paper' && kind !== 'color';

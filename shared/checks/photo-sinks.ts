@@ -1,9 +1,10 @@
 import { hexToOklab } from '../colour/convert';
-import { rimContrast, SINKING_SHARE } from '../colour/rim';
-import { windowAtOwnSize, type PlacedPhoto } from '../geometry/placed-photos';
+import { SINKING_SHARE } from '../colour/rim';
+import type { PlacedPhoto } from '../geometry/placed-photos';
 import type { Hex } from '../model/ids';
 import type { Mat } from '../model/spread';
 import { MIN_REVEAL } from '../model/trim-settings';
+import { schemeColors, standOutFrom } from './card-choices';
 import { defineCheck, type Finding, type Remedy, type SpreadView } from './check';
 import { piecesOf } from './pieces';
 import { cardUnder, rimOnCard } from './rims';
@@ -68,15 +69,3 @@ function otherCard(view: SpreadView, mat: Mat, photos: readonly PlacedPhoto[], s
   if (!color) return [];
   return [{ messageId: 'other-color', data: { color }, call: { id: 'mats.setColor', args: { matIds: photos.map((photo) => photo.matId), color } } }];
 }
-
-const schemeColors = ({ doc }: SpreadView): readonly Hex[] => {
-  if (!doc.scheme) return [];
-  const { main, second, accent, base } = doc.scheme.colors;
-  return [main.hex, second.hex, base.hex, accent.hex];
-};
-
-const standOutFrom = (view: SpreadView, photos: readonly PlacedPhoto[], hex: Hex, share: number): boolean =>
-  photos.every((photo) => {
-    const print = view.prints.get(photo.printId);
-    return print !== undefined && rimContrast(print, windowAtOwnSize(print, photo), hex).closeShare < share;
-  });

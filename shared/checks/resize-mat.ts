@@ -1,4 +1,4 @@
-import { shareCells } from '../geometry/cells';
+import { shareCells, type Cells } from '../geometry/cells';
 import { gridOf } from '../geometry/grid';
 import type { Size } from '../model/rect';
 import type { Mat } from '../model/spread';
@@ -48,3 +48,7 @@ function roomFor(view: SpreadView, mat: Mat, w: number, h: number): { x: number;
   }
   return best;
 }
+
+/** True where a mat could take these cells of its page: no other lies there, or it is laid over them. */
+export const isFree = ({ doc }: SpreadView, mat: Mat, cells: Cells): boolean =>
+  mat.laidOver || !doc.mats.some((other) => other.page === mat.page && other.id !== mat.id && !other.laidOver && shareCells(other, cells));

@@ -24,7 +24,7 @@ export function runChecks(view: SpreadView, settings: CheckSettings = NO_SETTING
   const { checks, stopChecks } = checksFor(settings);
   const found = new Map<CheckId, readonly Finding[]>();
   for (const [check, set] of checks) {
-    const isSilent = check.needsFilledPages && !areFilled(view);
+    const isSilent = (check.needsFilledPages && !areFilled(view)) || isContradicted(check, view);
     found.set(check.id, isSilent ? [] : check.run(view, set));
   }
   return checks
@@ -38,6 +38,8 @@ export function runChecks(view: SpreadView, settings: CheckSettings = NO_SETTING
     .sort((a, b) => compareNotes(a, b))
     .map(({ note }) => note);
 }
+
+const isContradicted = ({ offUnder }: Check, { doc }: SpreadView): boolean => doc.scheme !== null && (offUnder?.includes(doc.scheme.character) ?? false);
 
 const NO_SETTINGS: CheckSettings = {};
 

@@ -111,6 +111,7 @@ function concerned(view: SpreadView, { args }: CommandCall): { readonly mats: Re
   const named: MatId[] = [];
   if ('matId' in args) named.push(args.matId);
   if ('matIds' in args) named.push(...args.matIds);
+  if ('fromMatId' in args) named.push(args.fromMatId, args.toMatId);
   if ('groupId' in args) named.push(...(groups.get(args.groupId)?.matIds ?? []));
   if (named.length === 0) return { mats: new Set(), prints: new Set() };
 

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import type { SpreadDocument } from '../model/spread';
+import { checkSettingsSchema } from './check-settings';
 import { idSchema, instantSchema, lineSchema, revisionSchema } from './common';
 import { bindingSchema, documentSchema, pageFormatSchema } from './document';
 import { printSchema } from './prints';
@@ -81,6 +82,7 @@ export const spreadDetailSchema = spreadSummarySchema.extend({
   prints: z.array(printSchema),
   /** Copies of each of the studio's prints that its other live spreads use; prints that none uses are left out. */
   usedElsewhere: z.record(z.string(), z.int()),
+  checks: checkSettingsSchema,
   may: z.object({ edit: z.boolean(), comment: z.boolean(), export: z.boolean() }),
 });
 export type SpreadDetail = z.infer<typeof spreadDetailSchema>;

@@ -32,7 +32,7 @@ describe('the tables', () => {
     expect(row?.day).toBe('2026-12-24');
   });
 
-  it('go away again when the migrations are taken back', async () => {
+  it('go away again when all migrations are taken back', async () => {
     const dataSource = await createDataSource(database().rootUrl).initialize();
     for (const _migration of dataSource.migrations) await dataSource.undoLastMigration();
     const left = await dataSource.query<{ name: string }[]>(

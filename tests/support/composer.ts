@@ -173,5 +173,6 @@ const buildDetail = (server: FakeServer, prints: readonly Print[], mayEdit: bool
   trim: TRIM_SETTINGS_INCH,
   prints: [...prints] as SpreadDetail['prints'],
   usedElsewhere: {},
+  checks: { studio: [], spread: [] },
   may: { edit: mayEdit, comment: true, export: true },
 });

@@ -2,8 +2,8 @@ import { gridOf } from '#shared/geometry/grid';
 import type { Side } from '#shared/model/ids';
 import { inches } from '#shared/model/length';
 import type { PageFormat } from '#shared/model/page-format';
-import type { Print } from '#shared/model/print';
-import type { Content, Mat, PaneGroup, SpreadDocument } from '#shared/model/spread';
+import type { Face, Print } from '#shared/model/print';
+import type { Content, Mat, PaneGroup, SchemeCharacter, SpreadDocument } from '#shared/model/spread';
 import { buildMat, buildPanes, buildPrint, buildRaster, buildSpread, formatOf, matIdOf, paneGroupIdOf, printContent, printIdOf } from './builders';
 
 export type Random = () => number;
@@ -158,4 +158,30 @@ export function mirrorSpread(doc: SpreadDocument): SpreadDocument {
     binding: { ...doc.binding, hiddenEdge: { left: right, right: left } },
     mats: doc.mats.map((mat) => ({ ...mat, page: other(mat.page), x: columns - mat.x - mat.w })),
   });
+}
+
+/** The spread with faces and horizons marked on its prints, a scheme, inner mats, a title and journaling of any length. */
+export function withSubjects(random: Random, { doc, prints }: RandomSpread): RandomSpread {
+  const facing = (): Face['facing'] => pick(random, ['left', 'right', 'ahead', undefined] as const);
+  const marked = prints.map((print): Print => {
+    const { imageWidth: width, imageHeight: height } = print;
+    const face = (): Face => ({ rect: { x: between(random, 0, width - 30), y: between(random, 0, height - 30), width: between(random, 10, 300), height: between(random, 10, 300) }, facing: facing() });
+    const y = (): number => between(random, 0, height);
+    return {
+      ...print,
+      faces: Array.from({ length: between(random, 0, 3) }, face),
+      horizon: random() < 0.5 ? { x1: between(random, -20, 40), y1: y(), x2: width - between(random, -20, 40), y2: y() } : null,
+    };
+  });
+  const color = () => ({ hex: pick(random, CARD), printIds: random() < 0.5 ? [prints[0]!.id] : [] });
+  const scheme = { character: pick(random, ['echo', 'quiet', 'lift'] as const satisfies SchemeCharacter[]), colors: { base: color(), main: color(), second: color(), accent: color() } };
+  const mats = doc.mats.map((mat): Mat => {
+    const kind = random();
+    if (mat.content.kind === 'pane' || kind > 0.2) return random() < 0.2 ? { ...mat, inner: { color: pick(random, CARD), reveal: inches(1 / 16) } } : mat;
+    const text = 'Ada saw the light '.repeat(between(random, 0, 6)).trim();
+    const content: Content =
+      kind < 0.1 ? { kind: 'lettering', text, color: pick(random, CARD), letterHeight: between(random, 100, 8000) } : { kind: 'journaling', text, color: pick(random, CARD), lineHeight: between(random, 200, 3000) };
+    return { ...mat, content };
+  });
+  return { doc: buildSpread({ ...doc, mats, scheme: random() < 0.5 ? scheme : null }), prints: marked };
 }

@@ -6,7 +6,7 @@ import { formatLength, type Unit } from '../measure';
 export const SEVERITY_WORDS: Readonly<Record<Severity, string>> = { stop: 'Stop', fix: 'Fix', consider: 'Consider' };
 
 const EDGES: Readonly<Record<Edge, string>> = { left: 'left', right: 'right', top: 'top', bottom: 'foot' };
-const MOTIFS: Readonly<Record<MotifKind, string>> = { 'split-print': 'split print', strip: 'strip', pinwheel: 'pinwheel' };
+const MOTIFS: Readonly<Record<MotifKind, string>> = { 'split-print': 'split print', strip: 'strip', pinwheel: 'pinwheel', arrangement: 'arrangement of mats' };
 
 /** A length with its unit, and a least length in words, since 0 would be no reason for a note. */
 function measure(length: number, unit: Unit): string {
@@ -76,6 +76,27 @@ const SENTENCES: { readonly [Id in NoteMessageId]: (data: NoteMessages[Id], unit
     `${named(title)} has ${ppi} pixels to the inch at this size. ${ppi < 200 ? 'Under 200 it cannot be printed.' : '300 print sharp.'}`,
   'no-title': () => 'The spread has no title.',
   'no-journaling': () => 'Nothing says who, when and where.',
+  'face-too-large': ({ title, face, photo, axis }, unit) =>
+    `This photo is too small for the face in ${named(title)}: the face is ${formatLength(face, unit)} ${axis}, the photo ${formatLength(photo, unit)}.`,
+  'keep-zone-covered': ({ title, others }) =>
+    `What is laid over here hides part of the keep zone of ${named(title)}${others > 0 ? ` and of ${others} more` : ''}.`,
+  'title-overflows': ({ needs, has, axis }, unit) =>
+    `The title takes ${formatLength(needs, unit)} ${unit} ${axis === 'wide' ? 'across' : 'in height'}, and its mat holds ${measure(has, unit)}.`,
+  'journaling-overflows': ({ words, capacity }) =>
+    `${words === 1 ? 'One word is' : `${words} words are`} written, and the lines hold ${capacity === 0 ? 'none' : `about ${capacity}`} in this hand.`,
+  'focals-compete': () => 'Both focals weigh about the same, so they compete. Let one lead: larger, bolder or in stronger card.',
+  'undeclared-focal': () => 'This draws the eye more than the focal does. Calm it, or let it lead.',
+  'against-print': ({ title, isUpright }) => `${named(title)} ${isUpright ? 'stands upright, and its mat lies flat' : 'lies flat, and its mat stands upright'}.`,
+  'orientations-alike': ({ areUpright, others }) =>
+    `Every photo ${areUpright ? 'stands upright' : 'lies flat'}, though ${others === 1 ? 'one print does' : `${others} prints do`} not. A change of direction wakes a page up.`,
+  'looks-off-page': ({ title }) => `In ${named(title)} somebody looks off the page, and the reader’s eye goes along. Never mirror the picture: give it another place.`,
+  'horizons-apart': ({ title, other, apart }, unit) => `The horizons of ${named(title)} and ${named(other)} miss each other by ${measure(apart, unit)}.`,
+  'color-in-no-photo': ({ color }) => `Card in ${colorName(color)} has its colour from no photo here.`,
+  'too-many-colors': ({ count, most, color }) => `${count} colours of card are more than the ${most} that hold together. Of ${colorName(color)} there is least.`,
+  'accent-few': ({ color, places }) =>
+    `The accent in ${colorName(color)} stands ${places === 1 ? 'alone' : `in ${places} places`}. Three places, on both pages, lead the eye round.`,
+  'accent-one-page': ({ color }) => `The accent in ${colorName(color)} stays on one page. Repeated on the other it ties the two together.`,
+  'all-neutrals': () => 'All card is neutral, though the photos have colour to lend it.',
 };
 
 /**
@@ -103,6 +124,14 @@ const LABELS: { readonly [Id in RemedyMessageId]: (data: RemedyMessages[Id], uni
   'other-color': () => 'Change the card',
   'place-best-fit': ({ count }) => (count === 1 ? 'Place it' : 'Place the best fit'),
   'make-focal': () => 'Make this the focal',
+  'move-off': () => 'Move it off',
+  'smaller-letters': ({ height }, unit) => `Use ${formatLength(height, unit)} ${unit} caps`,
+  'smaller-hand': ({ line }, unit) => `Rule ${formatLength(line, unit)} ${unit} lines`,
+  'turn-mat': () => 'Turn the mat',
+  'turn-picture': () => 'Turn the picture',
+  'swap-places': () => 'Swap the two',
+  'line-up': () => 'Line them up',
+  'repeat-accent': () => 'Repeat it there',
 };
 
 /** What stands on a remedy's button: a verb or the new value, at most 20 letters. */

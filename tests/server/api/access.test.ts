@@ -78,6 +78,9 @@ const MATRIX: readonly Row[] = [
   row('post /studios/:studioId/stash/readings', 422, 422, 403, 404),
   row('get /spreads/:spreadId/reservations', 200, 200, 200, 404),
   row('post /spreads/:spreadId/reservations', 400, 400, 403, 404),
+  row('get /studios/:studioId/checks', 200, 200, 200, 404),
+  row('patch /studios/:studioId/checks/:checkId', 400, 400, 403, 404),
+  row('patch /spreads/:spreadId/checks/:checkId', 400, 400, 403, 404),
   row('delete /piles/:pileId', 200, 200, 403, 404),
   row('delete /cut-sizes/:cutSizeId', 200, 200, 403, 404),
   row('delete /grants/:grantId', 200, 200, 404, 404),
@@ -120,7 +123,7 @@ describe('access', () => {
     const scope = { kind: 'spread-link', spreadId: spread.id, mayComment: false };
     await owner.agent.post(`/api/studios/${studioId}/grants`).send({ id: grantId, scope, expiresAt: null }).expect(201);
     await deps.services.jobs.enqueue({ id: jobId, studioId, spreadId: spread.id, kind: 'test.none', payload: {}, dedupeKey: null, createdBy: null });
-    return { studioId, albumId: spread.albumId, spreadId: spread.id, printId: print.id, pileId, cutSizeId, sheetId, grantId, jobId, size: 'small' };
+    return { studioId, albumId: spread.albumId, spreadId: spread.id, printId: print.id, pileId, cutSizeId, sheetId, grantId, jobId, size: 'small', checkId: 'no-title' };
   }
 
   const shown = (status: number): number => (status >= 200 && status < 300 ? 200 : status);

@@ -39,7 +39,7 @@ describe('Compose', () => {
     const notes = screen.getByRole('list', { name: 'Notes on the left page' });
     const stop = within(notes).getByText('Stop').closest('li')!;
     expect(stop).toHaveTextContent('Three gulls');
-    await userEvent.click(within(stop).getByRole('button'));
+    await userEvent.click(within(stop).getByRole('button', { name: 'Slide the window' }));
     expect(within(notes).queryByText('Stop')).not.toBeInTheDocument();
     tab.store.getState().undo();
     await waitFor(() => expect(within(notes).getByText('Stop')).toBeInTheDocument());

@@ -1,9 +1,11 @@
 import { useLayoutEffect, useRef, useState } from 'react';
 import { Link } from 'react-router-dom';
 import type { Note } from '#shared/checks/check';
+import type { CheckId } from '#shared/checks/check-ids';
 import { SEVERITY_WORDS, noteSentence, remedyLabel } from '#shared/words/en/notes';
 import type { Unit } from '#shared/words/measure';
 import { SeverityMark } from '@/components/severity-mark';
+import { NoteMenu } from './note-menu';
 import { layOutNotes, leaderPath, type Anchor, type NotePlace } from '@/features/composer/canvas/note-layout';
 
 interface NotesMarginProps {
@@ -17,13 +19,14 @@ interface NotesMarginProps {
   anchor: (matId: string) => Anchor | undefined;
   isEditable: boolean;
   onRemedy: (note: Note) => void;
+  onLimit: (checkId: CheckId) => void;
   onMark: (matIds: readonly string[] | null) => void;
 }
 
 const ESTIMATED_HEIGHT = 96;
 
 /** One margin's notes in blue pencil, each beside its mat with a thin leader. */
-export function NotesMargin({ side, notes, unit, width, x, bounds, anchor, isEditable, onRemedy, onMark }: NotesMarginProps) {
+export function NotesMargin({ side, notes, unit, width, x, bounds, anchor, isEditable, onRemedy, onLimit, onMark }: NotesMarginProps) {
   const [heights, setHeights] = useState<Readonly<Record<string, number>>>({});
   const [hovered, setHovered] = useState<string | null>(null);
   const [isUnfolded, setIsUnfolded] = useState(false);
@@ -47,11 +50,11 @@ export function NotesMargin({ side, notes, unit, width, x, bounds, anchor, isEdi
       </svg>
       <ol ref={list} className="notes" aria-label={`Notes on the ${side} page`}>
         {placed.map((place) => (
-          <NoteItem key={place.note.key} place={place} x={x} width={width} unit={unit} isEditable={isEditable} onRemedy={onRemedy} onHover={mark} />
+          <NoteItem key={place.note.key} place={place} x={x} width={width} unit={unit} isEditable={isEditable} onRemedy={onRemedy} onLimit={onLimit} onHover={mark} />
         ))}
       </ol>
       {folded.length > 0 && (
-        <div className="folded-notes" style={{ left: x, top: bounds.bottom + 4, width }}>
+        <div className={`folded-notes is-${side}`} style={{ left: x, top: bounds.bottom + 4, width }}>
           <button type="button" className="link-button" aria-expanded={isUnfolded} onClick={() => setIsUnfolded(!isUnfolded)}>
             {folded.length} more
           </button>
@@ -87,10 +90,11 @@ interface NoteItemProps {
   unit: Unit;
   isEditable: boolean;
   onRemedy: (note: Note) => void;
+  onLimit: (checkId: CheckId) => void;
   onHover: (note: Note | null) => void;
 }
 
-function NoteItem({ place: { note, top }, x, width, unit, isEditable, onRemedy, onHover }: NoteItemProps) {
+function NoteItem({ place: { note, top }, x, width, unit, isEditable, onRemedy, onLimit, onHover }: NoteItemProps) {
   return (
     <li
       data-key={note.key}
@@ -101,6 +105,7 @@ function NoteItem({ place: { note, top }, x, width, unit, isEditable, onRemedy, 
       onFocus={() => onHover(note)}
       onBlur={() => onHover(null)}
     >
+      {isEditable && <NoteMenu checkId={note.checkId} onLimit={onLimit} />}
       <NoteText note={note} unit={unit} />
       {note.remedy && isEditable && (
         <button type="button" className="remedy" onClick={() => onRemedy(note)}>

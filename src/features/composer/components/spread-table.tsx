@@ -1,10 +1,8 @@
 import { lazy, memo, Suspense, useCallback, useMemo, useState, type MouseEvent } from 'react';
-import { Link } from 'react-router-dom';
 import type { Note } from '#shared/checks/check';
 import { BALANCE_LIMIT } from '#shared/checks/pages-unequal';
-import { CHECKS } from '#shared/checks/registry';
 import { matRect } from '#shared/geometry/grid';
-import type { MatId, PrintId, Side } from '#shared/model/ids';
+import type { MatId, PrintId } from '#shared/model/ids';
 import { SIDES } from '#shared/model/ids';
 import { UNITS_PER_INCH } from '#shared/model/length';
 import type { Rect } from '#shared/model/rect';
@@ -23,7 +21,7 @@ import { useOverlayKey } from '@/features/composer/hooks/use-overlay-key';
 import { AfterPages } from './after-pages';
 import { BalanceBeam } from './balance-beam';
 import { MatControl } from './mat-control';
-import { NotesMargin } from './notes-margin';
+import { NoteMargins } from './note-margins';
 import { PageGrid } from './page-grid';
 import { PageRuler } from './page-ruler';
 import { RuleTools } from './rule-tools';
@@ -48,9 +46,6 @@ interface SpreadTableProps {
   /** Drawn instead of the spread as it is, while somebody compares. */
   readonly comparison: Comparison | null;
 }
-
-const NOTE_GUTTER = 20;
-const CHECK_COUNT = Object.keys(CHECKS).length;
 
 /** The two facing pages on the neutral table, with everything that hangs on them. */
 export function SpreadTable({ judgement, held, perInch, margin, isEditable, sources, comparison }: SpreadTableProps) {
@@ -86,8 +81,6 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
   const applyRemedy = useCallback((note: Note) => note.remedy && store.getState().run(note.remedy.call), [store]);
   const selected = doc.mats.filter((mat) => selection.includes(mat.id));
   const isHoldingPrint = held !== null && isPrintDrag(held.data);
-  const bounds = { top: 0, bottom: size.height - 18 };
-  const notesFor = (side: Side): Note[] => judgement.notes.filter((note) => note.page === side);
 
   return (
     <div className="spread-table" style={{ width: size.width + 2 * margin, paddingInline: margin }}>
@@ -138,28 +131,18 @@ export function SpreadTable({ judgement, held, perInch, margin, isEditable, sour
             </Suspense>
           </div>
         )}
-        {SIDES.map((side) => (
-          <NotesMargin
-            key={side}
-            side={side}
-            notes={notesFor(side)}
-            unit={unit}
-            width={margin - 36}
-            x={side === 'left' ? 16 - margin : size.width + NOTE_GUTTER}
-            bounds={bounds}
-            anchor={(matId) => anchors.get(matId)}
-            isEditable={isEditable}
-            onRemedy={applyRemedy}
-            onMark={setMarked}
-          />
-        ))}
+        <NoteMargins
+          found={judgement.notes}
+          isHeld={held !== null}
+          unit={unit}
+          margin={margin}
+          size={size}
+          anchor={(matId) => anchors.get(matId)}
+          isEditable={isEditable}
+          onRemedy={applyRemedy}
+          onMark={setMarked}
+        />
       </div>
-      <p className="tally" style={{ width: margin - 36 }}>
-        <Link to="/help" target="_blank" aria-label={`${CHECK_COUNT} checks: what they look at (opens in a new tab)`}>
-          {CHECK_COUNT} checks
-        </Link>
-        , {judgement.notes.length === 1 ? '1 note' : `${judgement.notes.length} notes`}
-      </p>
       {margin > 0 && <VisionChoice value={seenAs} width={margin - 36} onChange={setSeenAs} />}
       {isEditable && (
         <div className="table-foot">

@@ -1,5 +1,6 @@
 import { useMemo } from 'react';
 import type { Note, SpreadView } from '#shared/checks/check';
+import { joinSettings } from '#shared/checks/join-settings';
 import { runChecks } from '#shared/checks/run-checks';
 import { viewSpread } from '#shared/checks/view-spread';
 import { weighSpread } from '#shared/checks/weight';
@@ -18,11 +19,13 @@ export function useJudgement(): Judgement {
   const prints = useComposer((state) => state.prints);
   const trim = useComposer((state) => state.trim);
   const usedElsewhere = useComposer((state) => state.usedElsewhere);
+  const checks = useComposer((state) => state.checks);
+  const settings = useMemo(() => joinSettings(checks.studio, checks.spread), [checks]);
   return useMemo(() => {
     const view = viewSpread({ doc, prints, trim, usedElsewhere });
     const { left, right } = weighSpread(view);
-    return { view, notes: runChecks(view), left, right };
-  }, [doc, prints, trim, usedElsewhere]);
+    return { view, notes: runChecks(view, settings), left, right };
+  }, [doc, prints, trim, usedElsewhere, settings]);
 }
 
 /** The stop that speaks of this mat, if one does. */

@@ -32,6 +32,9 @@ export function RefusalLine() {
   );
 }
 
+/** Shows a sentence where refused commands are told; null takes it away. */
+export const useTell = (): ((sentence: string | null) => void) => use(RefusalContext).tell;
+
 /** Runs a command; where it can do nothing, says why instead of staying silent. */
 export function useRun(): (call: CommandCall) => boolean {
   const store = useComposerStore();

@@ -2,6 +2,7 @@ import { createStore, type StoreApi } from 'zustand/vanilla';
 import type { CommandCall } from '#shared/commands/calls';
 import type { CommandContext, Reason } from '#shared/commands/command';
 import type { SpreadDetail } from '#shared/contracts/albums';
+import type { CheckSetting, CheckSettings } from '#shared/contracts/check-settings';
 import type { Edit, LoggedEdit } from '#shared/contracts/edits';
 import type { MatId, PrintId } from '#shared/model/ids';
 import { applyPatch, touchedKeys, type Patch } from '#shared/model/patch';
@@ -37,6 +38,11 @@ export interface ComposerState {
   readonly trim: TrimSettings;
   readonly unit: Unit;
   readonly usedElsewhere: Readonly<Record<PrintId, number>>;
+  /** Which spread this is, and of which studio; both for good. */
+  readonly spreadId: string;
+  readonly studioId: string;
+  /** What studio and spread say about checks; from the server, outside undo. */
+  readonly checks: CheckSettings;
   readonly mayEdit: boolean;
   /** Chosen mats; dropped with the tab, no part of undo. */
   readonly selection: readonly MatId[];
@@ -59,6 +65,8 @@ export interface ComposerState {
   readonly select: (matIds: readonly MatId[]) => void;
   /** Takes in prints that were added or changed on the server. */
   readonly putPrints: (prints: readonly Print[]) => void;
+  /** Takes in what the server answers about checks. */
+  readonly putChecks: (scope: keyof CheckSettings, settings: readonly CheckSetting[]) => void;
   /** Saves now. @returns whether everything is saved. */
   readonly flush: () => Promise<boolean>;
   /** The server's revision that holds everything saved so far. */
@@ -219,6 +227,9 @@ export function createComposerStore(detail: SpreadDetail, deps: ComposerDeps): C
     trim: detail.trim,
     unit: detail.unit,
     usedElsewhere: detail.usedElsewhere,
+    spreadId: detail.id,
+    studioId: detail.studioId,
+    checks: detail.checks,
     mayEdit: detail.may.edit,
     selection: [],
     save: { status: 'saved', at: null, failure: null, conflict: null, isKept: true },
@@ -239,6 +250,7 @@ export function createComposerStore(detail: SpreadDetail, deps: ComposerDeps): C
       return takeStep('redo', stepForward(history, current));
     },
     select: (matIds) => set({ selection: matIds.filter((id) => get().doc.mats.some((mat) => mat.id === id)) }),
+    putChecks: (scope, settings) => set({ checks: { ...get().checks, [scope]: settings } }),
     putPrints: (prints) => set({ prints: new Map([...get().prints, ...prints.map((print) => [print.id, print] as const)]) }),
     flush: autosave.flush,
     savedRevision: () => autosave.getBase().revision,
