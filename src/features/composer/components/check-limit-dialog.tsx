@@ -55,7 +55,7 @@ export function CheckLimitDialog({ checkId, onClose }: CheckLimitDialogProps) {
         >
           {(control) => (
             <span className="limit-field">
-              <input {...control} className="field-input num" inputMode="decimal" value={text} onChange={(event) => setText(event.target.value)} />
+              <input {...control} className="field-input num" value={text} onChange={(event) => setText(event.target.value)} />
               <span className="num">{limitUnit(threshold.unit, unit)}</span>
             </span>
           )}

@@ -4,6 +4,7 @@ import type { Hex } from '#shared/model/ids';
 import { inches, millimetres } from '#shared/model/length';
 import type { Content, ContentKind, Mat, Pattern } from '#shared/model/spread';
 import { formatLength, parseLength, type Unit } from '#shared/words/measure';
+import { JournalingRoom, TitleRoom } from './text-room';
 
 type Choice = Exclude<ContentKind, 'print' | 'pane'>;
 
@@ -42,12 +43,14 @@ export function ContentSheet({ mat, unit, ink, onChange }: ContentSheetProps) {
         <>
           <TextLines label="Words of the title" value={content.text} rows={2} max={LETTERING_MAX} onCommit={(text) => onChange({ ...content, text })} />
           <LengthField label="Letter height" value={content.letterHeight} unit={unit} onCommit={(letterHeight) => onChange({ ...content, letterHeight })} />
+          <TitleRoom mat={mat} content={content} unit={unit} />
         </>
       )}
       {content.kind === 'journaling' && (
         <>
           <TextLines label="Who, when, where" value={content.text} rows={5} max={JOURNALING_MAX} onCommit={(text) => onChange({ ...content, text })} />
           <LengthField label="From line to line" value={content.lineHeight} unit={unit} onCommit={(lineHeight) => onChange({ ...content, lineHeight })} />
+          <JournalingRoom mat={mat} content={content} />
         </>
       )}
       {content.kind === 'paper' && (
