@@ -1,6 +1,6 @@
 import { gridOf, matRect } from '../geometry/grid';
 import { onPiece, zoneOf } from '../geometry/keep-zone';
-import { area, intersection, overlaps, translate } from '../geometry/rects';
+import { area, intersection, movedBy, overlaps } from '../geometry/rects';
 import type { Side } from '../model/ids';
 import type { Rect } from '../model/rect';
 import type { Mat } from '../model/spread';
@@ -60,7 +60,7 @@ function zonesNear(view: SpreadView, page: Side, near: Rect | null): Zone[] {
       const seen = intersection(keep, photo.window);
       const mat = view.matById.get(photo.matId);
       if (!seen || !mat) return [];
-      const rect = translate(onPiece(seen, photo.window, photo.placement.turn), photo.rect.x, photo.rect.y);
+      const rect = movedBy(onPiece(seen, photo.window, photo.placement.turn), photo.rect);
       return [{ title: piece.print.title, matId: photo.matId, rect, z: mat.z }];
     });
   });
@@ -74,7 +74,7 @@ function moveOff(view: SpreadView, cover: Mat, over: Rect): Remedy[] {
   for (let steps = 1; steps < Math.max(columns, rows); steps += 1) {
     for (const [dx, dy] of [[0, steps], [0, -steps], [steps, 0], [-steps, 0]] as const) {
       const isOnPage = cover.x + dx >= 0 && cover.y + dy >= 0 && cover.x + dx + cover.w <= columns && cover.y + dy + cover.h <= rows;
-      const moved = translate(over, dx * doc.format.step, dy * doc.format.step);
+      const moved = movedBy(over, { x: dx * doc.format.step, y: dy * doc.format.step });
       if (!isOnPage || others.some((zone) => overlaps(zone.rect, moved))) continue;
       return [{ messageId: 'move-off', data: {}, call: { id: 'mats.move', args: { matIds: [cover.id], dx, dy } } }];
     }

@@ -6,6 +6,7 @@ export const CHECK_NAMES: Readonly<Record<CheckId, string>> = {
   'never-cut': 'A print that must not be cut',
   'keep-zone-cut': 'A cut through a keep zone',
   'seam-through-keep-zone': 'A seam through a keep zone',
+  'panes-inseparable': 'Panes that no cuts can part',
   'more-placements-than-copies': 'More placements than copies',
   'print-smaller-than-photo': 'A print smaller than its photo',
   'whole-overhangs': 'A whole print that overhangs',
