@@ -3,6 +3,7 @@ import { CHECK_IDS, type CheckId } from '../../shared/checks/check-ids';
 import { findThresholdFault } from '../../shared/checks/join-settings';
 import type { UpdateCheckSetting } from '../../shared/contracts/check-settings';
 import { CheckSettingEntity } from '../entities/check-setting-entity';
+import { StudioEntity } from '../entities/studio-entity';
 import { invalidField } from './invalid-field';
 
 /** All spreads of a studio, or one of them. */
@@ -33,7 +34,9 @@ export class CheckSettingService {
     refuseFaults(checkId, thresholds ?? {});
     const scopeId = scope.spreadId ?? scope.studioId;
     return this.dataSource.transaction(async (manager) => {
-      const before = await manager.findOne(CheckSettingEntity, { where: { scopeId, checkId }, lock: { mode: 'pessimistic_write' } });
+      // A row that is not there cannot be locked without its neighbours, so a studio's settings change one after the other.
+      await manager.findOne(StudioEntity, { select: { id: true }, where: { id: scope.studioId }, lock: { mode: 'pessimistic_write' } });
+      const before = await manager.findOneBy(CheckSettingEntity, { scopeId, checkId });
       const next = {
         muted: muted === undefined ? (before?.muted ?? null) : muted,
         thresholds: thresholds === undefined ? (before?.thresholds ?? {}) : (thresholds ?? {}),
