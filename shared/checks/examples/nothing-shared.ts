@@ -1,5 +1,5 @@
 import type { Mat } from '../../model/spread';
-import type { CheckExample } from './parts';
+import { CARD, type CheckExample } from './parts';
 import { at, but, finished } from './whole-spread';
 
 /** The right page in card and paper of its own. */
@@ -7,6 +7,7 @@ const OTHER: Partial<Mat> = { color: '#7d3f4f' };
 
 export const nothingShared: CheckExample = {
   wrong: finished({
+    paper: but('paper', { color: CARD.second, content: { kind: 'paper', pattern: 'stripe', color: CARD.ink, ground: CARD.page } }),
     tower: but('tower', OTHER),
     cove: but('cove', OTHER),
     stair: but('stair', OTHER),

@@ -4,12 +4,12 @@ import { CARD, examplePrint, exampleSpread, inWindow, type ExampleSpread, type M
 import { headland, lighthouse, person } from './pictures';
 
 export const TITLE: Content = { kind: 'lettering', text: 'Out to the light', color: CARD.ink, letterHeight: inches(3 / 4) };
-export const WORDS: Content = {
+export const WORDS = {
   kind: 'journaling',
   text: 'Saturday. Nora counted every step to the top and lost count twice. Ivo waved at every gate, and every gate waved back.',
   color: CARD.ink,
   lineHeight: inches(3 / 8),
-};
+} satisfies Content;
 
 const HEADLAND = examplePrint({ n: 1, title: 'The headland', width: 8, height: 6, draw: headland });
 const TOWER = examplePrint({ n: 2, title: 'The light', width: 5, height: 7, draw: lighthouse });

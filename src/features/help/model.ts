@@ -15,7 +15,10 @@ export function thresholdWords(value: number, { unit }: Pick<Threshold, 'unit'>)
       return value === 1 ? '1 step' : `${value} steps`;
     case 'ratio':
       return `${value} times`;
+    case 'degrees':
+      return `${value}°`;
     case 'points':
+    case 'count':
       return String(value);
   }
 }
