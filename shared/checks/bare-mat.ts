@@ -18,24 +18,22 @@ export const bareMat = defineCheck({
   needsFilledPages: true,
   thresholds: {},
   find: (view) => {
-    const ready = readyPrints(view);
-    return view.doc.mats.flatMap((mat): Finding[] => {
-      if (mat.content.kind !== 'bare') return [];
+    const bare = view.doc.mats.filter((mat) => mat.content.kind === 'bare');
+    const ready = bare.length > 0 ? readyPrints(view) : [];
+    return bare.map((mat): Finding => {
       const photo = contentRect(view.doc.format, view.doc.reveal, mat);
       const fitting = ready.filter((print) => fits(print, photo, view.trim));
-      return [
-        {
-          messageId: 'bare-mat',
-          data: { fitting: fitting.length },
-          matIds: [mat.id],
-          remedies: () =>
-            bestFirst(fitting, photo).map((print) => ({
-              messageId: 'place-best-fit',
-              data: { count: fitting.length },
-              call: { id: 'prints.place', args: { printId: print.id, matId: mat.id } },
-            })),
-        },
-      ];
+      return {
+        messageId: 'bare-mat',
+        data: { fitting: fitting.length },
+        matIds: [mat.id],
+        remedies: () =>
+          bestFirst(fitting, photo).map((print) => ({
+            messageId: 'place-best-fit',
+            data: { count: fitting.length },
+            call: { id: 'prints.place', args: { printId: print.id, matId: mat.id } },
+          })),
+      };
     });
   },
 });

@@ -1,6 +1,5 @@
-import { copiesNeeded } from '../geometry/copies';
-import { printUses, type PrintUse } from '../model/print-use';
-import { defineCheck, type Finding } from './check';
+import { copiesFor, printUses, type PrintUse } from '../model/print-use';
+import { defineCheck, type Finding, type SpreadView } from './check';
 
 /**
  * More placements of a print than copies of it, the studio's other live spreads included. How placements
@@ -18,7 +17,7 @@ export const morePlacementsThanCopies = defineCheck({
       const elsewhere = view.usedElsewhere[id] ?? 0;
       // Never fewer copies are needed than 1, nor more than there are placements.
       if (!print || print.marks.digital || uses.length === 0 || uses.length + elsewhere <= print.copies) return [];
-      const needed = copiesFor(uses, view.trim.tolerance);
+      const needed = copiesFor(view.doc, uses, view.trim.tolerance);
       if (needed + elsewhere <= print.copies) return [];
       return [
         {
@@ -27,7 +26,7 @@ export const morePlacementsThanCopies = defineCheck({
           // The last one placed is the one too many.
           matIds: [...uses].reverse().flatMap(({ matIds }) => matIds),
           remedies: () => {
-            const surplus = surplusOf(uses, print.copies - elsewhere, view.trim.tolerance).flatMap(({ matIds }) => matIds);
+            const surplus = surplusOf(view, uses, print.copies - elsewhere).flatMap(({ matIds }) => matIds);
             return [{ messageId: 'back-to-table', data: {}, call: { id: 'prints.lift', args: { matIds: surplus } } }];
           },
         },
@@ -35,12 +34,10 @@ export const morePlacementsThanCopies = defineCheck({
     }),
 });
 
-const copiesFor = (uses: readonly PrintUse[], tolerance: number): number => copiesNeeded(uses.map(({ asked }) => asked), tolerance);
-
 /** The last uses without which the copies suffice. */
-function surplusOf(uses: readonly PrintUse[], copies: number, tolerance: number): readonly PrintUse[] {
+function surplusOf({ doc, trim }: SpreadView, uses: readonly PrintUse[], copies: number): readonly PrintUse[] {
   for (let kept = uses.length - 1; kept > 0; kept -= 1) {
-    if (copiesFor(uses.slice(0, kept), tolerance) <= copies) return uses.slice(kept);
+    if (copiesFor(doc, uses.slice(0, kept), trim.tolerance) <= copies) return uses.slice(kept);
   }
   return uses;
 }
