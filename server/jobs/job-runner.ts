@@ -7,8 +7,8 @@ import { claimNextJob } from './claim-job';
 import type { JobHandlers } from './job-handler';
 
 /** A claim lapses after this long without a word from its runner, and another may take the job up. */
-const CLAIM_MS = 60_000;
-const RENEW_MS = 15_000;
+const CLAIM_MS = 20_000;
+const RENEW_MS = 5_000;
 const DEFAULT_POLL_MS = 1_000;
 export const MAX_ATTEMPTS = 3;
 

@@ -92,6 +92,7 @@ function failures(route: Route, components: Components): object {
     ...(route.method === 'get' ? [] : (['cross-site'] as const)),
     ...(route.errors ?? []),
     'bug',
+    'unavailable',
   ]);
   const byStatus = new Map<number, ErrorCode[]>();
   for (const code of codes) byStatus.set(STATUS[code], [...(byStatus.get(STATUS[code]) ?? []), code]);

@@ -35,7 +35,7 @@ describe('the description of the API', () => {
       expect(inPath, route.path).toEqual([...route.path.matchAll(/:(\w+)/g)].map(([, name]) => name));
       expect(operation['x-permission'], route.path).toBe(route.access === 'public' || route.access === 'signed-in' ? undefined : route.access);
       expect(Object.keys(operation.responses), route.path).toContain(String(route.answer.status));
-      for (const code of route.errors ?? []) expect(Object.keys(operation.responses), `${route.path} ${code}`).toContain(String(STATUS[code]));
+      for (const code of [...(route.errors ?? []), 'unavailable' as const]) expect(Object.keys(operation.responses), `${route.path} ${code}`).toContain(String(STATUS[code]));
     }
   });
 
