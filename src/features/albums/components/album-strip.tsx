@@ -7,6 +7,7 @@ import { Menu, MenuItem } from '@/components/menu';
 import { EmptyLine, Notice } from '@/components/notice';
 import { sentenceOf } from '@/lib/form-errors';
 import { useCreateSpread, useUpdateSpread } from '../api/album-mutations';
+import { ReadingOrder } from './reading-order';
 import { SpreadCard } from './spread-card';
 
 interface AlbumStripProps {
@@ -29,12 +30,14 @@ export function AlbumStrip({ album, list, mayEdit }: AlbumStripProps) {
           {failure}
         </Notice>
       )}
-      <ol className="spread-strip">
-        {live.map((spread, index) => (
-          <SpreadCard key={spread.id} spread={spread} index={index} count={live.length} prints={prints} mayEdit={mayEdit} onFail={fail} />
-        ))}
-        {mayEdit && <BareSpread album={album} number={live.length + 1} onFail={fail} />}
-      </ol>
+      <ReadingOrder albumId={album.id} spreads={live} onFail={fail}>
+        <ol className="spread-strip">
+          {live.map((spread, index) => (
+            <SpreadCard key={spread.id} spread={spread} index={index} count={live.length} prints={prints} mayEdit={mayEdit} onFail={fail} />
+          ))}
+          {mayEdit && <BareSpread album={album} number={live.length + 1} onFail={fail} />}
+        </ol>
+      </ReadingOrder>
       {!mayEdit && live.length === 0 && <EmptyLine className="max-w-[360px]">No spreads here yet. They show as soon as someone begins one.</EmptyLine>}
       {mayEdit && binned.length > 0 && <Bin albumId={album.id} spreads={binned} onFail={fail} />}
     </>

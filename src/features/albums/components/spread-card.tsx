@@ -1,3 +1,4 @@
+import { useSortable } from '@dnd-kit/sortable';
 import { useState } from 'react';
 import { Link } from 'react-router-dom';
 import { SPREAD_STATES, type SpreadSummary } from '#shared/contracts/albums';
@@ -27,6 +28,8 @@ export function SpreadCard({ spread, index, count, prints, mayEdit, onFail }: Sp
   const update = useUpdateSpread(spread.albumId);
   const announce = useAnnounce();
   const [isNaming, setIsNaming] = useState(false);
+  const sortable = useSortable({ id: spread.id, disabled: !mayEdit });
+  const { transform } = sortable;
   const move = (by: number): void => {
     update.mutate(
       { id: spread.id, position: index + by },
@@ -37,14 +40,32 @@ export function SpreadCard({ spread, index, count, prints, mayEdit, onFail }: Sp
     update.mutate({ id: spread.id, binned: true }, { onError: onFail, onSuccess: () => announce(`${spread.title} is in the bin`) });
   };
   return (
-    <li className="spread-card">
+    <li
+      ref={sortable.setNodeRef}
+      className={`spread-card ${sortable.isDragging ? 'is-in-hand' : ''}`}
+      style={{ transform: transform ? `translate(${transform.x}px, ${transform.y}px)` : undefined, transition: sortable.transition }}
+    >
       <div className="spread-thread">
         <SpreadPicture document={spread.document} prints={prints} />
       </div>
       <div className="mt-[9px] flex items-start gap-[9px]">
-        <span className="num pt-px text-13 leading-[22px] text-ink-2" aria-label={`Spread ${index + 1}`}>
-          {index + 1}
-        </span>
+        {mayEdit ? (
+          <button
+            type="button"
+            ref={sortable.setActivatorNodeRef}
+            {...sortable.attributes}
+            {...sortable.listeners}
+            className="spread-handle num"
+            aria-label={`Move ${spread.title}, spread ${index + 1} of ${count}`}
+            title="Drag to another place in the album"
+          >
+            {index + 1}
+          </button>
+        ) : (
+          <span className="num pt-px text-13 leading-[22px] text-ink-2" aria-label={`Spread ${index + 1}`}>
+            {index + 1}
+          </span>
+        )}
         <h2 className="min-w-0 text-16 leading-[22px]">
           <Link to={`/spreads/${spread.id}`} className="spread-link">
             {spread.title}
