@@ -184,6 +184,7 @@ describe('who may not edit', () => {
     await page.keyboard.press('Delete');
     expect(await compose.mat('L1').getAttribute('aria-label')).toBe(before);
     await page.getByRole('link', { name: /^Sort/ }).click();
+    await page.waitForURL(/\/sort$/);
     await page.getByRole('heading', { name: 'The line' }).waitFor();
     expect(await page.getByRole('button', { name: 'Add prints' }).count()).toBe(0);
     expect(await page.getByRole('checkbox', { disabled: false }).count()).toBe(0);

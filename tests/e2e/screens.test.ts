@@ -51,7 +51,7 @@ const selected = async (page: Page): Promise<void> => {
 };
 const popover = (name: string) => async (page: Page) => {
   await selected(page);
-  await page.getByRole('toolbar', { name: 'Mat' }).getByRole('button', { name, exact: true }).click();
+  await page.getByRole('toolbar', { name: 'Mat' }).getByRole('button', { name: new RegExp(`^${name}\\b`) }).click();
   await page.getByRole('dialog', { name }).getByRole('button').first().waitFor();
 };
 const composed = (page: Page) => new ComposePage(page).mat('L1').waitFor();
